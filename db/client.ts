@@ -1,0 +1,95 @@
+import 'server-only';
+import { sql } from 'drizzle-orm';
+import { drizzle, type NodePgDatabase } from 'drizzle-orm/node-postgres';
+import pg from 'pg';
+import { env } from '@/lib/env';
+
+/** A transaction that already knows whose rows it may see. Only the doors below make one. */
+export type Tx = Parameters<Parameters<NodePgDatabase['transaction']>[0]>[0];
+
+/** Whose data, and in whose name. `technicianId` narrows to one technician's records. */
+export type CompanyScope = { companyId: string; technicianId?: string | null; actor: string; reason?: string };
+
+type Settings = Partial<
+  Record<
+    | 'company_id'
+    | 'person_id'
+    | 'technician_id'
+    | 'actor'
+    | 'reason'
+    | 'sign_in_email'
+    | 'session_hash'
+    | 'token_hash'
+    | 'link_hash'
+    | 'company_name',
+    string
+  >
+>;
+
+// One pool a process, also when the development server reloads modules.
+const kept = globalThis as typeof globalThis & { tarebookPools?: { server?: pg.Pool; job?: pg.Pool } };
+kept.tarebookPools ??= {};
+
+const makePool = (connectionString: string, max: number) => {
+  const pool = new pg.Pool({ connectionString, max });
+  // A connection that dies while idle (server restart) is replaced; without a listener it would end the process.
+  pool.on('error', () => undefined);
+  return pool;
+};
+
+/** Connections of the role that serves requests. */
+export const serverPool = (): pg.Pool => {
+  const pools = kept.tarebookPools ?? {};
+  pools.server ??= makePool(env().SERVER_DATABASE_URL, 12);
+  return pools.server;
+};
+
+/** Connections of the role that works the queue. */
+export const jobPool = (): pg.Pool => {
+  const pools = kept.tarebookPools ?? {};
+  pools.job ??= makePool(env().JOB_DATABASE_URL, 6);
+  return pools.job;
+};
+
+const withSettings = <T>(settings: Settings, work: (tx: Tx) => Promise<T>, pool = serverPool()): Promise<T> =>
+  drizzle(pool).transaction(async (tx) => {
+    const all = Object.entries(settings).map(([key, value]) => sql`set_config(${`app.${key}`}, ${value}, true)`);
+    await tx.execute(sql`select ${sql.join(all, sql`, `)}`);
+    return work(tx);
+  });
+
+const companySettings = ({ companyId, technicianId, actor, reason }: CompanyScope): Settings => ({
+  company_id: companyId,
+  actor,
+  ...(technicianId ? { technician_id: technicianId } : {}),
+  ...(reason ? { reason } : {}),
+});
+
+/** The only door to a company's rows: row-level security shows this transaction that company and no other. */
+export const withCompany = <T>(scope: CompanyScope, work: (tx: Tx) => Promise<T>): Promise<T> =>
+  withSettings(companySettings(scope), work);
+
+/** The same door for background work, under the job role's longer time limits. */
+export const withCompanyJob = <T>(scope: CompanyScope, work: (tx: Tx) => Promise<T>): Promise<T> =>
+  withSettings(companySettings(scope), work, jobPool());
+
+/** A person's own rows: sessions, memberships, password. */
+export const withPerson = <T>(personId: string, work: (tx: Tx) => Promise<T>): Promise<T> =>
+  withSettings({ person_id: personId, actor: personId }, work);
+
+/** What somebody may see who knows one thing: an address to sign in, or an unguessable token by its hash. */
+export const withKnowledge = <T>(
+  known:
+    | { sign_in_email: string }
+    | { session_hash: string }
+    | { token_hash: string }
+    | { link_hash: string }
+    | { company_name: string },
+  work: (tx: Tx) => Promise<T>,
+): Promise<T> => withSettings(known, work);
+
+/** Sets further scope inside an open transaction, for example the person once the token has told who it is. */
+export const addSettings = async (tx: Tx, settings: Settings): Promise<void> => {
+  for (const [key, value] of Object.entries(settings))
+    await tx.execute(sql`select set_config(${`app.${key}`}, ${value}, true)`);
+};

@@ -1,0 +1,52 @@
+import { and, eq, sql } from 'drizzle-orm';
+import { pgView } from 'drizzle-orm/pg-core';
+import { appliances, branches, cylinders, sites, technicians } from '@/db/schema/places';
+import { recoveries as r } from '@/db/schema/recoveries';
+import { refrigerants } from '@/db/schema/refrigerants';
+
+/**
+ * One row a recovery with its names and derived figures: yield = recovered mass over full charge (40 CFR 82.152
+ * "full charge"), CO2-equivalent = recovered mass times GWP (AR4). The grain that every scope can filter.
+ */
+export const recoveryFacts = pgView('recovery_facts')
+  .with({ securityInvoker: true })
+  .as((qb) =>
+    qb
+      .select({
+        companyId: r.companyId,
+        id: r.id,
+        recordRef: r.recordRef,
+        recoveredOn: r.recoveredOn,
+        recoveredAt: r.recoveredAt,
+        month: r.recoveredMonth,
+        technicianId: r.technicianId,
+        technician: sql<string>`${technicians.name}`.as('technician'),
+        siteId: r.siteId,
+        site: sql<string>`${sites.name}`.as('site'),
+        applianceId: r.applianceId,
+        appliance: sql<string>`${appliances.name}`.as('appliance'),
+        branch: sql<string | null>`${branches.name}`.as('branch'),
+        category: r.category,
+        jobType: r.jobType,
+        refrigerant: r.refrigerant,
+        fullChargeKg: sql<number>`${r.fullChargeKg}`.mapWith(Number).as('full_charge_kg'),
+        recoveredMassKg: sql<number>`${r.recoveredMassKg}`.mapWith(Number).as('recovered_mass_kg'),
+        recoveryYield: sql<number>`(${r.recoveredMassKg} / ${r.fullChargeKg})::double precision`
+          .mapWith(Number)
+          .as('recovery_yield'),
+        co2eKg: sql<number>`(${r.recoveredMassKg}::double precision * ${refrigerants.gwpAr4})`
+          .mapWith(Number)
+          .as('co2e_kg'),
+        cylinder: sql<string | null>`${cylinders.name}`.as('cylinder'),
+        exclusion: r.exclusion,
+        importId: r.importId,
+        version: r.version,
+      })
+      .from(r)
+      .innerJoin(refrigerants, eq(refrigerants.designation, r.refrigerant))
+      .innerJoin(technicians, and(eq(technicians.companyId, r.companyId), eq(technicians.id, r.technicianId)))
+      .innerJoin(sites, and(eq(sites.companyId, r.companyId), eq(sites.id, r.siteId)))
+      .innerJoin(appliances, and(eq(appliances.companyId, r.companyId), eq(appliances.id, r.applianceId)))
+      .leftJoin(branches, and(eq(branches.companyId, r.companyId), eq(branches.id, r.branchId)))
+      .leftJoin(cylinders, and(eq(cylinders.companyId, r.companyId), eq(cylinders.id, r.cylinderId))),
+  );
