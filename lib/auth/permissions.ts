@@ -1,0 +1,40 @@
+import type { Role } from '@/lib/vocabulary';
+
+/** Everything the product lets somebody do. Pages, handlers and actions ask `may`; nothing else decides. */
+export const ACTIONS = [
+  'trends:read',
+  'technicians:read',
+  'sites:read',
+  'flags:read',
+  'records:read',
+  'records:write',
+  'records:export',
+  'imports:manage',
+  'company:manage',
+] as const;
+export type Action = (typeof ACTIONS)[number];
+
+/**
+ * Who may do what. A technician's `records:*` reach only his own records: row-level security narrows his transactions
+ * to them (see `technicianId` of the viewer).
+ */
+export const PERMISSIONS: Record<Role, readonly Action[]> = {
+  owner: ACTIONS,
+  operations: [
+    'trends:read',
+    'technicians:read',
+    'sites:read',
+    'flags:read',
+    'records:read',
+    'records:write',
+    'records:export',
+    'imports:manage',
+  ],
+  trainer: ['trends:read', 'technicians:read', 'sites:read', 'flags:read', 'records:read', 'records:export'],
+  technician: ['records:read', 'records:write', 'records:export'],
+  office: ['trends:read', 'sites:read', 'records:read', 'records:write', 'records:export', 'imports:manage'],
+  auditor: ['records:read', 'records:export'],
+};
+
+/** Whether a role includes an action. */
+export const may = (role: Role, action: Action): boolean => PERMISSIONS[role].includes(action);
