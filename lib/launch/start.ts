@@ -1,0 +1,36 @@
+import { prepareDatabase } from '@/db/cluster/prepare';
+import { DEMO_SIGN_INS, seedDemoIfEmpty } from '@/seed/demo';
+import { buildIfChanged } from './build';
+import { openDatabase, say, serverEnvironment } from './local';
+import { firstFreePort, serve } from './serve';
+
+const main = async () => {
+  const database = await openDatabase();
+  let stopping = false;
+  let stopServer = () => {};
+  const stop = (code: number) => {
+    if (stopping) return;
+    stopping = true;
+    stopServer();
+    // Another start of the same checkout may have found the cluster running: who started it stops it.
+    if (database.cluster && !database.cluster.wasRunning) database.cluster.stop();
+    process.exit(code);
+  };
+  for (const signal of ['SIGINT', 'SIGTERM', 'SIGHUP'] as const) process.on(signal, () => stop(0));
+  try {
+    await prepareDatabase(database.urls, database.secret);
+    await seedDemoIfEmpty(database.urls, say);
+    const port = await firstFreePort(Number(process.env.PORT ?? 3000));
+    buildIfChanged(serverEnvironment(database, `http://127.0.0.1:${port}`));
+    const served = await serve(database, port);
+    stopServer = () => served.process.kill('SIGTERM');
+    served.process.on('exit', (code) => stop(code ?? 1));
+    console.log(`ready ${served.address}`);
+    for (const { role, email, password } of DEMO_SIGN_INS) console.log(`  ${role.padEnd(12)} ${email}  ${password}`);
+  } catch (error) {
+    console.error(error instanceof Error ? error.message : error);
+    stop(1);
+  }
+};
+
+void main();
