@@ -1,0 +1,57 @@
+import { z } from 'zod';
+import { APPLIANCE_CATEGORIES, JOB_TYPES } from '@/lib/vocabulary';
+
+/** How a record that does not state a dimension is named in keys and in the address. */
+export const UNSTATED = 'unstated';
+
+const day = /^\d{4}-(0[1-9]|1[0-2])-(0[1-9]|[12]\d|3[01])$/;
+const month = /^\d{4}-(0[1-9]|1[0-2])$/;
+
+const monthOrDay = z
+  .string()
+  .refine(
+    (text) => month.test(text) || (day.test(text) && !Number.isNaN(Date.parse(text))),
+    'Expected YYYY-MM or YYYY-MM-DD',
+  );
+
+const many = <Item extends z.ZodType<string>>(item: Item) =>
+  z
+    .union([item, z.array(item)])
+    .transform((value) => (Array.isArray(value) ? value : [value]))
+    .optional();
+const name = z.string().min(1).max(200);
+
+/** The scope parameters that every analytic route takes; each but the dates may be repeated. */
+export const scopeShape = {
+  from: monthOrDay.optional(),
+  to: monthOrDay.optional(),
+  branch: many(name),
+  refrigerant: many(name),
+  technician: many(name),
+  site: many(name),
+  category: many(z.enum([...APPLIANCE_CATEGORIES, UNSTATED])),
+  jobType: many(z.enum([...JOB_TYPES, UNSTATED])),
+};
+
+/** The dimensions by which figures can be split and scopes narrowed. */
+export const DIMENSIONS = ['refrigerant', 'technician', 'site', 'branch', 'category', 'jobType'] as const;
+export type Dimension = (typeof DIMENSIONS)[number];
+
+export const scopeSchema = z
+  .object(scopeShape)
+  .refine((scope) => !scope.from || !scope.to || firstDay(scope.from) < dayAfter(scope.to), {
+    path: ['to'],
+    message: 'The end lies before the beginning',
+  });
+export type Scope = z.output<typeof scopeSchema>;
+
+/** First day of an inclusive `from`, `YYYY-MM-DD`. */
+export const firstDay = (from: string): string => (month.test(from) ? `${from}-01` : from);
+
+/** First day that an inclusive `to` leaves out, `YYYY-MM-DD`: ranges are half-open inside. */
+export const dayAfter = (to: string): string => {
+  const [year = 0, monthNo = 1, dayNo] = to.split('-').map(Number);
+  const next =
+    dayNo === undefined ? new Date(Date.UTC(year, monthNo, 1)) : new Date(Date.UTC(year, monthNo - 1, dayNo + 1));
+  return next.toISOString().slice(0, 10);
+};
