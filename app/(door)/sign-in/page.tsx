@@ -1,0 +1,3 @@
+export default function SignInPage() {
+  return <main>Sign in</main>;
+}
