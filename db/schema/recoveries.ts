@@ -60,6 +60,10 @@ export const recoveries = pgTable(
     startWeightKg: massKg('start_weight_kg'),
     endWeightKg: massKg('end_weight_kg'),
     recoveredMassKg: massKg('recovered_mass_kg').notNull(),
+    /** Recovered mass over full charge, kept because every figure that judges asks for it in order. */
+    recoveryYield: doublePrecision('recovery_yield')
+      .notNull()
+      .generatedAlwaysAs(sql`(recovered_mass_kg / (nameplate_charge_kg + added_charge_kg))::double precision`),
     massUnit: text('mass_unit', { enum: MASS_UNITS }).notNull(),
     /** Absolute pressure at the end of the pull; the reading as typed stands in `entered`. */
     finalVacuumKpaAbs: pressureKpa('final_vacuum_kpa_abs'),
@@ -102,8 +106,8 @@ export const recoveries = pgTable(
     index('recoveries_by_appliance').on(t.companyId, t.applianceId, t.recoveredOn),
     index('recoveries_by_cylinder').on(t.companyId, t.cylinderId),
     index('recoveries_by_import').on(t.companyId, t.importId),
-    // The covering index of the monthly views (recovered_month, refrigerant include masses) is in the guards migration:
-    // Drizzle 0.45 cannot write INCLUDE.
+    // The covering indexes of the monthly views (recoveries_by_month) and of the like jobs (recoveries_by_kind) stand in
+    // the migrations: Drizzle 0.45 cannot write INCLUDE.
     check('recoveries_masses', sql`nameplate_charge_kg > 0 and added_charge_kg >= 0 and recovered_mass_kg >= 0`),
     companyPolicy(),
     pgPolicy('of_technician', { as: 'restrictive', for: 'all', using: ofTechnician, withCheck: ofTechnician }),

@@ -15,10 +15,9 @@ const monthColumns = (key: SQL | PgColumn) => ({
   recoveredMassKg: sql<number>`sum(${r.recoveredMassKg})`.mapWith(Number).as('recovered_mass_kg'),
   fullChargeKg: sql<number>`sum(${r.fullChargeKg})`.mapWith(Number).as('full_charge_kg'),
   recoveries: sql<number>`count(*)`.mapWith(Number).as('recoveries'),
-  medianYield:
-    sql<number>`percentile_cont(0.5) within group (order by (${r.recoveredMassKg} / ${r.fullChargeKg})::double precision)`
-      .mapWith(Number)
-      .as('median_yield'),
+  medianYield: sql<number>`percentile_cont(0.5) within group (order by ${r.recoveryYield})`
+    .mapWith(Number)
+    .as('median_yield'),
   co2eKg: sql<number>`sum(${r.recoveredMassKg}::double precision * ${refrigerants.gwpAr4})`
     .mapWith(Number)
     .as('co2e_kg'),

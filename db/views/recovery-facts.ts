@@ -6,7 +6,9 @@ import { refrigerants } from '@/db/schema/refrigerants';
 
 /**
  * One row a recovery with its names and derived figures: yield = recovered mass over full charge (40 CFR 82.152
- * "full charge"), CO2-equivalent = recovered mass times GWP (AR4). The grain that every scope can filter.
+ * "full charge"), CO2-equivalent = recovered mass times GWP (AR4). The grain that every scope can filter. Foreign keys
+ * see to it that each row has its technician, site, appliance and refrigerant; they are left joins all the same, because
+ * PostgreSQL leaves such a join out of a query that asks for none of its columns.
  */
 export const recoveryFacts = pgView('recovery_facts')
   .with({ securityInvoker: true })
@@ -31,9 +33,7 @@ export const recoveryFacts = pgView('recovery_facts')
         refrigerant: r.refrigerant,
         fullChargeKg: sql<number>`${r.fullChargeKg}`.mapWith(Number).as('full_charge_kg'),
         recoveredMassKg: sql<number>`${r.recoveredMassKg}`.mapWith(Number).as('recovered_mass_kg'),
-        recoveryYield: sql<number>`(${r.recoveredMassKg} / ${r.fullChargeKg})::double precision`
-          .mapWith(Number)
-          .as('recovery_yield'),
+        recoveryYield: r.recoveryYield,
         co2eKg: sql<number>`(${r.recoveredMassKg}::double precision * ${refrigerants.gwpAr4})`
           .mapWith(Number)
           .as('co2e_kg'),
@@ -43,10 +43,10 @@ export const recoveryFacts = pgView('recovery_facts')
         version: r.version,
       })
       .from(r)
-      .innerJoin(refrigerants, eq(refrigerants.designation, r.refrigerant))
-      .innerJoin(technicians, and(eq(technicians.companyId, r.companyId), eq(technicians.id, r.technicianId)))
-      .innerJoin(sites, and(eq(sites.companyId, r.companyId), eq(sites.id, r.siteId)))
-      .innerJoin(appliances, and(eq(appliances.companyId, r.companyId), eq(appliances.id, r.applianceId)))
+      .leftJoin(refrigerants, eq(refrigerants.designation, r.refrigerant))
+      .leftJoin(technicians, and(eq(technicians.companyId, r.companyId), eq(technicians.id, r.technicianId)))
+      .leftJoin(sites, and(eq(sites.companyId, r.companyId), eq(sites.id, r.siteId)))
+      .leftJoin(appliances, and(eq(appliances.companyId, r.companyId), eq(appliances.id, r.applianceId)))
       .leftJoin(branches, and(eq(branches.companyId, r.companyId), eq(branches.id, r.branchId)))
       .leftJoin(cylinders, and(eq(cylinders.companyId, r.companyId), eq(cylinders.id, r.cylinderId))),
   );

@@ -1,13 +1,16 @@
 import { and, eq, gte, isNull, lt, sql } from 'drizzle-orm';
 import { alias, pgView, type QueryBuilder } from 'drizzle-orm/pg-core';
 import { recoveries as r } from '@/db/schema/recoveries';
+import type { ApplianceCategory } from '@/lib/vocabulary';
 
 /** Fewer like jobs than this, and nothing is said about any of them. */
 export const LEAST_LIKE_JOBS = 20;
 
 const peer = alias(r, 'peer');
-const peerYield = sql`(${peer.recoveredMassKg} / ${peer.fullChargeKg})::double precision`;
-const quartile = (p: number) => sql`percentile_cont(${sql.raw(String(p))}) within group (order by ${peerYield})`;
+const quartile = (p: number) =>
+  sql`percentile_cont(${sql.raw(String(p))}) within group (order by ${peer.recoveryYield})`;
+/** What the index of like jobs (recoveries_by_kind) is ordered by: an unstated category is a category of its own. */
+const kind = (table: typeof r | typeof peer) => sql`coalesce(${table.category}, '')`;
 const figure = (expression: ReturnType<typeof sql>, name: string) =>
   sql<number>`${expression}`.mapWith(Number).as(name);
 
@@ -21,7 +24,8 @@ const likeJobs = (qb: QueryBuilder) =>
     .select({
       companyId: peer.companyId,
       refrigerant: peer.refrigerant,
-      category: peer.category,
+      category: sql<ApplianceCategory | null>`nullif(${kind(peer)}, '')`.as('category'),
+      kind: sql<string>`${kind(peer)}`.as('kind'),
       likeJobs: figure(sql`count(*)`, 'like_jobs'),
       lowerQuartile: figure(quartile(0.25), 'lower_quartile'),
       medianYield: figure(quartile(0.5), 'median_yield'),
@@ -30,7 +34,7 @@ const likeJobs = (qb: QueryBuilder) =>
     })
     .from(peer)
     .where(isNull(peer.exclusion))
-    .groupBy(peer.companyId, peer.refrigerant, peer.category);
+    .groupBy(peer.companyId, peer.refrigerant, kind(peer));
 
 export const yieldLimits = pgView('yield_limits').with({ securityInvoker: true }).as(likeJobs);
 
@@ -39,13 +43,12 @@ export const lowRecoveries = pgView('low_recoveries')
   .with({ securityInvoker: true })
   .as((qb) => {
     const limits = likeJobs(qb).as('limits');
-    const recoveryYield = sql`(${r.recoveredMassKg} / ${r.fullChargeKg})::double precision`;
     return qb
       .select({
         companyId: r.companyId,
         recoveryId: r.id,
         month: r.recoveredMonth,
-        recoveryYield: figure(recoveryYield, 'recovery_yield'),
+        recoveryYield: r.recoveryYield,
         likeJobs: limits.likeJobs,
         lowerQuartile: limits.lowerQuartile,
         medianYield: limits.medianYield,
@@ -55,11 +58,7 @@ export const lowRecoveries = pgView('low_recoveries')
       .from(r)
       .innerJoin(
         limits,
-        and(
-          eq(limits.companyId, r.companyId),
-          eq(limits.refrigerant, r.refrigerant),
-          sql`${limits.category} is not distinct from ${r.category}`,
-        ),
+        and(eq(limits.companyId, r.companyId), eq(limits.refrigerant, r.refrigerant), eq(limits.kind, kind(r))),
       )
-      .where(and(isNull(r.exclusion), gte(limits.likeJobs, LEAST_LIKE_JOBS), lt(recoveryYield, limits.lowerFence)));
+      .where(and(isNull(r.exclusion), gte(limits.likeJobs, LEAST_LIKE_JOBS), lt(r.recoveryYield, limits.lowerFence)));
   });
