@@ -4,15 +4,16 @@ import { APPLIANCE_CATEGORIES, JOB_TYPES } from '@/lib/vocabulary';
 /** How a record that does not state a dimension is named in keys and in the address. */
 export const UNSTATED = 'unstated';
 
-const day = /^\d{4}-(0[1-9]|1[0-2])-(0[1-9]|[12]\d|3[01])$/;
-const month = /^\d{4}-(0[1-9]|1[0-2])$/;
+const day = /^(?!0000)\d{4}-(0[1-9]|1[0-2])-(0[1-9]|[12]\d|3[01])$/;
+const month = /^(?!0000)\d{4}-(0[1-9]|1[0-2])$/;
+
+// JavaScript reads 31 February as 3 March; only a day that comes back as it went in is one.
+const isDay = (text: string): boolean =>
+  day.test(text) && new Date(`${text}T00:00:00Z`).toISOString().slice(0, 10) === text;
 
 const monthOrDay = z
   .string()
-  .refine(
-    (text) => month.test(text) || (day.test(text) && !Number.isNaN(Date.parse(text))),
-    'Expected YYYY-MM or YYYY-MM-DD',
-  );
+  .refine((text) => month.test(text) || isDay(text), 'Expected a day or month there is: YYYY-MM-DD or YYYY-MM');
 
 const many = <Item extends z.ZodType<string>>(item: Item) =>
   z
