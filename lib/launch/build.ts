@@ -1,8 +1,9 @@
-import { spawnSync } from 'node:child_process';
 import { createHash } from 'node:crypto';
 import { existsSync, readdirSync, readFileSync, statSync, writeFileSync } from 'node:fs';
 import { join } from 'node:path';
-import { say } from './local';
+import { runNode } from './children';
+import { LOCAL_FOLDER, say } from './local';
+import { alone } from './lock';
 
 const SOURCES = [
   'app',
@@ -35,15 +36,18 @@ const fingerprint = (): string => {
   return hash.digest('hex');
 };
 
+const isBuilt = (now: string): boolean =>
+  existsSync(STAMP) && existsSync('.next/BUILD_ID') && readFileSync(STAMP, 'utf8') === now;
+
 /** Builds the application when its sources are not the ones of the last build; throws when the build fails. */
-export const buildIfChanged = (environment: NodeJS.ProcessEnv): void => {
-  const now = fingerprint();
-  if (existsSync(STAMP) && existsSync('.next/BUILD_ID') && readFileSync(STAMP, 'utf8') === now) return;
-  say('building');
-  const built = spawnSync(process.execPath, ['node_modules/next/dist/bin/next', 'build'], {
-    encoding: 'utf8',
-    env: { ...environment, NODE_ENV: 'production', NEXT_TELEMETRY_DISABLED: '1' },
+export const buildIfChanged = (environment: NodeJS.ProcessEnv): Promise<void> =>
+  alone(join(LOCAL_FOLDER, 'build.lock'), async () => {
+    const now = fingerprint();
+    if (isBuilt(now)) return;
+    say('building');
+    const built = await runNode(['node_modules/next/dist/bin/next', 'build'], {
+      environment: { ...environment, NODE_ENV: 'production', NEXT_TELEMETRY_DISABLED: '1' },
+    });
+    if (built.code !== 0) throw new Error(`The build failed:\n${built.output}`);
+    writeFileSync(STAMP, now);
   });
-  if (built.status !== 0) throw new Error(`The build failed:\n${built.stdout}${built.stderr}`);
-  writeFileSync(STAMP, now);
-};

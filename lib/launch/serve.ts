@@ -1,20 +1,6 @@
 import { type ChildProcess, spawn } from 'node:child_process';
-import { createServer } from 'node:net';
 import { setTimeout as sleep } from 'node:timers/promises';
 import { type OpenDatabase, serverEnvironment } from './local';
-
-const isFree = (port: number): Promise<boolean> =>
-  new Promise((resolve) => {
-    const probe = createServer();
-    probe.once('error', () => resolve(false));
-    probe.listen(port, '127.0.0.1', () => probe.close(() => resolve(true)));
-  });
-
-/** The first free loopback port from `wanted` on; throws after a hundred taken ones. */
-export const firstFreePort = async (wanted: number): Promise<number> => {
-  for (let port = wanted; port < wanted + 100; port++) if (await isFree(port)) return port;
-  throw new Error(`No free port between ${wanted} and ${wanted + 99}.`);
-};
 
 const answers = async (address: string): Promise<boolean> => {
   const response = await fetch(`${address}/api/health`, { signal: AbortSignal.timeout(2000) }).catch(() => null);
@@ -24,18 +10,21 @@ const answers = async (address: string): Promise<boolean> => {
 /** A running server process. */
 export type Served = { address: string; process: ChildProcess };
 
-/** Starts the built application and waits until /api/health answers 200; throws when the process ends first. */
+/**
+ * Starts the built application and waits until /api/health answers 200; throws when the process ends first. `log` is
+ * where the server writes: the terminal, or an open file.
+ */
 export const serve = async (
   database: OpenDatabase,
   port: number,
-  output: 'inherit' | 'ignore' = 'inherit',
+  log: 'inherit' | number = 'inherit',
 ): Promise<Served> => {
   const address = `http://127.0.0.1:${port}`;
   const child = spawn(
     process.execPath,
     ['node_modules/next/dist/bin/next', 'start', '-H', '127.0.0.1', '-p', String(port)],
     {
-      stdio: ['ignore', output === 'inherit' ? process.stderr : 'ignore', output],
+      stdio: ['ignore', log === 'inherit' ? process.stderr : log, log],
       env: { ...serverEnvironment(database, address), NODE_ENV: 'production', NEXT_TELEMETRY_DISABLED: '1' },
     },
   );

@@ -1,8 +1,9 @@
 import { prepareDatabase } from '@/db/cluster/prepare';
+import { firstFreePort } from '@/lib/ports';
 import { DEMO_SIGN_INS, seedDemoIfEmpty } from '@/seed/demo';
 import { buildIfChanged } from './build';
 import { openDatabase, say, serverEnvironment } from './local';
-import { firstFreePort, serve } from './serve';
+import { serve } from './serve';
 
 const main = async () => {
   const database = await openDatabase();
@@ -21,7 +22,7 @@ const main = async () => {
     await prepareDatabase(database.urls, database.secret);
     await seedDemoIfEmpty(database.urls, say);
     const port = await firstFreePort(Number(process.env.PORT ?? 3000));
-    buildIfChanged(serverEnvironment(database, `http://127.0.0.1:${port}`));
+    await buildIfChanged(serverEnvironment(database, `http://127.0.0.1:${port}`));
     const served = await serve(database, port);
     stopServer = () => served.process.kill('SIGTERM');
     served.process.on('exit', (code) => stop(code ?? 1));
