@@ -65,7 +65,7 @@ export const grantTables = (urls: DatabaseUrls): Promise<void> =>
     const readers = `${DATABASE_ROLES.server}, ${DATABASE_ROLES.job}`;
     await owner.query(`grant select, insert, update, delete on all tables in schema public to ${readers}`);
     await owner.query(`grant usage, select on all sequences in schema public to ${readers}`);
-    await owner.query(`revoke insert, update, delete on history, history_heads from ${readers}`);
+    await owner.query(`revoke insert, update, delete on history, history_heads, monthly_summary from ${readers}`);
     await owner.query(`revoke insert, update, delete on refrigerants, refrigerant_components from ${readers}`);
     await owner.query(
       `alter default privileges in schema public grant select, insert, update, delete on tables to ${readers}`,

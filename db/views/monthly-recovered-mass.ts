@@ -1,51 +1,56 @@
-import { and, eq, isNull, type SQL, sql } from 'drizzle-orm';
+import { and, eq, type SQL, sql } from 'drizzle-orm';
 import { type PgColumn, pgView, type QueryBuilder } from 'drizzle-orm/pg-core';
+import { type SUMMARY_DIMENSIONS, monthlySummary as s } from '@/db/schema/monthly-summary';
 import { branches, sites, technicians } from '@/db/schema/places';
-import { recoveries as r } from '@/db/schema/recoveries';
-import { refrigerants } from '@/db/schema/refrigerants';
 
 /**
- * Recovered mass by month and one dimension. Entry errors are left out; `key` is NULL where a record does not state the
- * dimension. Total yield is the ratio of the two sums, median yield the middle one of the records.
+ * Recovered mass by month and one dimension. Entry errors are left out; `key` is NULL where records do not state the
+ * dimension. Total yield is the ratio of the two sums, median yield the middle one of the records. The sums stand ready
+ * in monthly_summary; its trigger says how they are made.
  */
 const monthColumns = (key: SQL | PgColumn) => ({
-  companyId: r.companyId,
-  month: r.recoveredMonth,
+  companyId: s.companyId,
+  month: s.month,
   key: sql<string | null>`${key}`.as('key'),
-  recoveredMassKg: sql<number>`sum(${r.recoveredMassKg})`.mapWith(Number).as('recovered_mass_kg'),
-  fullChargeKg: sql<number>`sum(${r.fullChargeKg})`.mapWith(Number).as('full_charge_kg'),
-  recoveries: sql<number>`count(*)`.mapWith(Number).as('recoveries'),
-  medianYield: sql<number>`percentile_cont(0.5) within group (order by ${r.recoveryYield})`
-    .mapWith(Number)
-    .as('median_yield'),
-  co2eKg: sql<number>`sum(${r.recoveredMassKg}::double precision * ${refrigerants.gwpAr4})`
-    .mapWith(Number)
-    .as('co2e_kg'),
+  recoveredMassKg: sql<number>`${s.recoveredMassKg}`.mapWith(Number).as('recovered_mass_kg'),
+  fullChargeKg: sql<number>`${s.fullChargeKg}`.mapWith(Number).as('full_charge_kg'),
+  recoveries: s.recoveries,
+  medianYield: s.medianYield,
+  co2eKg: s.co2eKg,
+  vacuumStated: s.vacuumStated,
+  downToLevel: s.downToLevel,
+  holdStated: s.holdStated,
+  held: s.held,
 });
 
-const byColumn = (column: PgColumn) => (qb: QueryBuilder) =>
+type SummaryDimension = (typeof SUMMARY_DIMENSIONS)[number];
+
+const byWord = (dimension: SummaryDimension) => (qb: QueryBuilder) =>
   qb
-    .select(monthColumns(column))
-    .from(r)
-    .innerJoin(refrigerants, eq(refrigerants.designation, r.refrigerant))
-    .where(isNull(r.exclusion))
-    .groupBy(r.companyId, r.recoveredMonth, sql`3`);
+    .select(monthColumns(sql`nullif(${s.key}, '')`))
+    .from(s)
+    .where(eq(s.dimension, dimension));
 
-const byName = (table: typeof technicians | typeof sites | typeof branches, id: PgColumn) => (qb: QueryBuilder) =>
-  qb
-    .select(monthColumns(table.name))
-    .from(r)
-    .innerJoin(refrigerants, eq(refrigerants.designation, r.refrigerant))
-    .leftJoin(table, and(eq(table.companyId, r.companyId), eq(table.id, id)))
-    .where(isNull(r.exclusion))
-    .groupBy(r.companyId, r.recoveredMonth, sql`3`);
+const byName =
+  (dimension: SummaryDimension, table: typeof technicians | typeof sites | typeof branches) => (qb: QueryBuilder) =>
+    qb
+      .select(monthColumns(table.name))
+      .from(s)
+      .leftJoin(table, and(eq(table.companyId, s.companyId), eq(table.id, sql`nullif(${s.key}, '')::uuid`)))
+      .where(eq(s.dimension, dimension));
 
-const monthlyView = (dimension: string) =>
-  pgView(`monthly_recovered_mass_by_${dimension}`).with({ securityInvoker: true });
+const monthlyView = <Name extends string>(name: Name) => pgView(name).with({ securityInvoker: true });
 
-export const monthlyRecoveredMassByRefrigerant = monthlyView('refrigerant').as(byColumn(r.refrigerant));
-export const monthlyRecoveredMassByCategory = monthlyView('category').as(byColumn(r.category));
-export const monthlyRecoveredMassByJobType = monthlyView('job_type').as(byColumn(r.jobType));
-export const monthlyRecoveredMassByTechnician = monthlyView('technician').as(byName(technicians, r.technicianId));
-export const monthlyRecoveredMassBySite = monthlyView('site').as(byName(sites, r.siteId));
-export const monthlyRecoveredMassByBranch = monthlyView('branch').as(byName(branches, r.branchId));
+export const monthlyRecoveredMass = monthlyView('monthly_recovered_mass').as(byWord('all'));
+export const monthlyRecoveredMassByRefrigerant = monthlyView('monthly_recovered_mass_by_refrigerant').as(
+  byWord('refrigerant'),
+);
+export const monthlyRecoveredMassByCategory = monthlyView('monthly_recovered_mass_by_category').as(byWord('category'));
+export const monthlyRecoveredMassByJobType = monthlyView('monthly_recovered_mass_by_job_type').as(byWord('job_type'));
+export const monthlyRecoveredMassByTechnician = monthlyView('monthly_recovered_mass_by_technician').as(
+  byName('technician', technicians),
+);
+export const monthlyRecoveredMassBySite = monthlyView('monthly_recovered_mass_by_site').as(byName('site', sites));
+export const monthlyRecoveredMassByBranch = monthlyView('monthly_recovered_mass_by_branch').as(
+  byName('branch', branches),
+);
