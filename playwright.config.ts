@@ -14,7 +14,7 @@ const CHROMIUM_FLAGS = [
 // `npm test -- e2e` starts the application and says where it is.
 export default defineConfig({
   testDir: './tests/e2e',
-  outputDir: './tests/e2e/.output',
+  outputDir: './.local/e2e',
   workers: 1,
   retries: 0,
   forbidOnly: true,

@@ -36,4 +36,8 @@ const child = spawn(
 );
 // The child hears Ctrl-C from the terminal itself; a signal sent to this process alone is passed on.
 for (const signal of ['SIGINT', 'SIGTERM', 'SIGHUP']) process.on(signal, () => child.kill(signal));
+// npm that is ended leaves this process to itself; nobody would know that it still runs.
+const parent = process.ppid;
+const watch = setInterval(() => process.ppid !== parent && child.kill('SIGTERM'), 500);
+watch.unref();
 child.on('exit', (code, signal) => process.exit(code ?? (signal ? 1 : 0)));

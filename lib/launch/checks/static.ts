@@ -3,7 +3,12 @@ import { oneCheck, type Tally } from './tally';
 
 /** Format, lint and import rules, as one check. */
 export const lint = async (): Promise<Tally> => {
-  const { code, output } = await runNode(['node_modules/@biomejs/biome/bin/biome', 'ci', '.']);
+  const { code, output } = await runNode([
+    'node_modules/@biomejs/biome/bin/biome',
+    'ci',
+    `--colors=${process.stderr.isTTY ? 'force' : 'off'}`,
+    '.',
+  ]);
   return oneCheck(code, output);
 };
 
