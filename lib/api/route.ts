@@ -11,6 +11,7 @@ import { env } from '@/lib/env';
 import { AppError, forbidden, unauthorized } from '@/lib/errors';
 import { log } from '@/lib/log';
 import type { Contract } from './contract';
+import { keptAnswer } from './kept-answers';
 import { problemResponse, throwBadInput } from './problem';
 
 const viewerOf = async (request: Request): Promise<Viewer> => {
@@ -77,6 +78,25 @@ export const searchInput = (url: string): Record<string, string | string[]> => {
 /** JSON that is nobody else's to keep. */
 export const json = (body: unknown, status = 200): Response =>
   Response.json(body, { status, headers: { 'cache-control': 'private, no-store' } });
+
+/** JSON text that is ready to be sent. */
+const jsonText = (body: string): Response =>
+  new Response(body, { headers: { 'content-type': 'application/json', 'cache-control': 'private, no-store' } });
+
+/**
+ * A reading route from its contract: parse the query, load, check the answer against the promise. For answers that
+ * follow from the company's tracked records alone and cost something to compute: kept until one of them changes.
+ */
+export const getKeptRoute = <Query extends z.ZodType, Answer extends z.ZodType>(
+  contract: Contract<Query, Answer>,
+  load: (query: z.output<Query>, viewer: Viewer) => Promise<z.input<Answer>>,
+) =>
+  withViewer(contract.action, async (request, viewer) => {
+    const query = contract.query.safeParse(searchInput(request.url));
+    if (!query.success) return throwBadInput(query.error);
+    const compute = async () => JSON.stringify(contract.response.parse(await load(query.data, viewer)));
+    return jsonText(await keptAnswer(viewer, `${contract.path} ${JSON.stringify(query.data)}`, compute));
+  });
 
 /** A reading route from its contract: parse the query, load, check the answer against the promise. */
 export const getRoute = <Query extends z.ZodType, Answer extends z.ZodType>(
