@@ -42,11 +42,10 @@ export const prepareRoles = (urls: DatabaseUrls, secret: string): Promise<void> 
     for (const role of Object.keys(DATABASE_ROLES) as DatabaseRole[]) {
       const name = admin.escapeIdentifier(DATABASE_ROLES[role]);
       const exists = await admin.query('select from pg_roles where rolname = $1', [DATABASE_ROLES[role]]);
-      const verb = exists.rowCount ? 'alter' : 'create';
       const password = admin.escapeLiteral(rolePassword(secret, role));
-      await admin.query(
-        `${verb} role ${name} login nosuperuser nobypassrls nocreatedb nocreaterole password ${password}`,
-      );
+      // A new role can nothing by default. Saying so again of an old one would take a superuser; the server refuses to
+      // start under a role that can more (instrumentation.ts).
+      await admin.query(`${exists.rowCount ? 'alter' : 'create'} role ${name} login password ${password}`);
       for (const [key, value] of Object.entries(SETTINGS[role])) {
         await admin.query(`alter role ${name} set ${key} = '${value}'`);
       }
