@@ -1,7 +1,8 @@
 import 'server-only';
 import { and, gte, inArray, isNull, lt, or, type SQL } from 'drizzle-orm';
 import { recoveryFacts as f } from '@/db/views/recovery-facts';
-import { type Dimension, dayAfter, firstDay, type Scope, UNSTATED } from './scope';
+import { type Dimension, UNSTATED } from './dimensions';
+import { dayAfter, firstDay, type Scope } from './scope';
 
 /** Where each dimension stands in the facts. */
 export const FACT_COLUMNS = {

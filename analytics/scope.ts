@@ -1,8 +1,8 @@
 import { z } from 'zod';
 import { APPLIANCE_CATEGORIES, JOB_TYPES } from '@/lib/vocabulary';
+import { UNSTATED } from './dimensions';
 
-/** How a record that does not state a dimension is named in keys and in the address. */
-export const UNSTATED = 'unstated';
+export { DIMENSIONS, type Dimension, UNSTATED } from './dimensions';
 
 const day = /^(?!0000)\d{4}-(0[1-9]|1[0-2])-(0[1-9]|[12]\d|3[01])$/;
 const month = /^(?!0000)\d{4}-(0[1-9]|1[0-2])$/;
@@ -33,10 +33,6 @@ export const scopeShape = {
   category: many(z.enum([...APPLIANCE_CATEGORIES, UNSTATED])),
   jobType: many(z.enum([...JOB_TYPES, UNSTATED])),
 };
-
-/** The dimensions by which figures can be split and scopes narrowed. */
-export const DIMENSIONS = ['refrigerant', 'technician', 'site', 'branch', 'category', 'jobType'] as const;
-export type Dimension = (typeof DIMENSIONS)[number];
 
 export const scopeSchema = z
   .object(scopeShape)
