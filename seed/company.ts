@@ -1,0 +1,45 @@
+import { makePlaces } from './appliances';
+import { monthsUntil } from './calendar';
+import { type Cylinder, cylinderPool } from './cylinders';
+import type { Plan } from './plan';
+import { seededRandom } from './random';
+import { playRecoveries } from './recoveries';
+import { makeSites, type Site } from './sites';
+import { makeTechnicians, type Technician } from './technicians';
+import type { Ticket } from './ticket';
+import type { DemoTruth } from './truth';
+
+/** A whole invented company: who and what there is, every ticket, and what was planted. */
+export type DemoCompany = {
+  plan: Plan;
+  technicians: readonly Technician[];
+  sites: readonly Site[];
+  cylinders: readonly Cylinder[];
+  tickets: readonly Ticket[];
+  truth: DemoTruth;
+};
+
+/** Makes the company up. The same plan gives the same company, to the last digit. */
+export const makeCompany = (plan: Plan): DemoCompany => {
+  const random = seededRandom(plan.seed);
+  const months = monthsUntil(plan.endMonth, plan.months);
+  const sites = makeSites(plan, random.fork('sites'));
+  const technicians = makeTechnicians(plan, months, random.fork('technicians'));
+  const places = makePlaces(plan, sites, months[0] ?? plan.endMonth, random.fork('places'));
+  const pool = cylinderPool(plan.company.slice(0, 2).toUpperCase(), random.fork('pool'));
+  const truth: DemoTruth = {
+    faults: [],
+    shortOnArrival: [],
+    technicians: [],
+    driftingScale: null,
+    monthlyMassKg: {},
+    chronicLeaks: [],
+  };
+  const world = { plan, months, crew: technicians, places, pool, truth };
+  const tickets = playRecoveries(world, random.fork('recoveries'));
+  truth.chronicLeaks = places
+    .flatMap(({ units }) => units)
+    .filter(({ leaksAgain }) => leaksAgain)
+    .map((unit) => `${unit.site.name} / ${unit.name}`);
+  return { plan, technicians, sites, cylinders: pool.all, tickets, truth };
+};
