@@ -1,5 +1,71 @@
+import { Temporal } from 'temporal-polyfill';
+import { withConnection } from '@/db/cluster/roles';
 import type { DatabaseUrls } from '@/db/cluster/urls';
+import { companiesNamed, createCompany } from '@/lib/auth/provision';
+import { monthBefore } from './calendar';
+import { makeCompany } from './company';
+import { loadPlaces } from './load-places';
+import { loadTickets } from './load-tickets';
+import { demoStateOf, markDemo } from './marker';
+import { COMPANY_NAME, SMALL_COMPANY_NAME } from './names';
+import { demoPlan, type Plan, smallPlan } from './plan';
+import { removeCompany } from './remove';
+import { addSignIns } from './sign-ins';
 
-export const DEMO_SIGN_INS: { role: string; email: string; password: string }[] = [];
+export { DEMO_SIGN_INS } from './sign-ins';
 
-export const seedDemoIfEmpty = async (_urls: DatabaseUrls, _say: (line: string) => void): Promise<void> => {};
+/** Names of the two demo companies. */
+export const DEMO_COMPANIES = [COMPANY_NAME, SMALL_COMPANY_NAME] as const;
+const TIME_ZONE = 'America/New_York';
+
+const makeOne = async (plan: Plan) => {
+  const company = makeCompany(plan);
+  const companyId = await createCompany(plan.company, { timeZone: TIME_ZONE });
+  await markDemo(companyId, 'begun');
+  await loadPlaces(companyId, company);
+  await loadTickets(companyId, company);
+  return { companyId, company };
+};
+
+const makeDemo = async (): Promise<void> => {
+  const endMonth = monthBefore(Temporal.Now.instant(), TIME_ZONE);
+  const large = await makeOne(demoPlan(endMonth));
+  const small = await makeOne(smallPlan(endMonth));
+  await addSignIns(large.companyId, large.company, small.companyId);
+  await markDemo(large.companyId, 'whole');
+  await markDemo(small.companyId, 'whole');
+};
+
+const demoCompanies = async () => {
+  const ids = (await Promise.all(DEMO_COMPANIES.map(companiesNamed))).flat();
+  const all = await Promise.all(ids.map(async (id) => ({ id, state: await demoStateOf(id) })));
+  return all.filter(({ state }) => state !== 'none');
+};
+
+/** Whether the database has never held a company: its table has no page yet. Needs no right to see anybody's rows. */
+const isUntouched = (urls: DatabaseUrls): Promise<boolean> =>
+  withConnection(urls.owner, async (owner) => {
+    const { rows } = await owner.query<{ untouched: boolean }>(
+      `select pg_relation_size('public.companies') = 0 as untouched`,
+    );
+    return rows[0]?.untouched === true;
+  });
+
+/**
+ * Fills a database that has never held a company with the demo; makes a demo anew whose making was broken off. Does
+ * nothing anywhere else. Throws the database's own error.
+ */
+export const seedDemoIfEmpty = async (urls: DatabaseUrls, say: (line: string) => void): Promise<void> => {
+  const found = await demoCompanies();
+  const broken = found.some(({ state }) => state === 'begun');
+  if (!broken && !(await isUntouched(urls))) return;
+  say('filling the demo company');
+  for (const { id } of found) await removeCompany(urls.owner, id);
+  await makeDemo();
+};
+
+/** Removes the demo companies and makes them anew; other companies stay as they are. */
+export const resetDemo = async (urls: DatabaseUrls): Promise<void> => {
+  for (const { id } of await demoCompanies()) await removeCompany(urls.owner, id);
+  await makeDemo();
+};

@@ -4,17 +4,20 @@ import { eq, sql } from 'drizzle-orm';
 import { addSettings, withCompany, withKnowledge } from '@/db/client';
 import { companies } from '@/db/schema/companies';
 import { accessTokens, memberships, passwordLinks, people } from '@/db/schema/people';
-import type { Role } from '@/lib/vocabulary';
+import type { DisplayUnit, Role } from '@/lib/vocabulary';
 import { hashToken, newToken } from './tokens';
 
 const SYSTEM = 'command line';
 const LINK_DAYS = 7;
 
 /** Makes an empty company; gives its id. */
-export const createCompany = async (name: string, options: { timeZone?: string } = {}): Promise<string> => {
+export const createCompany = async (
+  name: string,
+  options: { timeZone?: string; massUnit?: DisplayUnit } = {},
+): Promise<string> => {
   const companyId = randomUUID();
   await withCompany({ companyId, actor: SYSTEM }, (tx) =>
-    tx.insert(companies).values({ id: companyId, name, ...(options.timeZone ? { timeZone: options.timeZone } : {}) }),
+    tx.insert(companies).values({ id: companyId, name, ...options }),
   );
   return companyId;
 };

@@ -22,11 +22,19 @@ export const openDatabase = async (): Promise<OpenDatabase> => {
   return { urls: databaseUrls(cluster.adminUrl, secret), secret, cluster };
 };
 
+// Read before `enter` fills it in: only a person's own word counts as the public address.
+const publicAddress = process.env.NEXTAUTH_URL;
+
 /** Environment of the server process for a database and a public address. */
 export const serverEnvironment = ({ urls, secret }: OpenDatabase, address: string): NodeJS.ProcessEnv => ({
   ...process.env,
   SERVER_DATABASE_URL: urls.server,
   JOB_DATABASE_URL: urls.job,
   NEXTAUTH_SECRET: secret,
-  NEXTAUTH_URL: process.env.NEXTAUTH_URL ?? address,
+  NEXTAUTH_URL: publicAddress ?? address,
 });
+
+/** Makes the database the one that code of this process works with. */
+export const enter = (database: OpenDatabase, address = 'http://127.0.0.1:3000'): void => {
+  Object.assign(process.env, serverEnvironment(database, address));
+};
