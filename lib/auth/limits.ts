@@ -37,7 +37,8 @@ export const countSignInTry = async (email: string, address: string): Promise<vo
   }
 };
 
-/** A right password clears the account's counter. */
-export const forgetSignInTries = async (email: string): Promise<void> => {
+/** A right password clears the account's counter and takes its own try off the address, which an office shares. */
+export const forgetSignInTries = async (email: string, address: string): Promise<void> => {
   await limiters().byAccount.delete(email.toLowerCase());
+  await limiters().byAddress.reward(address);
 };

@@ -21,11 +21,13 @@ declare module 'next-auth/jwt' {
   }
 }
 
+/** The last hop is what the nearest proxy, or Next itself, saw; what stands before it anybody can write. */
 const addressOf = (headers: Record<string, string> | undefined) =>
-  headers?.['x-forwarded-for']?.split(',')[0]?.trim() || headers?.['x-real-ip'] || 'local';
+  headers?.['x-forwarded-for']?.split(',').at(-1)?.trim() || headers?.['x-real-ip'] || 'local';
 
 const checkPassword = async (email: string, password: string, headers: Record<string, string> | undefined) => {
-  await countSignInTry(email, addressOf(headers));
+  const address = addressOf(headers);
+  await countSignInTry(email, address);
   const [person] = await withKnowledge({ sign_in_email: email }, (tx) =>
     tx
       .select()
@@ -33,7 +35,7 @@ const checkPassword = async (email: string, password: string, headers: Record<st
       .where(eq(sql`lower(${people.email})`, email.toLowerCase())),
   );
   if (!(await passwordMatches(person?.passwordHash, password)) || !person) return null;
-  await forgetSignInTries(email);
+  await forgetSignInTries(email, address);
   const sessionToken = await openSession(person.id, headers?.['user-agent'] ?? null);
   return { id: person.id, sessionToken };
 };

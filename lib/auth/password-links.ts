@@ -26,17 +26,16 @@ export const personOfLink = (token: string): Promise<{ id: string; name: string;
 export const setPasswordByLink = async (token: string, password: string): Promise<boolean> => {
   const passwordHash = await hashPassword(password);
   return withKnowledge({ link_hash: hashToken(token) }, async (tx) => {
-    const [link] = await tx
-      .select({ personId: passwordLinks.personId })
-      .from(passwordLinks)
-      .where(usable(token))
-      .for('update');
+    const [link] = await tx.select({ personId: passwordLinks.personId }).from(passwordLinks).where(usable(token));
     if (!link) return false;
     await addSettings(tx, { person_id: link.personId });
-    await tx
+    // Of two uses at once the second waits for the first here, and then finds the link used.
+    const used = await tx
       .update(passwordLinks)
       .set({ usedAt: sql`now()` })
-      .where(eq(passwordLinks.tokenHash, hashToken(token)));
+      .where(usable(token))
+      .returning({ personId: passwordLinks.personId });
+    if (used.length === 0) return false;
     await tx.update(people).set({ passwordHash }).where(eq(people.id, link.personId));
     await tx.delete(sessions).where(eq(sessions.personId, link.personId));
     return true;
