@@ -1,0 +1,53 @@
+'use client';
+
+import { clsx } from 'clsx';
+import { type ReactNode, useState } from 'react';
+import { Dialog } from '@/components/ui/dialog';
+import { Popover } from '@/components/ui/popover';
+import { useNarrow } from './use-narrow';
+
+type ScopePartProps = {
+  /** What is set here, for the reader of the opened part: "Branches". */
+  label: string;
+  /** The words in the sentence. */
+  children: ReactNode;
+  /** The words say something that the records do not know. */
+  doubtful?: boolean;
+  /** What stands in the opened part; `close` puts it away. */
+  editor: (close: () => void) => ReactNode;
+};
+
+/** One part of the sentence, set in place: beside the word on a wide window, in a sheet from the bottom on a phone. */
+export const ScopePart = ({ label, children, doubtful = false, editor }: ScopePartProps) => {
+  const [open, setOpen] = useState(false);
+  const narrow = useNarrow();
+  const close = () => setOpen(false);
+  const word = (
+    <button
+      type="button"
+      onClick={narrow ? () => setOpen(true) : undefined}
+      aria-haspopup="dialog"
+      className={clsx(
+        'inline border-b-[1.5px] border-dotted border-ink-3 pb-px text-left font-semibold text-ink hover:border-solid hover:border-act hover:text-act pointer-coarse:py-1.5',
+        doubtful && 'marked',
+      )}
+    >
+      {children}
+    </button>
+  );
+  if (narrow) {
+    return (
+      <>
+        {word}
+        <Dialog open={open} onOpenChange={setOpen} title={label}>
+          {editor(close)}
+        </Dialog>
+      </>
+    );
+  }
+  return (
+    <Popover open={open} onOpenChange={setOpen} trigger={word} label={label} className="p-4">
+      {editor(close)}
+    </Popover>
+  );
+};

@@ -1,0 +1,114 @@
+'use client';
+
+import type { ReactNode } from 'react';
+import type { Dimension } from '@/analytics/dimensions';
+import { useScopeOptions } from '@/analytics/scope-options/hook';
+import { TextButton } from '@/components/ui/button';
+import { Failed, Loading } from '@/components/ui/states';
+import { useViewer } from '@/components/viewer-context';
+import { UNIT_NAMES } from '@/lib/wording';
+import { ChoiceEditor } from './choice-editor';
+import { CopyLink } from './copy-link';
+import { MoreConditions } from './more-conditions';
+import { PeriodEditor } from './period-editor';
+import { ScopePart } from './scope-part';
+import { UnitEditor } from './unit-editor';
+import { useScope } from './use-scope';
+import { choicePhrase, DIMENSION_WORDS, isPeriodPart, periodPhrase } from './wording';
+
+/** Words before and after the value of a dimension, where it has a fixed place in the sentence. */
+const PLACES: Record<Dimension, { before: string; after?: string; always: boolean }> = {
+  branch: { before: 'from', always: true },
+  refrigerant: { before: 'of', always: true },
+  technician: { before: 'by', always: true },
+  site: { before: 'at', always: false },
+  category: { before: 'on', always: false },
+  jobType: { before: 'for', always: false },
+};
+const ORDER: readonly Dimension[] = ['branch', 'refrigerant', 'technician', 'site', 'category', 'jobType'];
+
+type ScopeSentenceProps = {
+  /** What the sentence speaks of. */
+  subject?: string;
+  /** Further verbs of the screen beside "Copy link". */
+  actions?: ReactNode;
+};
+
+/** What the screen shows, as a sentence each part of which can be set in place; kept in the address. */
+export const ScopeSentence = ({ subject = 'Recoveries', actions }: ScopeSentenceProps) => {
+  const { role } = useViewer();
+  const { scope, setScope, clear, narrowed } = useScope();
+  const options = useScopeOptions();
+
+  // A technician has one branch and one technician: himself.
+  const offered = ORDER.filter((dimension) => role !== 'technician' || !['branch', 'technician'].includes(dimension));
+  const spoken = offered.filter((dimension) => PLACES[dimension].always || scope[dimension].length);
+  const editorOf = (dimension: Dimension) => (close: () => void) => {
+    if (options.error) return <Failed error={options.error} onRetry={() => options.refetch()} />;
+    if (!options.data) return <Loading />;
+    return (
+      <ChoiceEditor
+        dimension={dimension}
+        choices={options.data[dimension]}
+        selected={scope[dimension]}
+        onApply={(values) => setScope({ [dimension]: values.length ? values : null })}
+        close={close}
+      />
+    );
+  };
+  const isUnknown = (dimension: Dimension) => {
+    const known = options.data?.[dimension];
+    return Boolean(known) && scope[dimension].some((value) => !known?.some((choice) => choice.value === value));
+  };
+  const doubtfulPeriod = [scope.from, scope.to].some((part) => part !== null && !isPeriodPart(part));
+
+  return (
+    <div className="mb-5 flex flex-wrap items-baseline justify-between gap-x-8 gap-y-1">
+      <p className="max-w-[62em] text-base text-ink-2 sm:text-lg">
+        {role === 'technician' ? `Your ${subject.toLowerCase()}` : subject}{' '}
+        {spoken.map((dimension) => (
+          <span key={dimension}>
+            {PLACES[dimension].before}{' '}
+            <ScopePart
+              label={DIMENSION_WORDS[dimension].all}
+              editor={editorOf(dimension)}
+              doubtful={isUnknown(dimension)}
+            >
+              {choicePhrase(dimension, scope[dimension])}
+            </ScopePart>
+            ,{' '}
+          </span>
+        ))}
+        <ScopePart
+          label="Period"
+          doubtful={doubtfulPeriod}
+          editor={(close) => (
+            <PeriodEditor
+              scope={scope}
+              firstMonth={options.data?.firstMonth ?? null}
+              onApply={setScope}
+              close={close}
+            />
+          )}
+        >
+          {periodPhrase(scope)}
+        </ScopePart>
+        , in{' '}
+        <ScopePart
+          label="Unit of mass"
+          editor={(close) => <UnitEditor unit={scope.unit} onApply={(unit) => setScope({ unit })} close={close} />}
+        >
+          {UNIT_NAMES[scope.unit]}
+        </ScopePart>
+        .
+      </p>
+      <div className="flex flex-wrap items-baseline gap-x-5 text-sm print:hidden">
+        <MoreConditions dimensions={offered.filter((dimension) => !spoken.includes(dimension))} editorOf={editorOf} />
+        {narrowed ? <TextButton onClick={() => clear()}>Clear</TextButton> : null}
+        <CopyLink />
+        <TextButton onClick={() => window.print()}>Print</TextButton>
+        {actions}
+      </div>
+    </div>
+  );
+};

@@ -1,0 +1,52 @@
+'use client';
+
+import { parseAsNativeArrayOf, parseAsString, parseAsStringLiteral, useQueryStates } from 'nuqs';
+import { useMemo } from 'react';
+import { DIMENSIONS } from '@/analytics/dimensions';
+import { defaultFrom, monthOf, type ScopeSelection, scopeSearch } from '@/analytics/scope-address';
+import { useViewer } from '@/components/viewer-context';
+import { DISPLAY_UNITS } from '@/lib/vocabulary';
+
+const names = parseAsNativeArrayOf(parseAsString);
+
+const PARSERS = {
+  from: parseAsString,
+  to: parseAsString,
+  branch: names,
+  refrigerant: names,
+  technician: names,
+  site: names,
+  category: names,
+  jobType: names,
+  unit: parseAsStringLiteral(DISPLAY_UNITS),
+};
+
+/** Parts of the scope to set; a part set to null goes back to its default. */
+export type ScopePatch = { [Part in keyof ScopeSelection]?: ScopeSelection[Part] | null };
+
+/**
+ * The scope of this screen, read from the address and written to it; each change is a step that Back undoes. Without a
+ * period in the address it is 24 whole months and the running one, in the company's time zone.
+ */
+export const useScope = () => {
+  const { timeZone, massUnit } = useViewer();
+  const [address, setAddress] = useQueryStates(PARSERS, { history: 'push' });
+  const begin = defaultFrom(monthOf(new Date(), timeZone));
+  const scope = useMemo<ScopeSelection>(() => {
+    const periodGiven = Boolean(address.from || address.to);
+    return {
+      ...address,
+      from: periodGiven ? address.from : begin,
+      unit: address.unit ?? massUnit,
+    };
+  }, [address, begin, massUnit]);
+  return {
+    scope,
+    /** The same as a search string, for links that show this scope to somebody else. */
+    search: scopeSearch(scope),
+    setScope: (patch: ScopePatch) => setAddress(patch),
+    clear: () => setAddress(null),
+    /** Whether the address says anything that Clear would take back. */
+    narrowed: DIMENSIONS.some((dimension) => scope[dimension].length > 0) || Boolean(address.from || address.to),
+  };
+};

@@ -1,0 +1,47 @@
+import { type Dimension, UNSTATED } from '@/analytics/dimensions';
+import type { ScopeSelection } from '@/analytics/scope-address';
+import { formatDay, formatDesignation, formatList, formatMonth } from '@/lib/format';
+import { CATEGORY_NAMES, JOB_TYPE_NAMES } from '@/lib/wording';
+
+/** How one dimension is spoken of: what all of it is called, what a record without it is called. */
+export const DIMENSION_WORDS: Record<Dimension, { one: string; all: string; unstated: string }> = {
+  branch: { one: 'branch', all: 'all branches', unstated: 'no branch stated' },
+  refrigerant: { one: 'refrigerant', all: 'all refrigerants', unstated: 'no refrigerant stated' },
+  technician: { one: 'technician', all: 'all technicians', unstated: 'no technician stated' },
+  site: { one: 'site', all: 'all sites', unstated: 'no site stated' },
+  category: { one: 'appliance category', all: 'all appliance categories', unstated: 'no category stated' },
+  jobType: { one: 'job type', all: 'all job types', unstated: 'no job type stated' },
+};
+
+const CLOSED_LISTS: Partial<Record<Dimension, Record<string, string>>> = {
+  category: CATEGORY_NAMES,
+  jobType: JOB_TYPE_NAMES,
+};
+
+/** One value of a dimension as it is read. */
+export const choiceName = (dimension: Dimension, value: string): string => {
+  if (value === UNSTATED) return DIMENSION_WORDS[dimension].unstated;
+  if (dimension === 'refrigerant') return formatDesignation(value);
+  return CLOSED_LISTS[dimension]?.[value] ?? value;
+};
+
+/** A dimension's part of the sentence: `all branches`, `R‑22 and R‑410A`. */
+export const choicePhrase = (dimension: Dimension, values: readonly string[]): string =>
+  values.length ? formatList(values.map((value) => choiceName(dimension, value))) : DIMENSION_WORDS[dimension].all;
+
+const PERIOD_PART = /^\d{4}-(0[1-9]|1[0-2])(-(0[1-9]|[12]\d|3[01]))?$/;
+
+/** Whether the text is a month or a day as the address takes it. */
+export const isPeriodPart = (text: string): boolean => PERIOD_PART.test(text);
+
+const moment = (text: string): string => {
+  if (!isPeriodPart(text)) return `“${text}”, which is no month`;
+  return text.length > 7 ? formatDay(text) : formatMonth(text);
+};
+
+/** The period's part of the sentence: `December 2024 to November 2026`, `since January 2017`. */
+export const periodPhrase = ({ from, to }: Pick<ScopeSelection, 'from' | 'to'>): string => {
+  if (from && to) return from === to ? moment(from) : `${moment(from)} to ${moment(to)}`;
+  if (from) return `${moment(from)} to today`;
+  return to ? `up to ${moment(to)}` : 'the whole time';
+};
