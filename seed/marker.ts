@@ -24,3 +24,6 @@ export const markDemo = (companyId: string, value: 'begun' | 'whole'): Promise<v
       .values({ companyId, key: KEY, value })
       .onConflictDoUpdate({ target: [settings.companyId, settings.key], set: { value } });
   });
+
+/** Whether the company is one of the demo's. */
+export const isDemo = async (companyId: string): Promise<boolean> => (await demoStateOf(companyId)) !== 'none';

@@ -2,7 +2,8 @@ import { type ChildProcess, spawn } from 'node:child_process';
 import { setTimeout as sleep } from 'node:timers/promises';
 import { type OpenDatabase, serverEnvironment } from './local';
 
-const answers = async (address: string): Promise<boolean> => {
+/** Whether a server answers at the address, its database included. */
+export const answers = async (address: string): Promise<boolean> => {
   const response = await fetch(`${address}/api/health`, { signal: AbortSignal.timeout(2000) }).catch(() => null);
   return response?.status === 200;
 };

@@ -1,6 +1,7 @@
 import { prepareDatabase } from '@/db/cluster/prepare';
 import { firstFreePort } from '@/lib/ports';
 import { DEMO_SIGN_INS, seedDemoIfEmpty } from '@/seed/demo';
+import { noteAddress } from './address';
 import { buildIfChanged } from './build';
 import { enter, openDatabase, say, serverEnvironment } from './local';
 import { serve } from './serve';
@@ -28,6 +29,7 @@ const main = async () => {
     const served = await serve(database, port);
     stopServer = () => served.process.kill('SIGTERM');
     served.process.on('exit', (code) => stop(code ?? 1));
+    noteAddress(served.address);
     console.log(`ready ${served.address}`);
     if (!withDemo) return;
     console.log('demo, with passwords that everybody may know:');
