@@ -1,5 +1,5 @@
 import 'server-only';
-import { and, gte, inArray, isNull, lt, or, type SQL } from 'drizzle-orm';
+import { and, gte, isNull, lt, or, type SQL, type SQLWrapper, sql } from 'drizzle-orm';
 import { recoveryFacts as f } from '@/db/views/recovery-facts';
 import { type Dimension, UNSTATED } from './dimensions';
 import { dayAfter, firstDay, type Scope } from './scope';
@@ -14,15 +14,11 @@ export const FACT_COLUMNS = {
   jobType: f.jobType,
 } as const satisfies Record<Dimension, unknown>;
 
-const oneOf = (dimension: Dimension, values: string[] | undefined): SQL | undefined => {
-  if (!values?.length) return undefined;
-  const column = FACT_COLUMNS[dimension] as typeof f.refrigerant;
-  const stated = values.filter((value) => value !== UNSTATED);
-  return or(
-    stated.length ? inArray(column, stated) : undefined,
-    values.includes(UNSTATED) ? isNull(column) : undefined,
-  );
-};
+/** Whether a column holds one of the values; `unstated` also means rows that say nothing. */
+export const isOneOf = (column: SQLWrapper, values: string[] | undefined): SQL | undefined =>
+  values?.length ? or(sql`${column} in ${values}`, values.includes(UNSTATED) ? isNull(column) : undefined) : undefined;
+
+const oneOf = (dimension: Dimension, values: string[] | undefined) => isOneOf(FACT_COLUMNS[dimension], values);
 
 /** The rows of the facts view that a scope means; undefined parts do not narrow. */
 export const inScope = (scope: Scope): SQL | undefined =>

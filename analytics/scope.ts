@@ -4,8 +4,8 @@ import { UNSTATED } from './dimensions';
 
 export { DIMENSIONS, type Dimension, UNSTATED } from './dimensions';
 
-const day = /^(?!0000)\d{4}-(0[1-9]|1[0-2])-(0[1-9]|[12]\d|3[01])$/;
-const month = /^(?!0000)\d{4}-(0[1-9]|1[0-2])$/;
+const day = /^(19|20|21)\d{2}-(0[1-9]|1[0-2])-(0[1-9]|[12]\d|3[01])$/;
+const month = /^(19|20|21)\d{2}-(0[1-9]|1[0-2])$/;
 
 // JavaScript reads 31 February as 3 March; only a day that comes back as it went in is one.
 const isDay = (text: string): boolean =>
@@ -13,14 +13,22 @@ const isDay = (text: string): boolean =>
 
 const monthOrDay = z
   .string()
-  .refine((text) => month.test(text) || isDay(text), 'Expected a day or month there is: YYYY-MM-DD or YYYY-MM');
+  .refine(
+    (text) => month.test(text) || isDay(text),
+    'Expected a day or month between 1900 and 2199: YYYY-MM-DD or YYYY-MM',
+  );
 
 const many = <Item extends z.ZodType<string>>(item: Item) =>
   z
     .union([item, z.array(item)])
     .transform((value) => (Array.isArray(value) ? value : [value]))
     .optional();
-const name = z.string().min(1).max(200);
+// PostgreSQL keeps no NUL in text, so no name has one.
+const name = z
+  .string()
+  .min(1)
+  .max(200)
+  .regex(/^[^\0]*$/, 'Expected text');
 
 /** The scope parameters that every analytic route takes; each but the dates may be repeated. */
 export const scopeShape = {
