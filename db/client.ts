@@ -1,6 +1,7 @@
 import 'server-only';
 import { sql } from 'drizzle-orm';
 import { drizzle, type NodePgDatabase } from 'drizzle-orm/node-postgres';
+import type { PgTransactionConfig } from 'drizzle-orm/pg-core';
 import pg from 'pg';
 import { env } from '@/lib/env';
 
@@ -51,12 +52,17 @@ export const jobPool = (): pg.Pool => {
   return pools.job;
 };
 
-const withSettings = <T>(settings: Settings, work: (tx: Tx) => Promise<T>, pool = serverPool()): Promise<T> =>
+const withSettings = <T>(
+  settings: Settings,
+  work: (tx: Tx) => Promise<T>,
+  pool = serverPool(),
+  config?: PgTransactionConfig,
+): Promise<T> =>
   drizzle(pool).transaction(async (tx) => {
     const all = Object.entries(settings).map(([key, value]) => sql`set_config(${`app.${key}`}, ${value}, true)`);
     await tx.execute(sql`select ${sql.join(all, sql`, `)}`);
     return work(tx);
-  });
+  }, config);
 
 const companySettings = ({ companyId, technicianId, actor, reason }: CompanyScope): Settings => ({
   company_id: companyId,
@@ -68,6 +74,16 @@ const companySettings = ({ companyId, technicianId, actor, reason }: CompanyScop
 /** The only door to a company's rows: row-level security shows this transaction that company and no other. */
 export const withCompany = <T>(scope: CompanyScope, work: (tx: Tx) => Promise<T>): Promise<T> =>
   withSettings(companySettings(scope), work);
+
+/**
+ * The same door for figures that must agree with each other: all queries of `work` see the company as it stood at one
+ * moment, whatever an import is doing meanwhile. Read only.
+ */
+export const readCompany = <T>(scope: CompanyScope, work: (tx: Tx) => Promise<T>): Promise<T> =>
+  withSettings(companySettings(scope), work, serverPool(), {
+    isolationLevel: 'repeatable read',
+    accessMode: 'read only',
+  });
 
 /** The same door for background work, under the job role's longer time limits. */
 export const withCompanyJob = <T>(scope: CompanyScope, work: (tx: Tx) => Promise<T>): Promise<T> =>
