@@ -1,0 +1,104 @@
+import 'server-only';
+import { and, eq, isNull, sql } from 'drizzle-orm';
+import { factFigures, toGram } from '@/analytics/figures';
+import type { Dimension, Scope } from '@/analytics/scope';
+import { FACT_COLUMNS, inScope } from '@/analytics/scope-query';
+import type { Tx } from '@/db/client';
+import { recoveryFacts as f } from '@/db/views/recovery-facts';
+import { lowRecoveries as low } from '@/db/views/yield-limits';
+import type { MonthlyTrends, MonthlyTrendsQuery } from './contract';
+import { addMonths, answeredByMonth, cutMonths, partialMonth, yearBeforeScope } from './range';
+import { keyOf, rowsByMonth, rowsByRecord } from './rows';
+
+const toMonth = (firstDayOfMonth: string): string => firstDayOfMonth.slice(0, 7);
+
+/** Low recoveries in scope by month and key. */
+const countFlagged = (tx: Tx, scope: Scope, by: Dimension) =>
+  tx
+    .select({ month: f.month, key: keyOf(FACT_COLUMNS[by]).as('key'), flagged: sql<number>`count(*)`.mapWith(Number) })
+    .from(low)
+    .innerJoin(f, and(eq(f.companyId, low.companyId), eq(f.id, low.recoveryId)))
+    .where(inScope(scope))
+    .groupBy(f.month, FACT_COLUMNS[by]);
+
+/** Figures over all keys by month, and of the whole scope: the row without a month. */
+const sumMonths = (tx: Tx, scope: Scope) =>
+  tx
+    .select({ month: sql<string | null>`${f.month}`, ...factFigures })
+    .from(f)
+    .where(inScope(scope))
+    .groupBy(sql`rollup(${f.month})`)
+    .orderBy(f.month);
+
+const massByMonth = (tx: Tx, scope: Scope) =>
+  tx
+    .select({ month: f.month, recoveredMass: toGram(sql`sum(${f.recoveredMassKg})`) })
+    .from(f)
+    .where(and(inScope(scope), isNull(f.exclusion)))
+    .groupBy(f.month);
+
+/** The month of the company's first record; a month before it has no figures to compare with. */
+const firstMonth = async (tx: Tx): Promise<string | null> => {
+  const [first] = await tx.select({ on: sql<string | null>`min(${f.recoveredOn})` }).from(f);
+  return first?.on ? toMonth(first.on) : null;
+};
+
+/**
+ * Recovered mass by month and one dimension, with its flags, totals and the masses of a year before. `now` and the
+ * company's zone tell which month is still running.
+ */
+export const getMonthlyTrends = async (
+  tx: Tx,
+  { by, ...scope }: MonthlyTrendsQuery,
+  { now, timeZone }: { now: Date; timeZone: string },
+): Promise<MonthlyTrends> => {
+  const grouped = await (answeredByMonth(scope, by) ? rowsByMonth : rowsByRecord)(tx, scope, by);
+  const sums = await sumMonths(tx, scope);
+  const flags = await countFlagged(tx, scope, by);
+  const beforeScope = yearBeforeScope(scope);
+  const before = beforeScope ? await massByMonth(tx, beforeScope) : [];
+  const begins = await firstMonth(tx);
+
+  const flagged = new Map(flags.map((row) => [`${toMonth(row.month)} ${row.key}`, row.flagged]));
+  const flaggedByMonth = new Map<string, number>();
+  for (const row of flags)
+    flaggedByMonth.set(toMonth(row.month), (flaggedByMonth.get(toMonth(row.month)) ?? 0) + row.flagged);
+
+  const months = sums.flatMap(({ month, medianYield, totalYield, excluded: _, fullCharge: __, ...figures }) =>
+    month === null || medianYield === null || totalYield === null
+      ? []
+      : [{ ...figures, month: toMonth(month), medianYield, totalYield }],
+  );
+  const masses = new Map(months.map((row) => [row.month, row.recoveredMass]));
+  for (const row of before) masses.set(toMonth(row.month), row.recoveredMass);
+  const yearBefore = (month: string): number | null => {
+    const then = addMonths(month, -12);
+    return begins !== null && then >= begins ? (masses.get(then) ?? 0) : null;
+  };
+
+  const total = sums.find((row) => row.month === null);
+  return {
+    by,
+    rows: grouped.flatMap(({ month, medianYield, ...row }) =>
+      medianYield === null
+        ? []
+        : [{ ...row, month: toMonth(month), medianYield, flagged: flagged.get(`${toMonth(month)} ${row.key}`) ?? 0 }],
+    ),
+    months: months.map((row) => ({
+      ...row,
+      flagged: flaggedByMonth.get(row.month) ?? 0,
+      yearBefore: yearBefore(row.month),
+    })),
+    totals: {
+      recoveredMass: total?.recoveredMass ?? 0,
+      recoveries: total?.recoveries ?? 0,
+      medianYield: total?.medianYield ?? null,
+      totalYield: total?.totalYield ?? null,
+      flagged: flags.reduce((sum, row) => sum + row.flagged, 0),
+      co2e: total?.co2e ?? 0,
+    },
+    partialMonth: partialMonth(scope, now, timeZone),
+    cutMonths: cutMonths(scope),
+    excluded: total?.excluded ?? 0,
+  };
+};

@@ -1,0 +1,45 @@
+import { DIMENSIONS, type Dimension, dayAfter, firstDay, type Scope } from '@/analytics/scope';
+
+const monthOf = (day: string): string => day.slice(0, 7);
+const startsMonth = (day: string): boolean => day.endsWith('-01');
+
+/** The month `count` months after `month` (`YYYY-MM`); before it when negative. */
+export const addMonths = (month: string, count: number): string => {
+  const [year = 0, monthNo = 1] = month.split('-').map(Number);
+  return new Date(Date.UTC(year, monthNo - 1 + count, 1)).toISOString().slice(0, 7);
+};
+
+/** Whether views that are summed by month can answer: whole months, narrowed by nothing but the split dimension. */
+export const answeredByMonth = (scope: Scope, by: Dimension): boolean =>
+  (!scope.from || startsMonth(firstDay(scope.from))) &&
+  (!scope.to || startsMonth(dayAfter(scope.to))) &&
+  DIMENSIONS.every((dimension) => dimension === by || !scope[dimension]?.length);
+
+/** Months of which the scope's first or last day leaves a part out. */
+export const cutMonths = (scope: Scope): string[] => {
+  const from = scope.from && !startsMonth(firstDay(scope.from)) ? [monthOf(firstDay(scope.from))] : [];
+  const to = scope.to && !startsMonth(dayAfter(scope.to)) ? [monthOf(dayAfter(scope.to))] : [];
+  return [...new Set([...from, ...to])];
+};
+
+/** The running month of a zone when the scope reaches it, else null. */
+export const partialMonth = (scope: Scope, now: Date, timeZone: string): string | null => {
+  const parts = new Intl.DateTimeFormat('en-CA', { timeZone, year: 'numeric', month: '2-digit' });
+  const running = parts.format(now).slice(0, 7);
+  const begins = !scope.from || firstDay(scope.from) < `${addMonths(running, 1)}-01`;
+  const ends = !scope.to || dayAfter(scope.to) > `${running}-01`;
+  return begins && ends ? running : null;
+};
+
+/**
+ * The scope of the months that come a year before a scope's and that it does not hold whole itself; null when it has no
+ * beginning, and so holds them all.
+ */
+export const yearBeforeScope = (scope: Scope): Scope | null => {
+  if (!scope.from) return null;
+  const begins = monthOf(firstDay(scope.from));
+  const lastOutside = addMonths(begins, startsMonth(firstDay(scope.from)) ? -1 : 0);
+  const lastAsked = scope.to ? addMonths(monthOf(scope.to), -12) : lastOutside;
+  const [to] = [lastOutside, lastAsked].sort();
+  return { ...scope, from: addMonths(begins, -12), to };
+};

@@ -1,0 +1,76 @@
+import 'server-only';
+import { and, gte, isNull, lt, type SQL, sql } from 'drizzle-orm';
+import { factFigures, toGram } from '@/analytics/figures';
+import { type Dimension, dayAfter, firstDay, type Scope, UNSTATED } from '@/analytics/scope';
+import { FACT_COLUMNS, inScope, isOneOf } from '@/analytics/scope-query';
+import type { Tx } from '@/db/client';
+import {
+  monthlyRecoveredMassByBranch,
+  monthlyRecoveredMassByCategory,
+  monthlyRecoveredMassByJobType,
+  monthlyRecoveredMassByRefrigerant,
+  monthlyRecoveredMassBySite,
+  monthlyRecoveredMassByTechnician,
+} from '@/db/views/monthly-recovered-mass';
+import { recoveryFacts as f } from '@/db/views/recovery-facts';
+
+const VIEWS = {
+  refrigerant: monthlyRecoveredMassByRefrigerant,
+  technician: monthlyRecoveredMassByTechnician,
+  site: monthlyRecoveredMassBySite,
+  branch: monthlyRecoveredMassByBranch,
+  category: monthlyRecoveredMassByCategory,
+  jobType: monthlyRecoveredMassByJobType,
+} as const satisfies Record<Dimension, unknown>;
+
+/** Figures of one month and one key, before the flags are counted; `month` is its first day. */
+export type GroupedRow = {
+  month: string;
+  key: string;
+  recoveredMass: number;
+  recoveries: number;
+  medianYield: number | null;
+  co2e: number;
+};
+
+/** A dimension's value as a key: what is not stated has a name too. */
+export const keyOf = (column: SQL.Aliased | (typeof FACT_COLUMNS)[Dimension]): SQL<string> =>
+  sql<string>`coalesce(${column}, ${UNSTATED})`;
+
+const byKeyInC = (key: SQL): SQL => sql`${key} collate "C"`;
+
+/** Rows out of the views that are summed by month; only for scopes that `answeredByMonth` admits. */
+export const rowsByMonth = (tx: Tx, scope: Scope, by: Dimension): Promise<GroupedRow[]> => {
+  const v = VIEWS[by];
+  const key = keyOf(v.key);
+  return tx
+    .select({
+      month: v.month,
+      key: key.as('key_or_unstated'),
+      recoveredMass: toGram(v.recoveredMassKg),
+      recoveries: v.recoveries,
+      medianYield: v.medianYield,
+      co2e: toGram(v.co2eKg),
+    })
+    .from(v)
+    .where(
+      and(
+        scope.from ? gte(v.month, firstDay(scope.from)) : undefined,
+        scope.to ? lt(v.month, dayAfter(scope.to)) : undefined,
+        isOneOf(v.key, scope[by]),
+      ),
+    )
+    .orderBy(v.month, byKeyInC(key));
+};
+
+/** The same rows out of the records themselves, for any scope. */
+export const rowsByRecord = (tx: Tx, scope: Scope, by: Dimension): Promise<GroupedRow[]> => {
+  const { recoveredMass, recoveries, medianYield, co2e } = factFigures;
+  const key = keyOf(FACT_COLUMNS[by]);
+  return tx
+    .select({ month: f.month, key: key.as('key'), recoveredMass, recoveries, medianYield, co2e })
+    .from(f)
+    .where(and(inScope(scope), isNull(f.exclusion)))
+    .groupBy(f.month, FACT_COLUMNS[by])
+    .orderBy(f.month, byKeyInC(key));
+};
