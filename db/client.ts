@@ -35,6 +35,8 @@ const makePool = (connectionString: string, max: number) => {
   const pool = new pg.Pool({ connectionString, max });
   // A connection that dies while idle (server restart) is replaced; without a listener it would end the process.
   pool.on('error', () => undefined);
+  // The same for one that dies while somebody works on it: his query fails, and that is where it is dealt with.
+  pool.on('connect', (client) => client.on('error', () => undefined));
   return pool;
 };
 
@@ -48,7 +50,7 @@ export const serverPool = (): pg.Pool => {
 /** Connections of the role that works the queue. */
 export const jobPool = (): pg.Pool => {
   const pools = kept.tarebookPools ?? {};
-  pools.job ??= makePool(env().JOB_DATABASE_URL, 6);
+  pools.job ??= makePool(env().JOB_DATABASE_URL, 10);
   return pools.job;
 };
 

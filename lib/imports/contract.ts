@@ -111,6 +111,9 @@ export const importListSchema = z.object({
 });
 export type ImportList = z.infer<typeof importListSchema>;
 
+/** Body of preview and apply; without a mapping the one told before holds. */
+export const readAgainSchema = z.strictObject({ mapping: mappingSchema.optional() });
+
 /*
  * POST /api/imports                    multipart file, mapping (JSON), dryRun=true   → 202 { id }
  * GET  /api/imports                    ?cursor&limit                                 → importListSchema
