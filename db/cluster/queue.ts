@@ -18,8 +18,9 @@ export const prepareQueue = async (urls: DatabaseUrls): Promise<void> => {
         if payload->>'companyId' is distinct from nullif(current_setting('app.company_id', true), '') then
           raise exception 'work must belong to the company of the transaction';
         end if;
-        -- One queue a company: its jobs follow one another, other companies do not wait.
-        perform graphile_worker.add_job(task, payload, queue_name => payload->>'companyId', job_key => key, max_attempts => 5);
+        -- One queue a company: its jobs follow one another, other companies do not wait. Every start counts as an
+        -- attempt, also one that a power cut ended; faults of the work itself give up much sooner (lib/jobs/task.ts).
+        perform graphile_worker.add_job(task, payload, queue_name => payload->>'companyId', job_key => key, max_attempts => 25);
       end $$`);
     await job.query(`
       create or replace function work.pending() returns bigint
