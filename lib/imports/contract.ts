@@ -39,7 +39,10 @@ export type ColumnReading = z.infer<typeof columnReadingSchema>;
 /** What only the person can say; while one stands open, no row is taken. */
 export const questionSchema = z.object({
   about: z.enum(['columns', 'dateOrder', 'decimalMark', 'massUnit', 'vacuumUnit']),
+  /** The column that is asked about. */
   header: z.string().nullable(),
+  /** The field that no column holds yet; the choices are headers. */
+  field: z.enum(RECOVERY_FIELDS).nullable(),
   sentence: z.string(),
   choices: z.array(z.object({ value: z.string(), label: z.string() })),
 });
@@ -50,6 +53,8 @@ export const readingSchema = z.object({
   format: z.enum(['csv', 'xlsx']),
   encoding: evidenced(z.string()).nullable(),
   delimiter: evidenced(z.string()).nullable(),
+  /** Line that names the columns; what stands above it is passed over as a title. */
+  headerLine: z.number().int(),
   columns: z.array(columnReadingSchema),
   questions: z.array(questionSchema),
 });

@@ -28,6 +28,8 @@ export type FileLayout = {
   delimiter: Delimiter;
   /** Line of the header; what stands above it is a title. */
   headerLine: number;
+  /** Cells a row must have. */
+  width: number;
   columns: ColumnLayout[];
   /** Units for rows that name none, as the person told. */
   massUnit: MassUnit | null;

@@ -1,30 +1,42 @@
-import { unreadable } from '@/lib/errors';
 import type { Mapping } from './contract';
+import { profileTable } from './profile';
+import { rowReader } from './row';
 import type { FilePlan, OpenFile, ParsedRow, ReadContext } from './rows';
+import { openTable, refuseForeign, reopenRows } from './table';
 
-/** Quick check of an upload's first bytes; throws 422 for what is empty or no table. */
-export const sniffFile = (firstBytes: Uint8Array, fileName: string): void => {
-  if (firstBytes.length === 0) throw unreadable(`“${fileName}” is empty.`);
-};
+const BATCH = 2_000;
+
+/** Quick check of an upload's first bytes; throws 422 for what is empty, a foreign kind of file or no text. */
+export const sniffFile = (firstBytes: Uint8Array, fileName: string): void => refuseForeign(firstBytes, fileName);
 
 /**
- * Reads the whole file once and decides, column by column, how it is to be read. Open questions stand in
- * `plan.reading.questions`. Throws 422 for what can't be read at all, 400 for a told header that is not there.
+ * Reads the whole file once and decides, column by column, how it is to be read. What the person tells goes before all
+ * evidence, evidence before what was told for the same headers before. Open questions stand in `plan.reading.questions`.
+ * Throws 422 for what can't be read at all, 400 for a told header that is not there.
  */
 export const profileFile = async (
-  _open: OpenFile,
-  _told: Mapping,
-  _remembered: Mapping | null,
+  open: OpenFile,
+  told: Mapping,
+  remembered: Mapping | null,
   context: ReadContext,
-): Promise<FilePlan> => {
-  throw unreadable(`“${context.fileName}” holds no table.`);
-};
+): Promise<FilePlan> => profileTable(await openTable(open, told, context.fileName), told, remembered, context);
 
-/** Reads the rows by the plan, in batches of about 2,000; every row comes out, taken or refused with its reasons. */
+/**
+ * Reads the rows by the plan, in batches of about 2,000. Every row below the header comes out once, taken or refused with
+ * all of its reasons; empty lines are passed over.
+ */
 export async function* readRows(
-  _open: OpenFile,
-  _plan: FilePlan,
-  _context: ReadContext,
+  open: OpenFile,
+  plan: FilePlan,
+  context: ReadContext,
 ): AsyncGenerator<ParsedRow[], void, void> {
-  yield [];
+  const read = rowReader(plan.layout, context);
+  let batch: ParsedRow[] = [];
+  for await (const rows of reopenRows(open, plan.layout)) {
+    for (const raw of rows) if (raw.line > plan.layout.headerLine) batch.push(read(raw));
+    if (batch.length < BATCH) continue;
+    yield batch;
+    batch = [];
+  }
+  if (batch.length) yield batch;
 }
