@@ -7,7 +7,7 @@ import { freePort } from '@/lib/ports';
 import { DEMO_SIGN_INS, seedDemoIfEmpty } from '@/seed/demo';
 import { buildIfChanged } from '../build';
 import { runNode } from '../children';
-import { say, serverEnvironment } from '../local';
+import { enter, say, serverEnvironment } from '../local';
 import { serve } from '../serve';
 import { readReport, reportFile } from './report';
 import { counted, notRun, type Tally } from './tally';
@@ -40,6 +40,7 @@ const runPlaywright = async (address: string, args: string[]): Promise<Tally> =>
 
 const againstServer = async (database: ThrowAway, args: string[]): Promise<Tally> => {
   const opened = { ...database, cluster: null };
+  enter(opened);
   await seedDemoIfEmpty(database.urls, say);
   const port = await freePort();
   await buildIfChanged(serverEnvironment(opened, `http://127.0.0.1:${port}`));
