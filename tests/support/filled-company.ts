@@ -1,0 +1,125 @@
+import { randomUUID } from 'node:crypto';
+import { addSettings, type Tx, withCompany } from '@/db/client';
+import { settings } from '@/db/schema/companies';
+import { flagDecisions, flags } from '@/db/schema/flags';
+import { importFileChunks, importMappings, importRows, imports } from '@/db/schema/imports';
+import { passwordLinks, sessions } from '@/db/schema/people';
+import { appliances, branches, cylinders, sites, technicianCertifications, technicians } from '@/db/schema/places';
+import { recoveries } from '@/db/schema/recoveries';
+import { newCompany } from './company';
+import { newPerson } from './session';
+
+/** Enough like jobs that the views which judge say something. */
+const JOBS = 24;
+
+const ids = () => ({
+  branchId: randomUUID(),
+  technicianId: randomUUID(),
+  otherTechnicianId: randomUUID(),
+  siteId: randomUUID(),
+  applianceId: randomUUID(),
+  cylinderId: randomUUID(),
+  importId: randomUUID(),
+  flagId: randomUUID(),
+  recoveryId: randomUUID(),
+});
+type Ids = ReturnType<typeof ids>;
+
+const fillPlaces = async (tx: Tx, companyId: string, label: string, id: Ids): Promise<void> => {
+  const named = (rowId: string, what: string) => ({ companyId, id: rowId, name: `${what} of ${label}` });
+  await tx.insert(settings).values({ companyId, key: 'test', value: label });
+  await tx.insert(branches).values(named(id.branchId, 'Branch'));
+  await tx
+    .insert(technicians)
+    .values([named(id.technicianId, 'Technician'), named(id.otherTechnicianId, 'Other technician')]);
+  await tx.insert(technicianCertifications).values({ companyId, technicianId: id.technicianId, type: 'universal' });
+  await tx.insert(sites).values(named(id.siteId, 'Site'));
+  await tx.insert(appliances).values({ ...named(id.applianceId, 'Appliance'), siteId: id.siteId });
+  await tx.insert(cylinders).values(named(id.cylinderId, 'Cylinder'));
+};
+
+/** One low pull by the technician, and usual ones, most of them by the other technician. */
+const fillRecords = async (tx: Tx, companyId: string, label: string, id: Ids, massKg: string): Promise<void> => {
+  const rows = Array.from({ length: JOBS }, (_, n) => ({
+    companyId,
+    id: n === 0 ? id.recoveryId : randomUUID(),
+    recordRef: `${label}-${n}`,
+    recoveredOn: `2025-0${1 + (n % 6)}-15`,
+    technicianId: n < 3 ? id.technicianId : id.otherTechnicianId,
+    siteId: id.siteId,
+    applianceId: id.applianceId,
+    branchId: id.branchId,
+    cylinderId: id.cylinderId,
+    category: 'comfort_cooling' as const,
+    jobType: 'repair' as const,
+    refrigerant: 'R-410A',
+    nameplateChargeKg: '1000',
+    recoveredMassKg: n === 0 ? '1' : massKg,
+    massUnit: 'kg' as const,
+  }));
+  await tx.insert(recoveries).values(rows);
+  await tx.insert(flags).values({
+    companyId,
+    id: id.flagId,
+    recoveryId: id.recoveryId,
+    rule: 'low_unexplained',
+    certainty: 0.9,
+    evidence: {},
+    baseline: {},
+  });
+  await tx
+    .insert(flagDecisions)
+    .values({ companyId, flagId: id.flagId, decision: 'confirmed_correct', decidedBy: 'test' });
+};
+
+const fillImports = async (tx: Tx, companyId: string, label: string, id: Ids): Promise<void> => {
+  const { importId } = id;
+  await tx.insert(imports).values({
+    companyId,
+    id: importId,
+    fileName: `${label}.csv`,
+    fileSize: 3,
+    fileSha256: label,
+    status: 'done',
+    rowsRead: 1,
+    rowsTotal: 1,
+    rejected: 1,
+    createdBy: 'test',
+  });
+  await tx.insert(importFileChunks).values({ companyId, importId, chunkNo: 0, bytes: Buffer.from('a,b') });
+  await tx.insert(importRows).values({
+    companyId,
+    importId,
+    line: 2,
+    outcome: 'rejected',
+    recordRef: `${label}-refused`,
+    cells: [label],
+    reasons: [{ column: null, code: 'test', message: 'A reason.' }],
+  });
+  await tx.insert(importMappings).values({ companyId, headerKey: label, mapping: {} });
+};
+
+/**
+ * A company with rows in every table and view. `label` stands in every name and `massKg` in every mass, so that either
+ * is recognised where it does not belong.
+ */
+export const filledCompany = async (label: string, massKg: string) => {
+  const company = await newCompany(`${label} ${randomUUID()}`);
+  const { companyId, scope } = company;
+  const id = ids();
+  await withCompany({ ...scope, reason: `filled for ${label}` }, async (tx) => {
+    await fillPlaces(tx, companyId, label, id);
+    await fillRecords(tx, companyId, label, id, massKg);
+    await fillImports(tx, companyId, label, id);
+  });
+  const { personId } = await newPerson(companyId, 'owner');
+  const expiresAt = '2099-01-01T00:00:00Z';
+  await withCompany(scope, async (tx) => {
+    await addSettings(tx, { person_id: personId });
+    await tx.insert(sessions).values({ tokenHash: randomUUID(), personId, companyId, expiresAt });
+    await tx.insert(passwordLinks).values({ tokenHash: randomUUID(), personId, expiresAt });
+  });
+  await company.token('auditor');
+  return { ...company, label, personId, ids: id };
+};
+export type FilledCompany = Awaited<ReturnType<typeof filledCompany>>;
