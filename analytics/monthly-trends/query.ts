@@ -7,8 +7,9 @@ import type { Tx } from '@/db/client';
 import { recoveryFacts as f } from '@/db/views/recovery-facts';
 import { lowRecoveries as low } from '@/db/views/yield-limits';
 import type { MonthlyTrends, MonthlyTrendsQuery } from './contract';
-import { addMonths, answeredByMonth, cutMonths, partialMonth, yearBeforeScope } from './range';
+import { answeredByMonth, cutMonths, partialMonth, yearBeforeScope } from './range';
 import { keyOf, rowsByMonth, rowsByRecord } from './rows';
+import { monthsAfter } from './series';
 
 const toMonth = (firstDayOfMonth: string): string => firstDayOfMonth.slice(0, 7);
 
@@ -72,7 +73,7 @@ export const getMonthlyTrends = async (
   const masses = new Map(months.map((row) => [row.month, row.recoveredMass]));
   for (const row of before) masses.set(toMonth(row.month), row.recoveredMass);
   const yearBefore = (month: string): number | null => {
-    const then = addMonths(month, -12);
+    const then = monthsAfter(month, -12);
     return begins !== null && then >= begins ? (masses.get(then) ?? 0) : null;
   };
 

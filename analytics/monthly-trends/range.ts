@@ -1,13 +1,9 @@
 import { DIMENSIONS, type Dimension, dayAfter, firstDay, type Scope } from '@/analytics/scope';
+import { monthOf as monthOfInstant } from '@/analytics/scope-address';
+import { monthsAfter } from './series';
 
 const monthOf = (day: string): string => day.slice(0, 7);
 const startsMonth = (day: string): boolean => day.endsWith('-01');
-
-/** The month `count` months after `month` (`YYYY-MM`); before it when negative. */
-export const addMonths = (month: string, count: number): string => {
-  const [year = 0, monthNo = 1] = month.split('-').map(Number);
-  return new Date(Date.UTC(year, monthNo - 1 + count, 1)).toISOString().slice(0, 7);
-};
 
 /** Whether views that are summed by month can answer: whole months, narrowed by nothing but the split dimension. */
 export const answeredByMonth = (scope: Scope, by: Dimension): boolean =>
@@ -24,9 +20,8 @@ export const cutMonths = (scope: Scope): string[] => {
 
 /** The running month of a zone when the scope reaches it, else null. */
 export const partialMonth = (scope: Scope, now: Date, timeZone: string): string | null => {
-  const parts = new Intl.DateTimeFormat('en-CA', { timeZone, year: 'numeric', month: '2-digit' });
-  const running = parts.format(now).slice(0, 7);
-  const begins = !scope.from || firstDay(scope.from) < `${addMonths(running, 1)}-01`;
+  const running = monthOfInstant(now, timeZone);
+  const begins = !scope.from || firstDay(scope.from) < `${monthsAfter(running, 1)}-01`;
   const ends = !scope.to || dayAfter(scope.to) > `${running}-01`;
   return begins && ends ? running : null;
 };
@@ -38,8 +33,8 @@ export const partialMonth = (scope: Scope, now: Date, timeZone: string): string 
 export const yearBeforeScope = (scope: Scope): Scope | null => {
   if (!scope.from) return null;
   const begins = monthOf(firstDay(scope.from));
-  const lastOutside = addMonths(begins, startsMonth(firstDay(scope.from)) ? -1 : 0);
-  const lastAsked = scope.to ? addMonths(monthOf(scope.to), -12) : lastOutside;
+  const lastOutside = monthsAfter(begins, startsMonth(firstDay(scope.from)) ? -1 : 0);
+  const lastAsked = scope.to ? monthsAfter(monthOf(scope.to), -12) : lastOutside;
   const [to] = [lastOutside, lastAsked].sort();
-  return { ...scope, from: addMonths(begins, -12), to };
+  return { ...scope, from: monthsAfter(begins, -12), to };
 };

@@ -1,0 +1,18 @@
+import { keepPreviousData, queryOptions, useQuery } from '@tanstack/react-query';
+import type { Dimension } from '@/analytics/dimensions';
+import type { ScopeQuery } from '@/analytics/scope-address';
+import { apiFetch, searchString } from '@/lib/api/client';
+import type { MonthlyTrends } from './contract';
+
+// The contract's path as text: importing the contract would bring zod into the browser.
+const PATH = '/api/trends/monthly';
+
+export const monthlyTrendsOptions = (scope: ScopeQuery, by: Dimension) =>
+  queryOptions({
+    queryKey: ['monthly-trends', by, scope] as const,
+    queryFn: ({ signal }) => apiFetch<MonthlyTrends>(`${PATH}${searchString({ ...scope, by })}`, { signal }),
+    placeholderData: keepPreviousData,
+  });
+
+/** Recovered mass by month; the figures of the scope before stay until the new ones are here. */
+export const useMonthlyTrends = (scope: ScopeQuery, by: Dimension) => useQuery(monthlyTrendsOptions(scope, by));

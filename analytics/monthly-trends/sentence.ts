@@ -1,0 +1,92 @@
+import { formatMassWithUnit, formatMonth, formatPercent, plural } from '@/lib/format';
+import type { DisplayUnit } from '@/lib/vocabulary';
+import { lastWholeMonth, monthsAfter, type StackedMonth, type StackLayer, type Stacks } from './series';
+
+/** A sentence in pieces: text, and one figure that opens the records of its month. */
+export type Answer = { before: string; figure: string | null; after: string; month: string | null };
+
+const text = (before: string): Answer => ({ before, figure: null, after: '', month: null });
+
+/** Below half a per cent two months are the same: the scales do not tell them apart. */
+const SAME = 0.005;
+/** From here on "so many times" is plainer than per cent. */
+const TIMES = 3;
+
+const comparison = (mass: number, yearBefore: number | null, month: string): string => {
+  const then = formatMonth(monthsAfter(month, -12));
+  if (yearBefore === null) return '.';
+  if (yearBefore === 0) return mass === 0 ? `, as in ${then}.` : `; nothing was recovered in ${then}.`;
+  const change = mass / yearBefore - 1;
+  if (Math.abs(change) < SAME) return `, as much as in ${then}.`;
+  if (change >= TIMES - 1) return `, ${(mass / yearBefore).toFixed(1)} times as much as in ${then}.`;
+  return `, ${formatPercent(Math.abs(change))} ${change > 0 ? 'more' : 'less'} than in ${then}.`;
+};
+
+/**
+ * What the latest whole month brought in against the same month a year before, in plain words. A month that is running
+ * or cut by the scope is never compared.
+ */
+export const trendAnswer = ({ months }: Stacks, unit: DisplayUnit): Answer => {
+  const latest = lastWholeMonth(months) ?? months.at(-1);
+  if (!latest) return text('No recoveries in this period.');
+  const { month, recoveredMass, recoveries } = latest;
+  const figure = formatMassWithUnit(recoveredMass, unit, 0);
+  const said = { figure, month };
+  if (latest.state === 'running')
+    return { ...said, before: `${formatMonth(month)} has brought in `, after: ' so far.' };
+  if (latest.state === 'cut')
+    return {
+      ...said,
+      before: 'The chosen days brought in ',
+      after: ` in ${plural(recoveries, 'recovery', 'recoveries')}.`,
+    };
+  if (recoveries === 0) return text(`Nothing was recovered in ${formatMonth(month)}.`);
+  return {
+    ...said,
+    before: `${formatMonth(month)} brought in `,
+    after: comparison(recoveredMass, latest.yearBefore, month),
+  };
+};
+
+/** The layer that makes more than half of the change between two months, with its own change; null when none does. */
+const mainPart = (layers: readonly StackLayer[], now: StackedMonth, then: StackedMonth) => {
+  const change = now.recoveredMass - then.recoveredMass;
+  for (const layer of layers) {
+    const own = (now.layers[layer.id] ?? 0) - (then.layers[layer.id] ?? 0);
+    if (layer.key !== null && own * Math.sign(change) > Math.abs(change) / 2) return { key: layer.key, own };
+  }
+  return null;
+};
+
+/**
+ * What stands behind the answer, each a whole sentence: which part makes most of the change, a month without a year
+ * before, records that stopped coming, records left out.
+ */
+export const trendNotes = (
+  { layers, months }: Stacks,
+  { partialMonth, excluded }: { partialMonth: string | null; excluded: number },
+  unit: DisplayUnit,
+  nameOf: (key: string) => string,
+): string[] => {
+  const notes: string[] = [];
+  const latest = lastWholeMonth(months);
+  const before = latest && months.find((month) => month.month === monthsAfter(latest.month, -12));
+  if (latest && latest.yearBefore === null) notes.push('There is no year before to compare with yet.');
+  const changed = latest?.yearBefore ? Math.abs(latest.recoveredMass / latest.yearBefore - 1) : 0;
+  if (latest && before?.state === 'whole' && changed >= SAME && layers.length > 1) {
+    const part = mainPart(layers, latest, before);
+    const direction = part && part.own > 0 ? 'more' : 'less';
+    if (part)
+      notes.push(
+        `Most of the difference is ${nameOf(part.key)}: ${formatMassWithUnit(Math.abs(part.own), unit, 0)} ${direction}.`,
+      );
+  }
+  const last = months.at(-1)?.month;
+  if (partialMonth && last && last < monthsAfter(partialMonth, -1))
+    notes.push(`Nothing is recorded after ${formatMonth(last)}.`);
+  if (excluded > 0)
+    notes.push(
+      `${plural(excluded, 'record is', 'records are')} left out as ${excluded === 1 ? 'an entry error' : 'entry errors'}.`,
+    );
+  return notes;
+};
