@@ -1,0 +1,62 @@
+import 'server-only';
+import { and, eq, ilike, or, type SQL, sql } from 'drizzle-orm';
+import { inScope } from '@/analytics/scope-query';
+import type { Tx } from '@/db/client';
+import { recoveryFacts as f } from '@/db/views/recovery-facts';
+import type { RecordList, RecordListQuery } from './contract';
+import { writeCursor } from './cursor';
+import { keysetOf } from './keyset';
+import { rowColumns, toRow } from './row';
+
+/** A search text as a LIKE pattern that means just this text, anywhere. */
+const containing = (text: string): string => `%${text.replace(/[\\%_]/g, '\\$&')}%`;
+
+const found = (text: string): SQL | undefined => {
+  const pattern = containing(text);
+  return or(
+    ilike(f.recordRef, pattern),
+    ilike(f.technician, pattern),
+    ilike(f.site, pattern),
+    ilike(f.appliance, pattern),
+  );
+};
+
+/** The records that a list query means, whatever page of them. */
+export const inList = (query: RecordListQuery): SQL | undefined =>
+  and(
+    inScope(query),
+    query.q ? found(query.q) : undefined,
+    query.importId ? eq(f.importId, query.importId) : undefined,
+  );
+
+/** How many records the query means, pages aside. */
+const countRecords = async (tx: Tx, query: RecordListQuery): Promise<number> => {
+  const [row] = await tx
+    .select({ total: sql<number>`count(*)`.mapWith(Number) })
+    .from(f)
+    .where(inList(query));
+  return row?.total ?? 0;
+};
+
+/** One page of the records in scope, with the cursors of its neighbours; throws 400 on a forged cursor. */
+export const getRecords = async (tx: Tx, query: RecordListQuery): Promise<RecordList> => {
+  const { sort, limit, cursor } = query;
+  const keyset = keysetOf(sort, cursor);
+  const fetched = await tx
+    .select({ ...rowColumns, sortText: keyset.sortText })
+    .from(f)
+    .where(and(inList(query), keyset.after))
+    .orderBy(keyset.orderBy)
+    .limit(limit + 1);
+  const page = fetched.slice(0, limit);
+  if (keyset.back) page.reverse();
+  const more = fetched.length > limit;
+  const place = (row: (typeof page)[number] | undefined, back: boolean) =>
+    row ? writeCursor({ sort, value: row.sortText, id: row.id, back }) : null;
+  return {
+    items: page.map(({ sortText: _, ...row }) => toRow(row)),
+    nextCursor: more || keyset.back ? place(page.at(-1), false) : null,
+    previousCursor: (keyset.back ? more : cursor !== undefined) ? place(page[0], true) : null,
+    ...(cursor === undefined ? { total: await countRecords(tx, query) } : {}),
+  };
+};
