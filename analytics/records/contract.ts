@@ -73,7 +73,12 @@ export type RecordDetail = z.output<typeof recordSchema>;
 export const recordListQuery = scopeSchema.safeExtend({
   sort: z.enum(SORTS, `Sort by one of ${SORTS.join(', ')}`).default(DEFAULT_SORT),
   /** Looked for in record ref, technician, site and appliance. */
-  q: z.string().trim().max(200).optional(),
+  q: z
+    .string()
+    .trim()
+    .max(200)
+    .regex(/^[^\0]*$/, 'Expected text')
+    .optional(),
   importId: z.uuid().optional(),
   limit: z.coerce.number().int().min(1).max(MOST_ROWS_A_PAGE).default(50),
   cursor: z.string().max(2000).optional(),
