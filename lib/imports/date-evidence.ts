@@ -10,6 +10,9 @@ const SAID: Record<DateOrder, string> = {
   mdy: 'month, day, year',
 };
 
+// Reads the same in every order.
+const YEAR_FIRST = /^\d{4}\D/;
+
 /** What a column's dates say about their order, gathered over the whole file. */
 export class DateEvidence {
   /** Dates that some orders read and others don't, or read differently. */
@@ -22,6 +25,7 @@ export class DateEvidence {
   constructor(private readonly span: YearSpan) {}
 
   add(text: string): void {
+    if (YEAR_FIRST.test(text)) return;
     const dates = DATE_ORDERS.map((order) => parseDateText(text, order, this.span)?.date ?? null);
     const distinct = new Set(dates);
     if (distinct.size === 1) return;

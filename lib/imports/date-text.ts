@@ -1,4 +1,3 @@
-import { Temporal } from 'temporal-polyfill';
 import type { DateOrder } from './fields';
 import { cleanText } from './text';
 
@@ -87,12 +86,3 @@ export const parseDateText = (text: string, order: DateOrder, span: YearSpan): D
 };
 
 const daysInMonth = (year: number, month: number): number => new Date(Date.UTC(year, month, 0)).getUTCDate();
-
-/** The local day and the instant (with the zone's offset) of a date with a time of day in `timeZone`. */
-export const inZone = ({ date, time, offset }: DateText, timeZone: string): { on: string; at: string | null } => {
-  if (time === null) return { on: date, at: null };
-  const instant = offset
-    ? Temporal.Instant.from(`${date}T${time}${offset}`).toZonedDateTimeISO(timeZone)
-    : Temporal.PlainDateTime.from(`${date}T${time}`).toZonedDateTime(timeZone);
-  return { on: instant.toPlainDate().toString(), at: instant.toString({ timeZoneName: 'never' }) };
-};

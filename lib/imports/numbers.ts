@@ -22,7 +22,10 @@ export const parseDecimal = (text: string, mark: DecimalMark): string | null => 
 };
 
 /** Decimals of plain decimal text. */
-export const decimalsOf = (decimal: string): number => decimal.split('.')[1]?.length ?? 0;
+export const decimalsOf = (decimal: string): number => {
+  const point = decimal.indexOf('.');
+  return point < 0 ? 0 : decimal.length - point - 1;
+};
 
 const WITH_UNIT = /^([-+−]?[\d.,\s'’]*\d)\s*([a-zµμ"][a-zµμ. ]*)$/i;
 

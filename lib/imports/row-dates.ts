@@ -1,8 +1,8 @@
-import { type DateText, inZone, parseDateText } from './date-text';
+import { type DateText, parseDateText } from './date-text';
 import { FIELD_NAMES } from './field-names';
 import type { DateOrder } from './fields';
+import type { ToLocalTime } from './local-time';
 import type { RowCells } from './row-cells';
-import type { ReadContext } from './rows';
 import { yearSpanOf } from './year-span';
 
 const ORDER_WORDS: Record<DateOrder, string> = {
@@ -35,18 +35,19 @@ const refuseFuture = (cells: RowCells, field: 'recovered_at' | 'manufactured_on'
 /** The company's local day of the recovery and, with a time of day, the instant; null when refused. */
 export const readRecoveredAt = (
   cells: RowCells,
-  { today, timeZone }: ReadContext,
+  today: string,
+  toLocalTime: ToLocalTime,
 ): { recoveredOn: string; recoveredAt: string | null } | null => {
   if (cells.value('recovered_at') === '')
     return cells.refuse('recovered_at', 'missing', 'The date of the recovery is missing.');
   const date = readDate(cells, 'recovered_at', today);
   if (!date) return null;
-  const { on, at } = inZone(date, timeZone);
+  const { on, at } = toLocalTime(date);
   return on > today ? refuseFuture(cells, 'recovered_at', today) : { recoveredOn: on, recoveredAt: at };
 };
 
 /** The day an appliance was made, null when not stated or refused. */
-export const readManufacturedOn = (cells: RowCells, { today }: ReadContext): string | null => {
+export const readManufacturedOn = (cells: RowCells, today: string): string | null => {
   const date = readDate(cells, 'manufactured_on', today)?.date ?? null;
   return date && date > today ? refuseFuture(cells, 'manufactured_on', today) : date;
 };
