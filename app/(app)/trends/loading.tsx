@@ -1,0 +1,5 @@
+import { TrendsLoading } from '@/components/trends/trends-loading';
+
+export default function Loading() {
+  return <TrendsLoading />;
+}

@@ -1,0 +1,74 @@
+'use client';
+
+import { Axis, BarSeries, BarStack, Grid, XYChart } from '@visx/xychart';
+import { useId, useMemo } from 'react';
+import { formatNumber } from '@/lib/format';
+import { Hatches, hatchId } from './hatch';
+import type { ChartLayer, ChartMonth } from './layer';
+import { MonthAxis } from './month-axis';
+import { MonthOverlay } from './month-overlay';
+import { StackLabels } from './stack-labels';
+import { chartTheme } from './theme';
+
+export type StackedMonthsProps = {
+  layers: readonly ChartLayer[];
+  months: readonly ChartMonth[];
+  height: number;
+  /** On a phone: larger type, letters for months, no labels beside the bars. */
+  narrow: boolean;
+  active: string | null;
+  onPoint: (month: string | null) => void;
+};
+
+const month = (datum: ChartMonth) => datum.month;
+
+/** Bars stacked by month from zero. Draws finished data: it neither fills, sums nor orders. */
+export const StackedMonths = ({ layers, months, height, narrow, active, onPoint }: StackedMonthsProps) => {
+  const chartId = useId();
+  const highest = Math.max(...months.map(({ total, yearBefore }) => Math.max(total, yearBefore ?? 0)));
+  // Series register themselves anew whenever they change: pointing at a month must not change them.
+  const stack = useMemo(
+    () => (
+      <BarStack enableEvents={false}>
+        {layers.map(({ id, colour }) => (
+          <BarSeries
+            key={id}
+            dataKey={id}
+            data={[...months]}
+            xAccessor={month}
+            yAccessor={(datum: ChartMonth) => datum.values[id] ?? 0}
+            colorAccessor={(datum: ChartMonth) => (datum.unfinished ? `url(#${hatchId(chartId, id)})` : colour)}
+          />
+        ))}
+      </BarStack>
+    ),
+    [layers, months, chartId],
+  );
+  const last = months.at(-1);
+  return (
+    <XYChart
+      height={height}
+      margin={{ top: 12, right: narrow ? 2 : 132, bottom: 44, left: narrow ? 44 : 52 }}
+      xScale={{ type: 'band', domain: months.map(month), paddingInner: 0.22, paddingOuter: 0.11 }}
+      yScale={{ type: 'linear', domain: [0, highest || 1], nice: 5, zero: true }}
+      theme={chartTheme}
+      captureEvents={false}
+      accessibilityLabel="Recovered mass by month"
+    >
+      <Hatches chartId={chartId} layers={layers} />
+      <Grid columns={false} numTicks={5} strokeDasharray="0" />
+      <Axis
+        orientation="left"
+        numTicks={5}
+        hideAxisLine
+        hideTicks
+        tickFormat={(value: number) => formatNumber(value, highest < 5 ? 1 : 0)}
+        tickLabelProps={{ dx: -2, ...(narrow ? { fontSize: 14 } : {}) }}
+      />
+      {stack}
+      <MonthOverlay months={months} active={active} onPoint={onPoint} />
+      <MonthAxis months={months.map(month)} narrow={narrow} />
+      {!narrow && last ? <StackLabels layers={layers} last={last} /> : null}
+    </XYChart>
+  );
+};

@@ -1,0 +1,48 @@
+'use client';
+
+import { useMemo } from 'react';
+import type { Dimension } from '@/analytics/dimensions';
+import type { Stacks } from '@/analytics/monthly-trends/series';
+import type { ScopeSelection } from '@/analytics/scope-address';
+import type { ChartLayer, ChartMonth } from '@/components/charts/layer';
+import { StackedMonthsFigure } from '@/components/charts/stacked-months-figure';
+import { kgToUnit } from '@/lib/units';
+import { recordsHref } from './records-link';
+import { layerName, monthInWords } from './wording';
+
+type MonthsChartProps = { stacks: Stacks; by: Dimension; scope: ScopeSelection; colours: Record<string, string> };
+
+/** The stacks in the viewer's unit, with the words of their months. */
+export const MonthsChart = ({ stacks, by, scope, colours }: MonthsChartProps) => {
+  const layers = useMemo<ChartLayer[]>(
+    () =>
+      stacks.layers.map((layer) => ({
+        id: layer.id,
+        name: layerName(by, layer),
+        colour: colours[layer.id] ?? 'var(--refrigerant-other)',
+      })),
+    [stacks.layers, by, colours],
+  );
+  const months = useMemo<ChartMonth[]>(() => {
+    const inUnit = (kg: number) => kgToUnit(kg, scope.unit);
+    return stacks.months.map((month) => ({
+      month: month.month,
+      values: Object.fromEntries(Object.entries(month.layers).map(([id, kg]) => [id, inUnit(kg)])),
+      total: inUnit(month.recoveredMass),
+      yearBefore: month.yearBefore === null || month.state !== 'whole' ? null : inUnit(month.yearBefore),
+      unfinished: month.state !== 'whole',
+    }));
+  }, [stacks.months, scope.unit]);
+  return (
+    <StackedMonthsFigure
+      label="Recovered mass by month"
+      layers={layers}
+      months={months}
+      wordsOf={(name) => {
+        const month = stacks.months.find((other) => other.month === name);
+        return month ? monthInWords(month, stacks.layers, by, scope.unit) : '';
+      }}
+      recordsOf={(month) => recordsHref(scope, month) ?? '/records'}
+    />
+  );
+};

@@ -1,0 +1,84 @@
+import Link from 'next/link';
+import type { Dimension } from '@/analytics/dimensions';
+import type { StackedMonth, Stacks } from '@/analytics/monthly-trends/series';
+import type { ScopeSelection } from '@/analytics/scope-address';
+import { Table, Td, Th } from '@/components/ui/table';
+import { formatChange, formatCount, formatMass, formatMonth, formatPercent } from '@/lib/format';
+import { recordsHref } from './records-link';
+import { layerName, stateWord } from './wording';
+
+type MonthsTableProps = { stacks: Stacks; by: Dimension; scope: ScopeSelection; colours: Record<string, string> };
+
+const against = ({ recoveredMass, yearBefore, state }: StackedMonth): string =>
+  yearBefore === null || yearBefore === 0 || state !== 'whole' ? '—' : formatChange(recoveredMass / yearBefore - 1);
+
+const Figure = ({ href, children }: { href: string | null; children: string }) =>
+  href ? (
+    <Link href={href} className="figure-link decoration-transparent hover:decoration-current">
+      {children}
+    </Link>
+  ) : (
+    children
+  );
+
+/** The chart in figures, newest month first; every figure opens the records behind it. */
+export const MonthsTable = ({ stacks: { layers, months }, by, scope, colours }: MonthsTableProps) => (
+  <Table label={`Recovered mass by month and ${by === 'jobType' ? 'job type' : by}`}>
+    <thead>
+      <tr>
+        <Th>Month</Th>
+        {layers.map((layer) => (
+          <Th key={layer.id} numeric>
+            <span
+              aria-hidden="true"
+              className="mr-1.5 inline-block size-2.5"
+              style={{ background: colours[layer.id] }}
+            />
+            {layerName(by, layer)}, {scope.unit}
+          </Th>
+        ))}
+        <Th numeric>All, {scope.unit}</Th>
+        <Th numeric>Against a year before</Th>
+        <Th numeric>Recoveries</Th>
+        <Th numeric>Median yield</Th>
+      </tr>
+    </thead>
+    <tbody>
+      {[...months].reverse().map((month) => {
+        const all = month.recoveries ? recordsHref(scope, month.month) : null;
+        return (
+          <tr key={month.month} className={month.state === 'whole' ? undefined : 'text-ink-2'}>
+            <Th scope="row" className="whitespace-nowrap">
+              {formatMonth(month.month, 'short')}
+              {month.state === 'whole' ? null : (
+                <span className="ml-2 bg-sheet-2 px-1.5 py-0.5 text-xs">{stateWord(month)}</span>
+              )}
+            </Th>
+            {layers.map((layer) => {
+              const mass = month.layers[layer.id] ?? 0;
+              return (
+                <Td key={layer.id} numeric>
+                  {mass > 0 ? (
+                    <Figure href={recordsHref(scope, month.month, { by, keys: layer.members })}>
+                      {formatMass(mass, scope.unit)}
+                    </Figure>
+                  ) : (
+                    <span className="text-ink-3">–</span>
+                  )}
+                </Td>
+              );
+            })}
+            <Td numeric className="font-semibold">
+              <Figure href={all}>{formatMass(month.recoveredMass, scope.unit)}</Figure>
+            </Td>
+            <Td numeric>{against(month)}</Td>
+            <Td numeric>
+              <Figure href={all}>{formatCount(month.recoveries)}</Figure>
+            </Td>
+            <Td numeric>{month.medianYield === null ? '—' : formatPercent(month.medianYield)}</Td>
+          </tr>
+        );
+      })}
+    </tbody>
+  </Table>
+);

@@ -1,0 +1,29 @@
+import type { Dimension } from '@/analytics/dimensions';
+import type { StackedMonth, StackLayer } from '@/analytics/monthly-trends/series';
+import { choiceName } from '@/components/scope/wording';
+import { formatMass, formatMassWithUnit, formatMonth, plural } from '@/lib/format';
+import type { DisplayUnit } from '@/lib/vocabulary';
+
+/** How a layer is called: the key in words, or how many smaller ones it holds. */
+export const layerName = (by: Dimension, layer: StackLayer): string =>
+  layer.key === null ? `${layer.members.length} smaller` : choiceName(by, layer.key);
+
+/** What stands behind a month that is not to be compared. */
+export const stateWord = (month: Pick<StackedMonth, 'state'>): string =>
+  ({ whole: '', running: 'so far', cut: 'part of the month' })[month.state];
+
+/** A month in words: its mass and recoveries, the year before, and each layer that has any. */
+export const monthInWords = (
+  month: StackedMonth,
+  layers: readonly StackLayer[],
+  by: Dimension,
+  unit: DisplayUnit,
+): string => {
+  const state = stateWord(month);
+  const head = `${formatMonth(month.month)}${state ? `, ${state}` : ''}: ${formatMassWithUnit(month.recoveredMass, unit)} in ${plural(month.recoveries, 'recovery', 'recoveries')}`;
+  const before = month.yearBefore === null ? '' : `, ${formatMassWithUnit(month.yearBefore, unit)} a year before`;
+  const parts = layers
+    .filter(({ id }) => (month.layers[id] ?? 0) > 0)
+    .map((layer) => `${layerName(by, layer)} ${formatMass(month.layers[layer.id] ?? 0, unit)}`);
+  return `${head}${before}${parts.length ? `; ${parts.join(', ')}` : ''}.`;
+};
