@@ -2,15 +2,16 @@ import { Temporal } from 'temporal-polyfill';
 import { withConnection } from '@/db/cluster/roles';
 import type { DatabaseUrls } from '@/db/cluster/urls';
 import { companiesNamed, createCompany } from '@/lib/auth/provision';
+import type { Viewer } from '@/lib/auth/viewer';
 import { monthBefore } from './calendar';
-import { makeCompany } from './company';
+import { type DemoCompany, makeCompany } from './company';
+import { importTickets } from './import-tickets';
 import { loadPlaces } from './load-places';
-import { loadTickets } from './load-tickets';
 import { demoStateOf, markDemo } from './marker';
 import { COMPANY_NAME, SMALL_COMPANY_NAME } from './names';
 import { demoPlan, type Plan, smallPlan } from './plan';
 import { removeCompany } from './remove';
-import { addSignIns } from './sign-ins';
+import { addCrewSignIns, addSmallOwner } from './sign-ins';
 
 export { DEMO_SIGN_INS } from './sign-ins';
 
@@ -18,22 +19,28 @@ export { DEMO_SIGN_INS } from './sign-ins';
 export const DEMO_COMPANIES = [COMPANY_NAME, SMALL_COMPANY_NAME] as const;
 const TIME_ZONE = 'America/New_York';
 
-const makeOne = async (plan: Plan) => {
+/** Makes one company; `addPeople` gives the id of the person who then hands the file of tickets in. */
+const makeOne = async (
+  plan: Plan,
+  addPeople: (companyId: string, company: DemoCompany) => Promise<string>,
+): Promise<string> => {
   const company = makeCompany(plan);
   const companyId = await createCompany(plan.company, { timeZone: TIME_ZONE });
   await markDemo(companyId, 'begun');
   await loadPlaces(companyId, company);
-  await loadTickets(companyId, company);
-  return { companyId, company };
+  const actor = await addPeople(companyId, company);
+  const viewer: Viewer = {
+    ...{ kind: 'program', actor, name: 'demo', companyId, companyName: plan.company },
+    ...{ role: 'office', technicianId: null, timeZone: TIME_ZONE, massUnit: 'lb' },
+  };
+  await importTickets(viewer, company.tickets, `recovery tickets until ${plan.endMonth}.csv`);
+  return companyId;
 };
 
 const makeDemo = async (): Promise<void> => {
   const endMonth = monthBefore(Temporal.Now.instant(), TIME_ZONE);
-  const large = await makeOne(demoPlan(endMonth));
-  const small = await makeOne(smallPlan(endMonth));
-  await addSignIns(large.companyId, large.company, small.companyId);
-  await markDemo(large.companyId, 'whole');
-  await markDemo(small.companyId, 'whole');
+  const made = [await makeOne(demoPlan(endMonth), addCrewSignIns), await makeOne(smallPlan(endMonth), addSmallOwner)];
+  for (const companyId of made) await markDemo(companyId, 'whole');
 };
 
 const demoCompanies = async () => {

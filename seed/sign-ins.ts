@@ -6,7 +6,7 @@ import { addMember } from '@/lib/auth/provision';
 import type { Role } from '@/lib/vocabulary';
 import type { DemoCompany } from './company';
 
-/** Public on purpose, and good for the demo only: `npm start` prints it and the README names it. */
+/** Public on purpose, and good for the demo only: `npm start` prints it and anybody can read it here. */
 const DEMO_PASSWORD = 'grey body, yellow shoulder';
 
 type Person = { email: string; name: string; role: Role };
@@ -15,7 +15,7 @@ const CREW: readonly Person[] = [
   { role: 'owner', email: 'owner@brackenmoor.example', name: 'Marisol Thackeray' },
   { role: 'operations', email: 'operations@brackenmoor.example', name: 'Desmond Achterberg' },
   { role: 'trainer', email: 'trainer@brackenmoor.example', name: 'Priya Halloran' },
-  { role: 'technician', email: 'technician@brackenmoor.example', name: 'named after a technician of the crew' },
+  { role: 'technician', email: 'technician@brackenmoor.example', name: 'as in the crew' },
   { role: 'office', email: 'office@brackenmoor.example', name: 'Wen Castleford' },
   { role: 'auditor', email: 'auditor@brackenmoor.example', name: 'Solveig Okafor' },
 ];
@@ -27,22 +27,32 @@ export const DEMO_SIGN_INS: { role: string; email: string; password: string }[] 
   { role: 'two firms', email: IN_BOTH.email, password: DEMO_PASSWORD },
 ];
 
-/** Makes the people of the two demo companies; the technician is an ordinary one who is still there. */
-export const addSignIns = async (companyId: string, company: DemoCompany, smallCompanyId: string): Promise<void> => {
-  const ordinary = company.technicians.find(({ habit, untilMonth }) => habit === 'ordinary' && untilMonth === null);
-  const [technician] = await withCompany({ companyId, actor: 'demo' }, (tx) =>
+const add = async (companyId: string, person: Person & { technicianId?: string }): Promise<string> =>
+  addMember(companyId, { ...person, passwordHash: await hashPassword(DEMO_PASSWORD) });
+
+/** An ordinary technician of the crew who is still there. */
+const technicianOf = async (companyId: string, { technicians: crew }: DemoCompany) => {
+  const ordinary = crew.find(({ habit, untilMonth }) => habit === 'ordinary' && untilMonth === null);
+  const [row] = await withCompany({ companyId, actor: 'demo' }, (tx) =>
     tx
-      .select({ id: technicians.id, name: technicians.name })
+      .select({ technicianId: technicians.id, name: technicians.name })
       .from(technicians)
       .where(eq(technicians.name, ordinary?.name ?? '')),
   );
-  for (const person of CREW) {
-    const passwordHash = await hashPassword(DEMO_PASSWORD);
-    const own =
-      person.role === 'technician' && technician ? { name: technician.name, technicianId: technician.id } : {};
-    await addMember(companyId, { ...person, ...own, passwordHash });
-  }
-  const passwordHash = await hashPassword(DEMO_PASSWORD);
-  await addMember(companyId, { ...IN_BOTH, passwordHash });
-  await addMember(smallCompanyId, { ...IN_BOTH, role: 'owner' });
+  return row ?? {};
 };
+
+/** Makes the people of the large demo company, one for each role; gives the id of who hands files in. */
+export const addCrewSignIns = async (companyId: string, company: DemoCompany): Promise<string> => {
+  const own = await technicianOf(companyId, company);
+  let office = '';
+  for (const person of CREW) {
+    const id = await add(companyId, person.role === 'technician' ? { ...person, ...own } : person);
+    if (person.role === 'office') office = id;
+  }
+  await add(companyId, IN_BOTH);
+  return office;
+};
+
+/** Makes the person of both companies the owner of the small one; gives the id. */
+export const addSmallOwner = (companyId: string): Promise<string> => add(companyId, { ...IN_BOTH, role: 'owner' });
