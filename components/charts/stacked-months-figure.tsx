@@ -34,7 +34,7 @@ type StackedMonthsFigureProps = {
  * Stacked months with what a picture alone lacks: one tab stop in which arrows move from month to month, the month in
  * words, and a way to its records. The table beside it is its equal for who does not see it.
  */
-export const StackedMonthsFigure = ({ label, layers, months, describe, recordsOf }: StackedMonthsFigureProps) => {
+export const StackedMonthsFigure = ({ label, layers, months, wordsOf, recordsOf }: StackedMonthsFigureProps) => {
   const narrow = useNarrow();
   const router = useRouter();
   const shown = useMemo(() => (narrow ? months.slice(-NARROW_MONTHS) : months), [narrow, months]);
