@@ -1,5 +1,6 @@
 import Papa from 'papaparse';
 import { unreadable } from '@/lib/errors';
+import { fromFormulaSafe } from '@/lib/formula-safe';
 import type { Delimiter } from './layout';
 import { countText } from './text';
 
@@ -65,7 +66,8 @@ export class CsvSplitter {
       const faulty = this.firstFault(data, errors);
       let lines = 0;
       for (const cells of faulty === null ? data : data.slice(0, faulty)) {
-        rows.push({ line: this.line + lines, cells, quoteFault: false });
+        // Files that this product wrote carry guards against formulas.
+        rows.push({ line: this.line + lines, cells: cells.map(fromFormulaSafe), quoteFault: false });
         lines += linesOf(cells);
       }
       this.line += lines;
