@@ -5,6 +5,7 @@ import { recoveries } from '@/db/schema/recoveries';
 import { scopeOf, type Viewer } from '@/lib/auth/viewer';
 import { badInput, conflict, notFound } from '@/lib/errors';
 import { type CorrectionBody, correctedTexts } from './body';
+import { keepCertification } from './certification';
 import { recordColumns } from './columns';
 import { lastChange } from './last-change';
 import { todayIn } from './local-time';
@@ -16,8 +17,8 @@ import { getDesignations } from './refrigerants';
 import { getStored } from './stored';
 import { storedTexts } from './stored-texts';
 
-/** A doubtful day that an import brought does not stand in the way of correcting something else. */
-const LATEST_DAY = '9999-12-31';
+/** What decides whether the weights and the recovered mass agree. */
+const WEIGHED = ['startWeight', 'endWeight', 'recoveredMass', 'massUnit'] as const;
 
 const refuseOlder = async (tx: Tx, viewer: Viewer, id: string, seen: number, now: number): Promise<void> => {
   if (seen === now) return;
@@ -40,14 +41,19 @@ export const correctRecovery = (viewer: Viewer, id: string, body: CorrectionBody
     await refuseOlder(tx, viewer, id, body.version, stored.version);
     const corrected = correctedTexts(storedTexts(stored.record), body.changes);
     const texts = withOwnTechnician(corrected, await ownTechnician(tx, viewer));
+    const today = todayIn(viewer.timeZone);
     const context = {
       timeZone: viewer.timeZone,
       refrigerants: await getDesignations(tx),
-      today: body.changes.recoveredAt === undefined ? LATEST_DAY : todayIn(viewer.timeZone),
+      // A doubtful day that an import brought does not stand in the way of correcting something else.
+      today: body.changes.recoveredAt === undefined && stored.recoveredOn > today ? stored.recoveredOn : today,
     };
-    const read = readTexts(texts, context);
+    const read = readTexts(texts, context, {
+      weightsKept: !WEIGHED.some((field) => body.changes[field] !== undefined),
+    });
     if (!read.ok) throw badInput(read.errors);
     const ids = await resolveNames(tx, viewer.companyId, read.row, body.createNames ?? false);
+    await keepCertification(tx, viewer.companyId, ids.technicianId, read.row.technicianCertification);
     await refusingTakenRef(read.row.recordRef, () =>
       tx
         .update(recoveries)

@@ -9,6 +9,7 @@ import { scopeOf, type Viewer } from '@/lib/auth/viewer';
 import { AppError, badInput } from '@/lib/errors';
 import type { RecoveryRow } from '@/lib/imports/rows';
 import { newTexts, type RecordBody } from './body';
+import { keepCertification } from './certification';
 import { recordColumns } from './columns';
 import { todayIn } from './local-time';
 import { resolveNames } from './names';
@@ -72,6 +73,7 @@ export const createRecovery = (
       return { id, replayed: true };
     }
     const ids = await resolveNames(tx, viewer.companyId, row, body.createNames ?? false);
+    await keepCertification(tx, viewer.companyId, ids.technicianId, row.technicianCertification);
     const written = await refusingTakenRef(row.recordRef, () =>
       tx
         .insert(recoveries)

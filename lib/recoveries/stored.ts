@@ -56,13 +56,13 @@ export const getStored = async (
   tx: Tx,
   id: string,
   timeZone: string,
-): Promise<{ record: StoredRecord; version: number; technicianId: string } | null> => {
+): Promise<{ record: StoredRecord; version: number; recoveredOn: string } | null> => {
   const [row] = await tx
-    .select({ ...storedColumns(timeZone), version: r.version, technicianId: r.technicianId })
+    .select({ ...storedColumns(timeZone), version: r.version, recoveredOn: r.recoveredOn })
     .from(f)
     .innerJoin(r, sameRecord)
     .where(eq(f.id, id));
   if (!row) return null;
-  const { version, technicianId, ...record } = row;
-  return { record, version, technicianId };
+  const { version, recoveredOn, ...record } = row;
+  return { record, version, recoveredOn };
 };
