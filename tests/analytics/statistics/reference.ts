@@ -84,7 +84,7 @@ export const checkReference = (topic: string, standard: Tolerance, checks: Check
   test.each(cases.map((entry) => [entry.kind ? `${entry.kind}: ${entry.name}` : entry.name, entry] as const))(
     '%s',
     (_, entry) => {
-      const check = checks[entry.kind] ?? expect.fail(`No check for the kind "${entry.kind}"`);
+      const check = checks[entry.kind] ?? checks[entry.name] ?? expect.fail(`No check for the kind "${entry.kind}"`);
       const before = seen.figures;
       check(entry, (actual, expected, tolerance) => compareAt(actual, expected, entry.name, tolerance));
       expect(seen.figures, 'figures compared').toBeGreaterThan(before);
