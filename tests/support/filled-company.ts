@@ -22,6 +22,7 @@ const ids = () => ({
   importId: randomUUID(),
   flagId: randomUUID(),
   recoveryId: randomUUID(),
+  otherRecoveryId: randomUUID(),
 });
 type Ids = ReturnType<typeof ids>;
 
@@ -42,7 +43,7 @@ const fillPlaces = async (tx: Tx, companyId: string, label: string, id: Ids): Pr
 const fillRecords = async (tx: Tx, companyId: string, label: string, id: Ids, massKg: string): Promise<void> => {
   const rows = Array.from({ length: JOBS }, (_, n) => ({
     companyId,
-    id: n === 0 ? id.recoveryId : randomUUID(),
+    id: [id.recoveryId, randomUUID(), randomUUID(), id.otherRecoveryId][n] ?? randomUUID(),
     recordRef: `${label}-${n}`,
     recoveredOn: `2025-0${1 + (n % 6)}-15`,
     technicianId: n < 3 ? id.technicianId : id.otherTechnicianId,
@@ -80,7 +81,7 @@ const fillImports = async (tx: Tx, companyId: string, label: string, id: Ids): P
     fileName: `${label}.csv`,
     fileSize: 3,
     fileSha256: label,
-    status: 'done',
+    status: 'running',
     rowsRead: 1,
     rowsTotal: 1,
     rejected: 1,

@@ -14,8 +14,7 @@ export const CONTEXT: ReadContext = {
 };
 
 /** A file of these bytes, handed out in pieces of `size`. */
-export const openBytes =
-  (bytes: Uint8Array, size = 65_536): OpenFile =>
+export const openBytes = (bytes: Uint8Array, size = 65_536): OpenFile =>
   async function* () {
     for (let at = 0; at < bytes.length; at += size) yield bytes.subarray(at, at + size);
   };

@@ -1,0 +1,115 @@
+import type { Action } from '@/lib/auth/permissions';
+import type { FilledCompany } from './filled-company';
+
+/** What a handler promises about access; `open` says why somebody who is not signed in may call it. */
+export type RouteRule =
+  | { open: string }
+  | {
+      action: Action;
+      /** The id in the path, of a company's own. */
+      id?: (company: FilledCompany) => string;
+      /** The id of a record that belongs to another technician of the same company. */
+      colleagues?: (company: FilledCompany) => string;
+      /** What is sent, for writes. */
+      send?: (company: FilledCompany) => { body: BodyInit; headers?: Record<string, string> };
+      search?: string;
+      /** The answer to a role that may. */
+      status: number;
+      /** For lists and sums: the number of records that the answer is about, as it says itself. */
+      records?: (answer: never) => number;
+    };
+
+const asJson = (value: unknown) => ({
+  body: JSON.stringify(value),
+  headers: { 'content-type': 'application/json' },
+});
+
+const recoveryFile = () => {
+  const form = new FormData();
+  form.set('file', new File(['record_ref,recovered_at\nA-1,2025-01-02\n'], 'two-columns.csv', { type: 'text/csv' }));
+  form.set('dryRun', 'true');
+  return { body: form };
+};
+
+const takenRecord = ({ label }: FilledCompany) =>
+  asJson({
+    recordRef: `${label}-0`,
+    recoveredAt: '2025-01-15',
+    site: `Site of ${label}`,
+    appliance: `Appliance of ${label}`,
+    technician: `Technician of ${label}`,
+    refrigerant: 'R-410A',
+    nameplateCharge: 5,
+    recoveredMass: 4,
+  });
+
+const recoveryId = ({ ids }: FilledCompany) => ids.recoveryId;
+const otherRecoveryId = ({ ids }: FilledCompany) => ids.otherRecoveryId;
+const importId = ({ ids }: FilledCompany) => ids.importId;
+const sumOf = (items: { recoveries: number }[]) => items.reduce((sum, { recoveries }) => sum + recoveries, 0);
+
+/**
+ * Every handler under app/api. A route that is not here fails the access test: say who may call it, with what, and what
+ * comes back.
+ */
+export const ROUTES: Record<string, RouteRule> = {
+  'GET /api/auth/[...nextauth]': { open: 'signing in is for those who are not signed in' },
+  'POST /api/auth/[...nextauth]': { open: 'signing in is for those who are not signed in' },
+  'GET /api/health': { open: 'whoever watches the server has no account; it says nothing about a company' },
+  'GET /api/imports': { action: 'imports:manage', status: 200 },
+  'POST /api/imports': { action: 'imports:manage', send: recoveryFile, status: 202 },
+  'GET /api/imports/[id]': { action: 'imports:manage', id: importId, status: 200 },
+  // The import of a filled company is being read: nothing else is done with it meanwhile.
+  'POST /api/imports/[id]/preview': { action: 'imports:manage', id: importId, send: () => asJson({}), status: 409 },
+  'POST /api/imports/[id]/apply': { action: 'imports:manage', id: importId, send: () => asJson({}), status: 409 },
+  'POST /api/imports/[id]/undo': { action: 'imports:manage', id: importId, status: 409 },
+  'GET /api/imports/[id]/rejected.csv': { action: 'imports:manage', id: importId, status: 200 },
+  'GET /api/low-recoveries': {
+    action: 'flags:read',
+    status: 200,
+    records: (answer: { judged: { records: number } }) => answer.judged.records,
+  },
+  'GET /api/recoveries': {
+    action: 'records:read',
+    status: 200,
+    records: (answer: { total: number }) => answer.total,
+  },
+  // The record ref is taken: what may be written is the business of the tests of records.
+  'POST /api/recoveries': { action: 'records:write', send: takenRecord, status: 409 },
+  'GET /api/recoveries/[id]': { action: 'records:read', id: recoveryId, colleagues: otherRecoveryId, status: 200 },
+  // A version that nobody has seen yet.
+  'PATCH /api/recoveries/[id]': {
+    action: 'records:write',
+    id: recoveryId,
+    colleagues: otherRecoveryId,
+    send: () => asJson({ version: 999, reason: 'a typing error', changes: { notes: 'mended' } }),
+    status: 409,
+  },
+  'GET /api/recoveries/[id]/history': {
+    action: 'records:read',
+    id: recoveryId,
+    colleagues: otherRecoveryId,
+    status: 200,
+  },
+  'GET /api/scope-options': {
+    action: 'records:read',
+    status: 200,
+    records: (answer: { recoveries: number }) => answer.recoveries,
+  },
+  'GET /api/sites': {
+    action: 'sites:read',
+    status: 200,
+    records: (answer: { items: { recoveries: number }[] }) => sumOf(answer.items),
+  },
+  'GET /api/technicians': {
+    action: 'technicians:read',
+    status: 200,
+    records: (answer: { items: { recoveries: number }[] }) => sumOf(answer.items),
+  },
+  'GET /api/trends/monthly': {
+    action: 'trends:read',
+    status: 200,
+    records: (answer: { totals: { recoveries: number } }) => answer.totals.recoveries,
+  },
+  'GET /api/work': { action: 'records:read', status: 200 },
+};
