@@ -66,21 +66,28 @@ const receive = async (request: Request, path: string): Promise<ReceivedForm> =>
     defParamCharset: 'utf8',
     limits: { files: 1, fileSize: MOST_FILE_BYTES, fields: 10, fieldSize: MOST_FIELD_BYTES },
   });
+  let fault: Error | undefined;
+  // Later, because busboy cannot be ended from within its own events.
+  const refuse = (error: Error) => {
+    fault ??= error;
+    process.nextTick(() => form.destroy(error));
+  };
   form.on('field', (name, value, { valueTruncated }) => {
-    if (valueTruncated) form.destroy(tooLarge(`The field “${name}” is too long.`));
+    if (valueTruncated) refuse(tooLarge(`The field “${name}” is too long.`));
     else fields.set(name, value);
   });
   form.on('file', (name, stream, { filename }) => {
     if (name !== 'file') return void stream.resume();
     const fileName = filename?.trim() || 'unnamed file';
     const { stream: inspected, result } = inspect(fileName);
-    stream.on('limit', () => form.destroy(fileTooLarge()));
+    stream.on('limit', () => refuse(fileTooLarge()));
     taking = pipeline(stream, inspected, createWriteStream(path)).then(() => ({ path, fileName, ...result() }));
     // A file that is refused at its first bytes ends the reading of the form.
-    taking.catch((error: Error) => form.destroy(error));
+    taking.catch(refuse);
   });
   // The web stream of a request and the one of node:stream/web are one thing under two type names.
-  await pipeline(Readable.fromWeb(request.body as WebStream<Uint8Array>), form);
+  await pipeline(Readable.fromWeb(request.body as WebStream<Uint8Array>), form).catch((error: Error) => refuse(error));
+  if (fault) throw fault;
   if (!taking) throw noForm('No file came with the request.');
   return { file: await taking, fields };
 };

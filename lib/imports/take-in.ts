@@ -14,6 +14,7 @@ import { ANALYZE_DECIDED_ROWS, COUNT_OUTCOMES, createDecidedRows, INSERT_IMPORT_
 import { FINISH_IMPORT, LOCK_IMPORT } from './sql/finish';
 import { ANALYZE_MATCHED_ROWS, CREATE_MATCHED_ROWS, LOCK_KNOWN_RECORDS } from './sql/match';
 import { ANALYZE_STAGED_NAMES, CREATE_STAGED_APPLIANCES, createStagedNames } from './sql/names';
+import { FOR_MANY_ROWS } from './sql/settings';
 import { INSERT_NAMES, INSERT_RECOVERIES, updateRecoveries } from './sql/write';
 import { stageRows } from './stage';
 import { summarize } from './summary';
@@ -74,7 +75,7 @@ const takeRows = (work: ImportWork, plan: FilePlan): Promise<void> =>
     // Should a worker be thought dead that is not, the second one waits here and then finds the work done.
     const { rows } = await client.query<{ status: string }>(LOCK_IMPORT, owner);
     if (rows[0]?.status !== 'running') return;
-    await client.query("set local work_mem = '64MB'");
+    await client.query(FOR_MANY_ROWS);
     const stated = statedBy(plan.fields);
     await stage(client, work, plan, stated);
     await decide(client, work, plan, stated);

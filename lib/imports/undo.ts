@@ -8,6 +8,7 @@ import { scopeOf, type Viewer } from '@/lib/auth/viewer';
 import { AppError, conflict } from '@/lib/errors';
 import type { ImportPayload } from '@/lib/jobs/task';
 import { LOCK_IMPORT } from './sql/finish';
+import { FOR_MANY_ROWS } from './sql/settings';
 import {
   CREATE_TAKEN_ROWS,
   DELETE_ADDED,
@@ -32,6 +33,7 @@ export const undoImport = ({ companyId, importId }: ImportPayload): Promise<void
     const owner = [companyId, importId];
     const { rows } = await client.query<{ status: string }>(LOCK_IMPORT, owner);
     if (rows[0]?.status !== 'done') return;
+    await client.query(FOR_MANY_ROWS);
     await client.query(CREATE_TAKEN_ROWS, owner);
     await client.query('analyze taken_rows');
     const kept = await client.query<{ recordRef: string; reason: string }>(KEPT_RECORDS, [importId]);

@@ -31,7 +31,7 @@ export const CREATE_MATCHED_ROWS = `
   from ordered o
   left join recoveries r on r.company_id = $1 and r.record_ref = o.record_ref
   left join import_rows written on written.company_id = $1 and written.recovery_id = r.id
-    and written.import_id = r.import_id and written.outcome in ('added', 'updated')
+    and written.import_id is not distinct from r.import_id and written.outcome in ('added', 'updated')
   union all
   select line, line, null, null, false, 'refused' from staged_rows where reasons is not null`;
 
