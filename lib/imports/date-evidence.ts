@@ -20,7 +20,10 @@ export class DateEvidence {
   private readonly reads: Record<DateOrder, number> = { ymd: 0, dmy: 0, mdy: 0 };
   /** For each order the first date that it can't read although another can. */
   private readonly against: Partial<Record<DateOrder, string>> = {};
+  /** The first date that is one day in one order and another in another. */
   private firstOpen: string | null = null;
+  /** Pairs of orders that made different days of the same date. */
+  private readonly apart = new Set<string>();
 
   constructor(private readonly span: YearSpan) {}
 
@@ -34,15 +37,20 @@ export class DateEvidence {
       if (dates[i]) this.reads[order] += 1;
       else this.against[order] ??= text;
     });
-    if (dates.filter(Boolean).length > 1) this.firstOpen ??= text;
+    if (distinct.size - (distinct.has(null) ? 1 : 0) < 2) return;
+    this.firstOpen ??= text;
+    for (const [i, a] of DATE_ORDERS.entries())
+      for (const [j, b] of DATE_ORDERS.entries())
+        if (dates[i] && dates[j] && dates[i] !== dates[j]) this.apart.add(`${a} ${b}`);
   }
 
   /** The order, or null when the dates leave it open. Dates that read the same in every order need none. */
   decide(): Evidenced<DateOrder> | null {
     if (this.telling === 0) return { value: 'ymd', evidence: 'Every date begins with its year or names its month.' };
     const fitting = DATE_ORDERS.filter((order) => this.reads[order] === this.telling);
-    const [only] = fitting;
-    if (fitting.length !== 1 || !only) return null;
+    const [only, ...others] = fitting;
+    if (!only || others.some((order) => this.apart.has(`${only} ${order}`))) return null;
+    if (others.length) return { value: only, evidence: 'Day and month are the same number in every date.' };
     const proofs = new Set(DATE_ORDERS.flatMap((order) => (order === only ? [] : (this.against[order] ?? []))));
     const examples = listWords(
       [...proofs].map((text) => `“${text}”`),

@@ -18,8 +18,7 @@ export const plainNumber = (value: number): string => {
   const rounded = Number(value.toPrecision(15));
   const text = String(rounded);
   if (!text.includes('e')) return text;
-  const fixed = rounded.toFixed(15);
-  return fixed.includes('.') ? fixed.replace(/\.?0+$/, '') : fixed;
+  return Number.isInteger(rounded) ? BigInt(rounded).toString() : rounded.toFixed(15).replace(/\.?0+$/, '');
 };
 
 /** A cell's date as ISO text; Excel's clock is a wall clock, kept as UTC by the library. */
