@@ -1,10 +1,8 @@
 import { and, eq, gte, isNull, lt, sql } from 'drizzle-orm';
 import { alias, pgView, type QueryBuilder } from 'drizzle-orm/pg-core';
 import { recoveries as r } from '@/db/schema/recoveries';
+import { LEAST_LIKE_JOBS } from '@/lib/like-jobs';
 import type { ApplianceCategory } from '@/lib/vocabulary';
-
-/** Fewer like jobs than this, and nothing is said about any of them. */
-export const LEAST_LIKE_JOBS = 20;
 
 const peer = alias(r, 'peer');
 const quartile = (p: number) =>

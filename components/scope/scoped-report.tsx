@@ -1,0 +1,35 @@
+'use client';
+
+import { clsx } from 'clsx';
+import type { ReactNode } from 'react';
+import { Failed, Loading } from '@/components/ui/states';
+import { NothingInScope } from './nothing-in-scope';
+import { ScopeSentence } from './scope-sentence';
+
+type ScopedReportProps<Answer> = {
+  data: Answer | undefined;
+  error: Error | null;
+  /** Whether newer figures are on their way. */
+  stale: boolean;
+  retry: () => void;
+  isEmpty: (data: Answer) => boolean;
+  children: (data: Answer) => ReactNode;
+};
+
+/** A screen of one answer under its scope: being read, failed, nothing there, or the answer itself. */
+export const ScopedReport = <Answer,>({ data, error, stale, retry, isEmpty, children }: ScopedReportProps<Answer>) => (
+  <>
+    <ScopeSentence />
+    {data ? (
+      <div aria-busy={stale} className={clsx('flex flex-col gap-6 transition-opacity', stale && 'opacity-50')}>
+        {isEmpty(data) ? <NothingInScope /> : children(data)}
+      </div>
+    ) : error ? (
+      <Failed error={error} onRetry={retry} />
+    ) : (
+      <div className="mt-20 bg-sheet px-6 py-5">
+        <Loading minHeight={480} />
+      </div>
+    )}
+  </>
+);
