@@ -73,8 +73,8 @@ describe.each(['light', 'dark'] as const)('%s theme', (theme) => {
   });
 
   test.each(Object.keys(VISIONS) as Vision[])('refrigerants stacked on each other differ for %s', (vision) => {
+    // Twice what is just noticed (0.02 in OKLab), for marks that lie apart.
     for (const [index, one] of STACKED.entries())
-      // Twice what is just noticed (0.02 in OKLab), for marks that lie apart.
       for (const other of STACKED.slice(index + 1))
         expect(
           seenDifference(vision, linearRgb(colour(theme, one)), linearRgb(colour(theme, other))),
