@@ -76,8 +76,12 @@ export const KG_PER_UNIT: Record<DisplayUnit, number> = { kg: 1, lb: 0.45359237 
 /** Kilograms as a number of display units. */
 export const kgToUnit = (kg: number, unit: DisplayUnit): number => kg / KG_PER_UNIT[unit];
 
-/** Kilograms rounded to the gram: the precision of the API's masses. */
-export const kgToGram = (kg: number): number => Math.round(kg * 1000) / 1000;
+/** Below this a number is written with an exponent; it is no gram anyway. */
+const LEAST_PLAIN_KG = 1e-6;
+
+/** Kilograms rounded to the gram, halves up in their decimal form: the precision of the API's masses. */
+export const kgToGram = (kg: number): number =>
+  Math.abs(kg) < LEAST_PLAIN_KG ? 0 : Number(`${Math.round(Number(`${kg}e3`))}e-3`);
 
 /** Standard atmosphere, the conventional inch and millimetre of mercury (0 °C), pounds per square inch; in kPa. */
 export const KPA = { atmosphere: 101.325, inHg: 3.386389, mmHg: 0.1333224, psi: 6.894757 } as const;

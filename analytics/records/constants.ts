@@ -30,4 +30,5 @@ export const readSort = (sort: Sort): { key: SortKey; descending: boolean } => {
 };
 
 export const PAGE_SIZES = [50, 100] as const;
+export type PageSize = (typeof PAGE_SIZES)[number];
 export const MOST_ROWS_A_PAGE = 500;

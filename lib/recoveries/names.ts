@@ -18,7 +18,7 @@ export type NameIds = {
 };
 
 /** The key of a name, made by the expression of the generated column `name_key`. */
-const nameKey = (name: string): SQL =>
+export const nameKey = (name: string): SQL =>
   sql`lower(btrim(regexp_replace(normalize(${name}, NFC), '[[:space:]]+', ' ', 'g')))`;
 
 const find = async (tx: Tx, table: NamedTable, name: string, within?: SQL): Promise<string | null> => {

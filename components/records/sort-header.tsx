@@ -1,0 +1,34 @@
+import { readSort, type Sort } from '@/analytics/records/constants';
+import { Th } from '@/components/ui/table';
+import type { ColumnId } from './column-list';
+import { NUMERIC_COLUMNS } from './columns';
+
+type SortHeaderProps = { id: ColumnId; sort: Sort; onSort: (sort: Sort) => void; children: string };
+
+/** A head that sorts: the first press up from the least (dates and figures down), the next turns it round. */
+export const SortHeader = ({ id, sort, onSort, children }: SortHeaderProps) => {
+  const { key, descending } = readSort(sort);
+  const sorted = key === id;
+  const numeric = NUMERIC_COLUMNS.has(id);
+  const startsDown = numeric || id === 'recoveredOn';
+  const next: Sort = (sorted ? !descending : startsDown) ? `-${id}` : id;
+  return (
+    <Th
+      numeric={numeric}
+      {...(sorted ? { 'aria-sort': descending ? ('descending' as const) : ('ascending' as const) } : {})}
+    >
+      <button
+        type="button"
+        onClick={() => onSort(next)}
+        className={`inline-flex items-baseline gap-1 text-inherit hover:text-act pointer-coarse:min-h-11 pointer-coarse:items-center ${
+          sorted ? 'font-semibold text-ink' : ''
+        }`}
+      >
+        {children}
+        <span aria-hidden="true" className={sorted ? '' : 'invisible'}>
+          {sorted && !descending ? '↑' : '↓'}
+        </span>
+      </button>
+    </Th>
+  );
+};
