@@ -1,0 +1,41 @@
+import { expect, test } from 'vitest';
+import { groupAnswer, groupsOfHalf, spreadNote } from '@/analytics/group-sentence';
+import { lowAnswer, unjudgedNote } from '@/analytics/low-recoveries/sentence';
+
+const plainSpaces = (text: string) => text.replaceAll('\u00a0', ' ');
+const group = (recoveredMass: number, recoveries = 1) => ({ recoveredMass, recoveries });
+const words = { one: 'site', many: 'sites', verb: 'gave' };
+
+test('groups come to a sum in words', () => {
+  expect(plainSpaces(groupAnswer([group(10, 2), group(5, 1)], words, 'kg'))).toBe(
+    '2 sites gave 15 kg in 3 recoveries.',
+  );
+  expect(plainSpaces(groupAnswer([group(0.45359237)], words, 'lb'))).toBe('1 site gave 1 lb in 1 recovery.');
+});
+
+test('half of the mass is counted from the largest down', () => {
+  expect(groupsOfHalf([group(1), group(6), group(3)])).toBe(1);
+  expect(groupsOfHalf([group(1), group(1), group(1), group(1)])).toBe(2);
+  expect(groupsOfHalf([])).toBe(0);
+});
+
+test('a spread is only told where few hold half', () => {
+  const uneven = [group(100), ...Array.from({ length: 8 }, () => group(10))];
+  expect(spreadNote(uneven, 'sites')).toBe('Half of it comes from 1 of the 9 sites.');
+  expect(
+    spreadNote(
+      Array.from({ length: 9 }, () => group(10)),
+      'sites',
+    ),
+  ).toBe('');
+});
+
+test('low recoveries in words', () => {
+  const judged = { records: 1204, groups: 9, tooFewLikeJobs: 34, low: 12 };
+  expect(plainSpaces(lowAnswer(judged))).toBe('12 of 1,204 recoveries lie far below like jobs.');
+  expect(plainSpaces(lowAnswer({ ...judged, low: 1 }))).toBe('1 of 1,204 recoveries lies far below like jobs.');
+  expect(plainSpaces(lowAnswer({ ...judged, low: 0 }))).toBe('None of 1,204 recoveries lies far below like jobs.');
+  expect(lowAnswer({ ...judged, records: 0, low: 0 })).toBe('Too few like jobs to say anything.');
+  expect(plainSpaces(unjudgedNote(judged))).toBe('About 34 others nothing is said: fewer than 20 jobs are like them.');
+  expect(unjudgedNote({ ...judged, tooFewLikeJobs: 0 })).toBe('');
+});
