@@ -4,12 +4,21 @@ import { isLargePlant } from './equipment';
 import type { Random } from './random';
 import type { Technician } from './technicians';
 
+/** How readily somebody is sent to a job of his own branch, and of another one. */
+type Calls = { here: number; away: number };
+
+const callsFor = ({ habit }: Technician, unit: Appliance, job: JobType): Calls => {
+  if (habit === 'large_plant') return isLargePlant(unit.equipment) ? { here: 25, away: 9 } : { here: 0.25, away: 0 };
+  if (habit === 'leak_specialist') {
+    if (unit.leaksAgain) return { here: 9, away: 1.2 };
+    return { here: job === 'repair' ? 1.8 : 0.35, away: 0 };
+  }
+  return { here: 1, away: 0.004 };
+};
+
 /** Who is sent: mostly somebody of the branch; specialists get what they are good at. */
 export const assign = (crew: readonly Technician[], unit: Appliance, job: JobType, random: Random): Technician =>
   random.pick(crew, (technician) => {
-    const here = technician.branch === unit.site.branch;
-    if (technician.habit === 'large_plant') return isLargePlant(unit.equipment) ? (here ? 25 : 9) : here ? 0.25 : 0;
-    if (technician.habit === 'leak_specialist' && (unit.leaksAgain || job === 'repair'))
-      return here ? (unit.leaksAgain ? 5 : 1.6) : unit.leaksAgain ? 0.8 : 0;
-    return here ? 1 : 0.004;
+    const { here, away } = callsFor(technician, unit, job);
+    return technician.branch === unit.site.branch ? here : away;
   });

@@ -7,6 +7,7 @@ export type Plan = {
   branches: readonly string[];
   /** Last month of records, `YYYY-MM`. */
   endMonth: string;
+  /** Twelve or more. */
   months: number;
   technicians: number;
   sites: number;

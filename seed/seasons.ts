@@ -9,7 +9,7 @@ const season = (kind: EquipmentKind['season'], month: number): number => {
   switch (kind) {
     // Heat pumps break down in the cold: a low second hump in January.
     case 'cooling':
-      return wave(month, 0.62) + (month === 0 || month === 1 || month === 11 ? 0.16 : 0);
+      return wave(month, 0.62) + (month === 0 || month === 1 || month === 11 ? 0.22 : 0);
     case 'refrigeration':
       return wave(month, 0.07);
     // Large plant is opened when it can stand still.

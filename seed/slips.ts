@@ -64,7 +64,7 @@ const WEIGHTS = {
   tenfold: 2.5,
   swapped_digits: 2.5,
   nameplate_slip: 1.5,
-  refused: 1,
+  refused: 2,
   doubled: 2,
 } as const;
 const KINDS = Object.keys(WEIGHTS) as (keyof typeof WEIGHTS)[];

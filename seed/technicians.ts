@@ -49,7 +49,8 @@ export const makeTechnicians = (plan: Plan, months: readonly string[], random: R
   return Array.from({ length: plan.technicians }, (_, i): Technician => {
     const planted = plan.technicians < 10 ? undefined : PLANTED[i];
     const joined = planted || random.chance(0.55) ? first : random.pick(months.slice(6, -4));
-    const left = !planted && random.chance(0.18) ? random.pick(months.slice(-60, -6).filter((m) => m > joined)) : null;
+    const lastMonths = months.slice(-60, -6).filter((month) => month > joined);
+    const left = !planted && lastMonths.length && random.chance(0.18) ? random.pick(lastMonths) : null;
     const habit: Habit = planted ?? (joined > first ? 'newcomer' : 'ordinary');
     return {
       name: `${take(given)} ${take(family)}`,
