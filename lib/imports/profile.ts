@@ -73,6 +73,12 @@ const layoutOf = ({ profile, dateOrder, decimalMark }: ColumnDecision): ColumnLa
   decimals: profile.steps(),
 });
 
+/** Identifies the header row of a table, by its first rows alone. Throws 422 when there is none. */
+export const headerKeyOfTable = async (table: Table, context: ReadContext): Promise<string> => {
+  const { cells } = headerRow(await firstRows(table), context.today);
+  return headerKeyOf(nameHeaders(cells).slice(0, tableWidth(cells)));
+};
+
 /** Decides how a table is read, from one pass over all of its rows. */
 export const profileTable = async (
   table: Table,

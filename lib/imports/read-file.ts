@@ -1,5 +1,5 @@
 import type { Mapping } from './contract';
-import { profileTable } from './profile';
+import { headerKeyOfTable, profileTable } from './profile';
 import { rowReader } from './row';
 import type { FilePlan, OpenFile, ParsedRow, ReadContext } from './rows';
 import { openTable, refuseForeign, reopenRows } from './table';
@@ -8,6 +8,10 @@ const BATCH = 2_000;
 
 /** Quick check of an upload's first bytes; throws 422 for what is empty, a foreign kind of file or no text. */
 export const sniffFile = (firstBytes: Uint8Array, fileName: string): void => refuseForeign(firstBytes, fileName);
+
+/** Identifies the header row of a file, so that what was told for such a file before can be looked up. */
+export const headerKeyOfFile = async (open: OpenFile, told: Mapping, context: ReadContext): Promise<string> =>
+  headerKeyOfTable(await openTable(open, told, context.fileName), context);
 
 /**
  * Reads the whole file once and decides, column by column, how it is to be read. What the person tells goes before all

@@ -6,7 +6,7 @@ import { importMappings } from '@/db/schema/imports';
 import { type Mapping, mappingSchema } from './contract';
 import { keptFile } from './file-chunks';
 import type { ImportWork } from './import-work';
-import { profileFile } from './read-file';
+import { headerKeyOfFile, profileFile } from './read-file';
 import type { FilePlan } from './rows';
 
 const remembered = ({ companyId, actor }: CompanyScope, headerKey: string): Promise<Mapping | null> =>
@@ -21,9 +21,8 @@ const remembered = ({ companyId, actor }: CompanyScope, headerKey: string): Prom
 /** How the file is read: by what the person told now, told last time for such headers, and the evidence in the file. */
 export const planFile = async ({ scope, importId, told, context }: ImportWork): Promise<FilePlan> => {
   const open = keptFile(scope, importId);
-  const plan = await profileFile(open, told, null, context);
-  const before = await remembered(scope, plan.headerKey);
-  return before ? profileFile(open, told, before, context) : plan;
+  const before = await remembered(scope, await headerKeyOfFile(open, told, context));
+  return profileFile(open, told, before, context);
 };
 
 /** What was told now goes before what was told last time, column by column. */
