@@ -9,10 +9,10 @@ import { pipeline } from 'node:stream/promises';
 import type { ReadableStream as WebStream } from 'node:stream/web';
 import busboy from 'busboy';
 import { AppError, badInput, tooLarge } from '@/lib/errors';
+import { MOST_FILE_MB } from './limits';
 import { sniffFile } from './read-file';
 
-/** The largest file that is taken; ten years of a large contractor are a tenth of it. */
-export const MOST_FILE_BYTES = 100 * 1024 * 1024;
+export const MOST_FILE_BYTES = MOST_FILE_MB * 1024 * 1024;
 const MOST_FIELD_BYTES = 64 * 1024;
 /** So much of a file tells whether it is a table at all. */
 const SNIFF_BYTES = 4096;
@@ -22,7 +22,7 @@ export type ReceivedFile = { path: string; fileName: string; size: number; sha25
 export type ReceivedForm = { file: ReceivedFile; fields: Map<string, string> };
 
 const noForm = (message: string) => badInput([{ path: 'file', message }]);
-const fileTooLarge = () => tooLarge(`The file is larger than ${MOST_FILE_BYTES / 1024 / 1024} MB. Send it in parts.`);
+const fileTooLarge = () => tooLarge(`The file is larger than ${MOST_FILE_MB} MB. Send it in parts.`);
 
 /** Looks at the first bytes as they pass, counts and fingerprints the rest. */
 const inspect = (fileName: string) => {

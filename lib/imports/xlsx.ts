@@ -2,12 +2,11 @@ import readXlsxFile from 'read-excel-file/node';
 import { unreadable } from '@/lib/errors';
 import type { RawRow } from './csv';
 import { findHeader } from './headers';
+import { MOST_XLSX_MB } from './limits';
 import type { OpenFile } from './rows';
 import { unpackedSize } from './zip-size';
 
-/** An Excel file is unpacked in memory as a whole, unlike a CSV file: these keep that small. */
-export const XLSX_LIMIT_MB = 20;
-const UNPACKED_LIMIT_MB = 200;
+const MOST_UNPACKED_MB = 200;
 const MB = 1024 * 1024;
 
 /** The rows of an Excel sheet as canonical text, and the columns in which Excel itself holds numbers. */
@@ -38,17 +37,17 @@ const readBytes = async (open: OpenFile): Promise<Buffer> => {
   let size = 0;
   for await (const chunk of open()) {
     size += chunk.length;
-    if (size > XLSX_LIMIT_MB * MB)
+    if (size > MOST_XLSX_MB * MB)
       throw unreadable(
-        `Excel files may have up to ${XLSX_LIMIT_MB} MB. Save this one as CSV: those may be much larger.`,
+        `Excel files may have up to ${MOST_XLSX_MB} MB. Save this one as CSV: those may be much larger.`,
       );
     pieces.push(chunk);
   }
   const bytes = Buffer.concat(pieces);
   const unpacked = unpackedSize(bytes);
   if (unpacked === null) throw unreadable('This Excel file is cut off. Save it again and send the new file.');
-  if (unpacked > UNPACKED_LIMIT_MB * MB)
-    throw unreadable(`Unpacked, this Excel file has more than ${UNPACKED_LIMIT_MB} MB. Save it as CSV instead.`);
+  if (unpacked > MOST_UNPACKED_MB * MB)
+    throw unreadable(`Unpacked, this Excel file has more than ${MOST_UNPACKED_MB} MB. Save it as CSV instead.`);
   return bytes;
 };
 

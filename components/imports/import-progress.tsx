@@ -1,0 +1,24 @@
+import type { ImportView } from '@/lib/imports/contract';
+import { importSentence } from './import-words';
+
+/** How far the reading has come: a bar to see, and a sentence read out at every tenth. */
+export const ImportProgress = ({ view }: { view: ImportView }) => {
+  const { rowsRead, rowsTotal, dryRun } = view;
+  const share = rowsTotal ? Math.min(1, rowsRead / rowsTotal) : 0;
+  return (
+    <div className="bg-sheet px-4 py-5 sm:px-6">
+      <progress
+        aria-label={importSentence(view)}
+        max={1}
+        {...(rowsTotal && rowsRead ? { value: share } : {})}
+        className="h-3 w-full accent-shoulder"
+      />
+      <p className="mt-2 text-ink-2">
+        {dryRun ? 'No record is changed by this.' : 'You may leave this page; the work goes on.'}
+      </p>
+      <p role="status" className="sr-only">
+        {rowsTotal ? `${Math.floor(share * 10) * 10}% read` : 'The file is being looked at'}
+      </p>
+    </div>
+  );
+};
