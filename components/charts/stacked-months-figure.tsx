@@ -58,7 +58,7 @@ export const StackedMonthsFigure = ({ label, layers, months, wordsOf, recordsOf 
         style={{ height }}
         className="[&_.visx-bar]:stroke-sheet [&_.visx-bar]:[stroke-width:0.75px] [&_svg]:block [&_svg]:overflow-visible"
       >
-        <div aria-hidden="true">
+        <div aria-hidden="true" className="h-full">
           <StackedMonths
             layers={layers}
             months={shown}

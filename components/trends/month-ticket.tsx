@@ -12,10 +12,15 @@ const share = (value: number | null, digits: number): string => (value === null 
 
 const KG_PER_TONNE = 1000;
 
-type MonthTicketProps = { month: StackedMonth; months: readonly StackedMonth[]; scope: ScopeSelection };
+type MonthTicketProps = {
+  month: StackedMonth;
+  months: readonly StackedMonth[];
+  scope: ScopeSelection;
+  className?: string;
+};
 
 /** One month as a weigh ticket: net mass, recoveries, yields, CO2-equivalent, what to look at. */
-export const MonthTicket = ({ month, months, scope }: MonthTicketProps) => {
+export const MonthTicket = ({ month, months, scope, className }: MonthTicketProps) => {
   const mayLook = useMay('flags:read');
   const records = recordsHref(scope, month.month) ?? '/records';
   const opens = (figure: ReactNode, href = records) => (
@@ -50,6 +55,7 @@ export const MonthTicket = ({ month, months, scope }: MonthTicketProps) => {
       of={stateWord(month) || 'the whole month'}
       net={{ figure: opens(formatMass(month.recoveredMass, scope.unit)), unit: `${scope.unit} net` }}
       rows={rows}
+      {...(className ? { className } : {})}
     />
   );
 };

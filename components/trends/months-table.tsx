@@ -1,4 +1,5 @@
 import Link from 'next/link';
+import type { ReactNode } from 'react';
 import type { Dimension } from '@/analytics/dimensions';
 import type { StackedMonth, Stacks } from '@/analytics/monthly-trends/series';
 import type { ScopeSelection } from '@/analytics/scope-address';
@@ -21,6 +22,14 @@ const Figure = ({ href, children }: { href: string | null; children: string }) =
     children
   );
 
+/** A heading with its unit on a line of its own, so that many columns fit. */
+const UnitHead = ({ unit, children }: { unit: string; children: ReactNode }) => (
+  <Th numeric className="max-w-36 whitespace-normal!">
+    {children}
+    <span className="sr-only">,</span> <span className="block font-normal">{unit}</span>
+  </Th>
+);
+
 /** The chart in figures, newest month first; every figure opens the records behind it. */
 export const MonthsTable = ({ stacks: { layers, months }, by, scope, colours }: MonthsTableProps) => (
   <Table label={`Recovered mass by month and ${by === 'jobType' ? 'job type' : by}`}>
@@ -28,19 +37,23 @@ export const MonthsTable = ({ stacks: { layers, months }, by, scope, colours }: 
       <tr>
         <Th>Month</Th>
         {layers.map((layer) => (
-          <Th key={layer.id} numeric>
+          <UnitHead key={layer.id} unit={scope.unit}>
             <span
               aria-hidden="true"
               className="mr-1.5 inline-block size-2.5"
               style={{ background: colours[layer.id] }}
             />
-            {layerName(by, layer)}, {scope.unit}
-          </Th>
+            {layerName(by, layer)}
+          </UnitHead>
         ))}
-        <Th numeric>All, {scope.unit}</Th>
-        <Th numeric>Against a year before</Th>
+        <UnitHead unit={scope.unit}>All</UnitHead>
+        <Th numeric className="max-w-28 min-w-24 whitespace-normal!">
+          Against the year before
+        </Th>
         <Th numeric>Recoveries</Th>
-        <Th numeric>Median yield</Th>
+        <Th numeric className="min-w-16 whitespace-normal!">
+          Median yield
+        </Th>
       </tr>
     </thead>
     <tbody>

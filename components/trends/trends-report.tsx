@@ -70,7 +70,7 @@ export const TrendsReport = ({ trends, scope, by, onSplit, stale }: TrendsReport
         sub={notes.join(' ')}
         className="lg:min-h-28 lg:content-start"
       />
-      <MonthTicket month={ticketMonth} months={stacks.months} scope={scope} />
+      <MonthTicket month={ticketMonth} months={stacks.months} scope={scope} className="lg:row-span-2 lg:self-start" />
       <Sheet
         title="Recovered mass by month"
         aside={`${scope.unit}, by ${DIMENSION_WORDS[shownBy].one}; the line is the year before`}

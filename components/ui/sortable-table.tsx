@@ -58,17 +58,19 @@ export const SortableTable = <Row extends RowData>({ label, columns, data, rowId
                 <Th
                   key={header.id}
                   numeric={header.column.columnDef.meta?.numeric ?? false}
+                  data-numeric={header.column.columnDef.meta?.numeric || undefined}
                   aria-sort={sorted ? ARIA[sorted] : 'none'}
                 >
                   <button
                     type="button"
                     onClick={header.column.getToggleSortingHandler()}
-                    className="min-h-8 font-medium hover:text-act pointer-coarse:min-h-11"
+                    className="inline-flex min-h-8 items-end gap-1 font-medium hover:text-act pointer-coarse:min-h-11"
                   >
-                    <table.FlexRender header={header} />
-                    <span aria-hidden="true" className="ml-1 inline-block w-3 text-ink">
+                    {/* The arrow stands where it does not push the heading away from its figures. */}
+                    <span aria-hidden="true" className="order-last w-3 text-ink in-data-numeric:order-first">
                       {sorted ? ARROWS[sorted] : ''}
                     </span>
+                    <table.FlexRender header={header} />
                   </button>
                 </Th>
               );

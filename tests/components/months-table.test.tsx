@@ -45,7 +45,7 @@ test('the newest month comes first, units stand in the headers, the running mont
     'R-410A, lb',
     'R-22, lb',
     'All, lb',
-    'Against a year before',
+    'Against the year before',
     'Recoveries',
     'Median yield',
   ]);
