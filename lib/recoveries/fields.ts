@@ -70,3 +70,10 @@ export const FIELD_LABELS: Record<RecordField, string> = {
 
 /** A record as texts by field, as somebody types it; '' is what is not stated. */
 export type RecordTexts = Record<RecordField, string>;
+
+/** Texts of a record of which nothing but `stated` is stated yet. */
+export const emptyTexts = (stated: Partial<RecordTexts> = {}): RecordTexts => {
+  // Every field of the list is filled in right here.
+  const blank = Object.fromEntries(RECORD_FIELDS.map((field) => [field, ''])) as RecordTexts;
+  return { ...blank, ...stated };
+};

@@ -1,0 +1,5 @@
+import { Loading } from '@/components/ui/states';
+
+export default function RecordsLoading() {
+  return <Loading minHeight={480} />;
+}

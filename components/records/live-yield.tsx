@@ -1,0 +1,32 @@
+import { Notice } from '@/components/ui/notice';
+import { formatMassWithUnit, formatPercent } from '@/lib/format';
+import type { RecordTexts } from '@/lib/recoveries/fields';
+import { liveYield } from '@/lib/recoveries/live-yield';
+import type { DisplayUnit } from '@/lib/vocabulary';
+
+/** A little over the full charge is the scale and the nameplate; more than this is a slip. */
+const DOUBTFUL_YIELD = 1.05;
+
+/** The ticket so far: what the figures typed say, before anything is sent. */
+export const LiveYieldLine = ({ texts, unit }: { texts: RecordTexts; unit: DisplayUnit }) => {
+  const live = liveYield(texts);
+  return (
+    <div aria-live="polite" className="mb-5">
+      <p className="flex flex-wrap items-baseline justify-between gap-x-6 border-y-2 border-ink py-2 font-mono">
+        <span className="text-sm text-ink-2">
+          {live.recoveredMassKg === null
+            ? 'The recovered mass follows from the weights'
+            : `${formatMassWithUnit(live.recoveredMassKg, unit, 2)} recovered`}
+          {live.fullChargeKg === null ? '' : ` of ${formatMassWithUnit(live.fullChargeKg, unit, 2)}`}
+        </span>
+        <span className="text-xl font-medium">{live.yield === null ? '—' : formatPercent(live.yield)}</span>
+      </p>
+      {live.yield !== null && live.yield > DOUBTFUL_YIELD ? (
+        <Notice tone="warning" title="More than the full charge" className="mt-3">
+          Look at the weights, the unit and the nameplate again. If they are right, stop and check how full the cylinder
+          is.
+        </Notice>
+      ) : null}
+    </div>
+  );
+};

@@ -1,0 +1,60 @@
+'use client';
+
+import type { ReactNode } from 'react';
+import type { KnownNames } from '@/analytics/records/known-names-contract';
+import type { RecordField, RecordTexts } from '@/lib/recoveries/fields';
+import { FieldInput } from './field-input';
+import { FORM_PARTS } from './field-kinds';
+
+type RecordFieldsProps = {
+  texts: RecordTexts;
+  onChange: (field: RecordField, value: string) => void;
+  errors: Readonly<Record<string, string>>;
+  names: KnownNames | undefined;
+  /** A technician writes under his own name. */
+  ownName?: string | undefined;
+  /** Stands before a part of the form, by its title. */
+  before?: Readonly<Record<string, ReactNode>>;
+};
+
+const suggestionsOf = (names: KnownNames | undefined): Partial<Record<RecordField, readonly string[]>> =>
+  names
+    ? {
+        technician: names.technicians,
+        branch: names.branches,
+        site: names.sites,
+        appliance: names.appliances.map(({ name }) => name),
+        cylinder: names.cylinders,
+        refrigerant: names.refrigerants,
+      }
+    : {};
+
+/** All fields of a record in the order of the work. */
+export const RecordFields = ({ texts, onChange, errors, names, ownName, before = {} }: RecordFieldsProps) => {
+  const suggestions = suggestionsOf(names);
+  return (
+    <>
+      {FORM_PARTS.map(({ title, fields }) => (
+        <div key={title}>
+          {before[title]}
+          <fieldset className="min-w-0 border-t-2 border-ink pt-3 pb-6">
+            <legend className="float-left mb-3 w-full text-lg font-semibold">{title}</legend>
+            <div className="clear-both grid gap-x-6 gap-y-4 sm:grid-cols-2">
+              {fields.map((field) => (
+                <FieldInput
+                  key={field}
+                  field={field}
+                  value={field === 'technician' && ownName ? ownName : texts[field]}
+                  onChange={(value) => onChange(field, value)}
+                  error={errors[field]}
+                  suggestions={suggestions[field]}
+                  readOnly={field === 'technician' && ownName !== undefined}
+                />
+              ))}
+            </div>
+          </fieldset>
+        </div>
+      ))}
+    </>
+  );
+};
