@@ -47,9 +47,9 @@ export const ChoiceEditor = ({ dimension, choices, selected, onApply, close }: C
   };
 
   return (
-    <Command shouldFilter={false} label={words.all} className="flex min-h-0 flex-col" loop>
+    <Command shouldFilter={false} label={words.many} className="flex min-h-0 flex-col" loop>
       <p id={labelId} className="sr-only">
-        {words.all}
+        {words.many}
       </p>
       <Command.Input
         value={typed}
@@ -84,7 +84,7 @@ export const ChoiceEditor = ({ dimension, choices, selected, onApply, close }: C
           Show
         </Button>
         <Button className="flex-1" onClick={() => apply([])}>
-          {words.all.replace(/^a/, 'A')}
+          All
         </Button>
       </div>
     </Command>

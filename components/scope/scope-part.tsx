@@ -11,6 +11,10 @@ type ScopePartProps = {
   label: string;
   /** The words in the sentence. */
   children: ReactNode;
+  /** The stop behind the words, which must not begin a line of its own. */
+  stop?: string;
+  /** Wider than the usual popover. */
+  wide?: boolean;
   /** The words say something that the records do not know. */
   doubtful?: boolean;
   /** What stands in the opened part; `close` puts it away. */
@@ -18,7 +22,7 @@ type ScopePartProps = {
 };
 
 /** One part of the sentence, set in place: beside the word on a wide window, in a sheet from the bottom on a phone. */
-export const ScopePart = ({ label, children, doubtful = false, editor }: ScopePartProps) => {
+export const ScopePart = ({ label, children, stop = '', wide = false, doubtful = false, editor }: ScopePartProps) => {
   const [open, setOpen] = useState(false);
   const narrow = useNarrow();
   const close = () => setOpen(false);
@@ -27,12 +31,19 @@ export const ScopePart = ({ label, children, doubtful = false, editor }: ScopePa
       type="button"
       onClick={narrow ? () => setOpen(true) : undefined}
       aria-haspopup="dialog"
-      className={clsx(
-        'inline border-b-[1.5px] border-dotted border-ink-3 pb-px text-left font-semibold text-ink hover:border-solid hover:border-act hover:text-act pointer-coarse:py-1.5',
-        doubtful && 'marked',
-      )}
+      className="group relative inline text-left font-semibold text-ink pointer-coarse:py-1.5 pointer-coarse:after:absolute pointer-coarse:after:-inset-y-1 pointer-coarse:after:inset-x-0"
     >
-      {children}
+      <span
+        className={clsx(
+          'border-b-[1.5px] border-dotted border-ink-3 pb-px group-hover:border-solid group-hover:border-act',
+          doubtful ? 'marked' : 'group-hover:text-act',
+        )}
+      >
+        {children}
+      </span>
+      <span aria-hidden="true" className="font-normal text-ink-2">
+        {stop}
+      </span>
     </button>
   );
   if (narrow) {
@@ -46,7 +57,7 @@ export const ScopePart = ({ label, children, doubtful = false, editor }: ScopePa
     );
   }
   return (
-    <Popover open={open} onOpenChange={setOpen} trigger={word} label={label} className="p-4">
+    <Popover open={open} onOpenChange={setOpen} trigger={word} label={label} className={clsx('p-4', wide && 'w-96')}>
       {editor(close)}
     </Popover>
   );

@@ -70,17 +70,19 @@ export const ScopeSentence = ({ subject = 'Recoveries', actions }: ScopeSentence
           <span key={dimension}>
             {PLACES[dimension].before}{' '}
             <ScopePart
-              label={DIMENSION_WORDS[dimension].all}
+              label={DIMENSION_WORDS[dimension].many}
               editor={editorOf(dimension)}
+              stop=","
               doubtful={isUnknown(dimension)}
             >
               {choicePhrase(dimension, scope[dimension])}
-            </ScopePart>
-            ,{' '}
+            </ScopePart>{' '}
           </span>
         ))}
         <ScopePart
           label="Period"
+          stop=","
+          wide
           doubtful={doubtfulPeriod}
           editor={(close) => (
             <PeriodEditor
@@ -92,15 +94,15 @@ export const ScopeSentence = ({ subject = 'Recoveries', actions }: ScopeSentence
           )}
         >
           {periodPhrase(scope)}
-        </ScopePart>
-        , in{' '}
+        </ScopePart>{' '}
+        in{' '}
         <ScopePart
           label="Unit of mass"
+          stop="."
           editor={(close) => <UnitEditor unit={scope.unit} onApply={(unit) => setScope({ unit })} close={close} />}
         >
           {UNIT_NAMES[scope.unit]}
         </ScopePart>
-        .
       </p>
       <div className="flex flex-wrap items-baseline gap-x-5 text-sm print:hidden">
         <MoreConditions dimensions={offered.filter((dimension) => !spoken.includes(dimension))} editorOf={editorOf} />

@@ -4,13 +4,18 @@ import { formatDay, formatDesignation, formatList, formatMonth } from '@/lib/for
 import { CATEGORY_NAMES, JOB_TYPE_NAMES } from '@/lib/wording';
 
 /** How one dimension is spoken of: what all of it is called, what a record without it is called. */
-export const DIMENSION_WORDS: Record<Dimension, { one: string; all: string; unstated: string }> = {
-  branch: { one: 'branch', all: 'all branches', unstated: 'no branch stated' },
-  refrigerant: { one: 'refrigerant', all: 'all refrigerants', unstated: 'no refrigerant stated' },
-  technician: { one: 'technician', all: 'all technicians', unstated: 'no technician stated' },
-  site: { one: 'site', all: 'all sites', unstated: 'no site stated' },
-  category: { one: 'appliance category', all: 'all appliance categories', unstated: 'no category stated' },
-  jobType: { one: 'job type', all: 'all job types', unstated: 'no job type stated' },
+export const DIMENSION_WORDS: Record<Dimension, { one: string; many: string; all: string; unstated: string }> = {
+  branch: { one: 'branch', many: 'Branches', all: 'all branches', unstated: 'no branch stated' },
+  refrigerant: { one: 'refrigerant', many: 'Refrigerants', all: 'all refrigerants', unstated: 'no refrigerant stated' },
+  technician: { one: 'technician', many: 'Technicians', all: 'all technicians', unstated: 'no technician stated' },
+  site: { one: 'site', many: 'Sites', all: 'all sites', unstated: 'no site stated' },
+  category: {
+    one: 'appliance category',
+    many: 'Appliance categories',
+    all: 'all appliance categories',
+    unstated: 'no category stated',
+  },
+  jobType: { one: 'job type', many: 'Job types', all: 'all job types', unstated: 'no job type stated' },
 };
 
 const CLOSED_LISTS: Partial<Record<Dimension, Record<string, string>>> = {

@@ -6,7 +6,7 @@ const PAPER = `M204 56${teeth(14, 1)}V262${teeth(14, -1)}z`;
 
 const Cylinder = () => (
   <g>
-    <path d="M44 64V30h10v18h58V30h10v34z" fill="#dfe5e7" />
+    <path d="M44 64V30h10v18h58V30h10v34z" fill="#8b979c" />
     <path d="M76 24h14v28H76z" fill="#b9c3c6" />
     <path d="M58 27h18v7H58z" fill="#2b6ea3" />
     <path d="M90 36h18v7H90z" fill="#b3121d" />

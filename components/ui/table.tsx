@@ -12,12 +12,14 @@ type TableProps = Omit<ComponentProps<'table'>, 'children'> & {
  * headers.
  */
 export const Table = ({ label, className, children, ...rest }: TableProps) => (
+  // A group, not a landmark: the sheet around it is one already.
+  // biome-ignore lint/a11y/useSemanticElements: a fieldset is for controls.
   // biome-ignore lint/a11y/noNoninteractiveTabindex: what scrolls must be reachable by keyboard (WCAG 2.1.1).
-  <section aria-label={label} tabIndex={0} className="relative overflow-x-auto print:overflow-visible">
+  <div role="group" aria-label={label} tabIndex={0} className="relative overflow-x-auto print:overflow-visible">
     <table
       className={clsx(
         'w-full border-collapse text-[0.9375rem]',
-        'max-md:[&_tr>*:first-child]:sticky max-md:[&_tr>*:first-child]:left-0 max-md:[&_tr>*:first-child]:z-10 max-md:[&_tr>*:first-child]:bg-sheet',
+        'max-md:[&_tr>*:first-child]:sticky max-md:[&_tr>*:first-child]:left-0 max-md:[&_tr>*:first-child]:z-10 max-md:[&_tr>*:first-child]:min-w-24 max-md:[&_tr>*:first-child]:bg-sheet max-md:[&_tr>*:first-child]:pr-3',
         '[&_tbody_tr:last-child>*]:border-b-0 [&_tr>*:first-child]:pl-0 [&_tr>*:last-child]:pr-0',
         className,
       )}
@@ -25,7 +27,7 @@ export const Table = ({ label, className, children, ...rest }: TableProps) => (
     >
       {children}
     </table>
-  </section>
+  </div>
 );
 
 type CellProps = { numeric?: boolean };
