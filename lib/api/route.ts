@@ -33,7 +33,7 @@ const refuseForeignOrigin = (request: Request) => {
   if (request.method === 'GET' || request.method === 'HEAD') return;
   const origin = request.headers.get('origin');
   const own = [new URL(env().NEXTAUTH_URL).host, request.headers.get('host')];
-  if (!origin || !own.includes(URL.parse(origin)?.host ?? ''))
+  if (!origin || !URL.canParse(origin) || !own.includes(new URL(origin).host))
     throw new AppError(403, 'Foreign origin', 'Writes are taken only from this site’s own pages.');
 };
 

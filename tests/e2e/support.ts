@@ -9,8 +9,11 @@ type SignIn = { role: string; email: string; password: string };
 /** The demo's people, as `npm start` prints them. */
 const SIGN_INS: SignIn[] = JSON.parse(process.env.E2E_SIGN_INS ?? '[]');
 
-/** How a role signs in; `two firms` is a person in both demo companies. */
-export const signInOf = (role: Role | 'two firms'): SignIn => {
+/** A role of the demo company, somebody in both demo companies, or the manager of a company without a record. */
+export type Who = Role | 'two firms' | 'newcomer';
+
+/** How somebody signs in. */
+export const signInOf = (role: Who): SignIn => {
   const found = SIGN_INS.find((one) => one.role === role);
   if (!found) throw new Error(`The demo has no ${role}: run the browser tests by npm test -- e2e.`);
   return found;
@@ -27,13 +30,13 @@ const watch = (page: Page): string[] => {
 };
 
 type State = Awaited<ReturnType<typeof signInByRequest>>;
-type Options = { role: Role | 'two firms' | null; faults: string[] };
+type Options = { role: Who | null; faults: string[] };
 
 /**
  * A test whose browser is signed in as `role` from the start (`test.use({ role })`), and which fails when the browser's
  * console has anything to complain about. A test that expects a refusal empties `faults` itself.
  */
-export const test = base.extend<Options, { stateOf: (role: Role | 'two firms') => Promise<State> }>({
+export const test = base.extend<Options, { stateOf: (role: Who) => Promise<State> }>({
   role: [null, { option: true }],
   stateOf: [
     async ({ playwright }, use) => {

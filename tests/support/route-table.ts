@@ -91,6 +91,7 @@ export const ROUTES: Record<string, RouteRule> = {
     colleagues: otherRecoveryId,
     status: 200,
   },
+  'GET /api/recoveries/names': { action: 'records:write', status: 200 },
   'GET /api/scope-options': {
     action: 'records:read',
     status: 200,

@@ -5,6 +5,7 @@ import { openThrowAway, type ThrowAway } from '@/db/cluster/throw-away';
 import { installDebianPackages } from '@/lib/debian';
 import { freePort } from '@/lib/ports';
 import { DEMO_SIGN_INS, seedDemoIfEmpty } from '@/seed/demo';
+import { addEmptyCompany } from '@/tests/support/browser-company';
 import { buildIfChanged } from '../build';
 import { runNode } from '../children';
 import { enter, say, serverEnvironment } from '../local';
@@ -19,7 +20,9 @@ const reportSchema = z.object({
   stats: z.object({ expected: z.number(), unexpected: z.number(), flaky: z.number(), skipped: z.number() }),
 });
 
-const runPlaywright = async (address: string, args: string[]): Promise<Tally> => {
+type SignIn = (typeof DEMO_SIGN_INS)[number];
+
+const runPlaywright = async (address: string, signIns: SignIn[], args: string[]): Promise<Tally> => {
   const file = reportFile('browser');
   const { code } = await runNode(['node_modules/@playwright/test/cli.js', 'test', ...args], {
     show: true,
@@ -27,7 +30,7 @@ const runPlaywright = async (address: string, args: string[]): Promise<Tally> =>
       ...process.env,
       E2E_ADDRESS: address,
       E2E_CHROMIUM: CHROMIUM,
-      E2E_SIGN_INS: JSON.stringify(DEMO_SIGN_INS),
+      E2E_SIGN_INS: JSON.stringify(signIns),
       PLAYWRIGHT_JSON_OUTPUT_FILE: file,
     },
   });
@@ -42,6 +45,7 @@ const againstServer = async (database: ThrowAway, args: string[]): Promise<Tally
   const opened = { ...database, cluster: null };
   enter(opened);
   await seedDemoIfEmpty(database.urls, say);
+  const signIns = [...DEMO_SIGN_INS, await addEmptyCompany()];
   const port = await freePort();
   await buildIfChanged(serverEnvironment(opened, `http://127.0.0.1:${port}`));
   const log = openSync(join(database.folder, 'server.log'), 'w');
@@ -49,7 +53,7 @@ const againstServer = async (database: ThrowAway, args: string[]): Promise<Tally
   const end = () => served.process.kill('SIGTERM');
   process.on('exit', end);
   try {
-    return await runPlaywright(served.address, args);
+    return await runPlaywright(served.address, signIns, args);
   } finally {
     process.off('exit', end);
     end();
