@@ -41,12 +41,11 @@ export const betaBinomial = (hits: readonly number[], trials: readonly number[])
     const share = 1 / (1 + Math.exp(-logit));
     return [precision * share, precision * (1 - share)];
   };
+  const constant = sum(pairs.map((pair) => logChoose(pair.trials, pair.hits)));
   const logLikelihood = (logit: number, precision: number): number => {
     const [a, b] = shapes(logit, precision);
-    const own = pairs.map(
-      (pair) => logChoose(pair.trials, pair.hits) + logBeta(a + pair.hits, b + pair.trials - pair.hits),
-    );
-    return sum(own) - pairs.length * logBeta(a, b);
+    const own = pairs.map((pair) => logBeta(a + pair.hits, b + pair.trials - pair.hits));
+    return constant + sum(own) - pairs.length * logBeta(a, b);
   };
   const fit = fitPrior(logLikelihood, Math.log(mean / (1 - mean)));
   const [a, b] = shapes(fit.centre, fit.precision);

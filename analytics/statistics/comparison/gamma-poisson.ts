@@ -30,16 +30,16 @@ export const gammaPoisson = (observed: readonly number[], expected: readonly num
   const excess = sum(pairs.map((pair) => (pair.count - mean * pair.expected) ** 2 - pair.count));
   if (excess <= 0) return enough({ spread: 'none beyond chance', mean });
 
+  const constant = sum(pairs.map((pair) => logGamma(pair.count + 1)));
   const logLikelihood = (logMean: number, shape: number): number => {
     const rate = shape / Math.exp(logMean);
     const own = pairs.map(
       (pair) =>
         logGamma(shape + pair.count) -
-        logGamma(pair.count + 1) -
         shape * Math.log1p(pair.expected / rate) +
         pair.count * Math.log(pair.expected / (rate + pair.expected)),
     );
-    return sum(own) - pairs.length * logGamma(shape);
+    return sum(own) - pairs.length * logGamma(shape) - constant;
   };
   const fit = fitPrior(logLikelihood, Math.log(mean));
   const shape = fit.precision;
