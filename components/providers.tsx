@@ -1,6 +1,6 @@
 'use client';
 
-import { QueryClient, QueryClientProvider } from '@tanstack/react-query';
+import { QueryCache, QueryClient, QueryClientProvider } from '@tanstack/react-query';
 import { ThemeProvider } from 'next-themes';
 import { NuqsAdapter } from 'nuqs/adapters/next/app';
 import { type ReactNode, useState } from 'react';
@@ -11,8 +11,16 @@ const MOST_TRIES = 2;
 // A refusal stays one however often it is asked; a lost connection or a fault of the server may pass.
 const mayPass = (error: Error) => !(error instanceof ApiError) || error.status === 0 || error.status >= 500;
 
+// A session that was ended elsewhere: the door leads back here.
+const leaveWhenSignedOut = (error: Error) => {
+  if (!(error instanceof ApiError) || error.status !== 401) return;
+  const here = `${window.location.pathname}${window.location.search}`;
+  window.location.assign(`/sign-in?next=${encodeURIComponent(here)}`);
+};
+
 const makeQueryClient = () =>
   new QueryClient({
+    queryCache: new QueryCache({ onError: leaveWhenSignedOut }),
     defaultOptions: {
       queries: {
         staleTime: 30_000,
