@@ -106,7 +106,7 @@ export const ScopeSentence = ({ subject = 'Recoveries', actions }: ScopeSentence
       </p>
       <div className="flex flex-wrap items-baseline gap-x-5 text-sm print:hidden">
         <MoreConditions dimensions={offered.filter((dimension) => !spoken.includes(dimension))} editorOf={editorOf} />
-        {narrowed ? <TextButton onClick={() => clear()}>Clear</TextButton> : null}
+        {narrowed ? <TextButton onClick={clear}>Clear</TextButton> : null}
         <CopyLink />
         <TextButton onClick={() => window.print()}>Print</TextButton>
         {actions}

@@ -21,6 +21,17 @@ const PARSERS = {
   unit: parseAsStringLiteral(DISPLAY_UNITS),
 };
 
+const NOTHING_NARROWED = {
+  from: null,
+  to: null,
+  branch: null,
+  refrigerant: null,
+  technician: null,
+  site: null,
+  category: null,
+  jobType: null,
+};
+
 /** Parts of the scope to set; a part set to null goes back to its default. */
 export type ScopePatch = { [Part in keyof ScopeSelection]?: ScopeSelection[Part] | null };
 
@@ -45,7 +56,8 @@ export const useScope = () => {
     /** The same as a search string, for links that show this scope to somebody else. */
     search: scopeSearch(scope),
     setScope: (patch: ScopePatch) => setAddress(patch),
-    clear: () => setAddress(null),
+    /** Back to the default period and to everything in it; the unit stays. */
+    clear: () => setAddress(NOTHING_NARROWED),
     /** Whether the address says anything that Clear would take back. */
     narrowed: DIMENSIONS.some((dimension) => scope[dimension].length > 0) || Boolean(address.from || address.to),
   };
