@@ -1,5 +1,6 @@
 import { formatMassWithUnit, formatMonth, formatPercent, plural } from '@/lib/format';
 import type { DisplayUnit } from '@/lib/vocabulary';
+import type { MonthlyTrends } from './contract';
 import { lastWholeMonth, monthsAfter, type StackedMonth, type StackLayer, type Stacks } from './series';
 
 /** A sentence in pieces: text, and one figure that opens the records of its month. */
@@ -64,7 +65,7 @@ const mainPart = (layers: readonly StackLayer[], now: StackedMonth, then: Stacke
  */
 export const trendNotes = (
   { layers, months }: Stacks,
-  { partialMonth, excluded }: { partialMonth: string | null; excluded: number },
+  { by, partialMonth, excluded }: Pick<MonthlyTrends, 'by' | 'partialMonth' | 'excluded'>,
   unit: DisplayUnit,
   nameOf: (key: string) => string,
 ): string[] => {
@@ -73,7 +74,8 @@ export const trendNotes = (
   const before = latest && months.find((month) => month.month === monthsAfter(latest.month, -12));
   if (latest && latest.yearBefore === null) notes.push('There is no year before to compare with yet.');
   const changed = latest?.yearBefore ? Math.abs(latest.recoveredMass / latest.yearBefore - 1) : 0;
-  if (latest && before?.state === 'whole' && changed >= SAME && layers.length > 1) {
+  // A person is not the reason for a month: jobs are handed out, and holidays taken.
+  if (latest && before?.state === 'whole' && changed >= SAME && layers.length > 1 && by !== 'technician') {
     const part = mainPart(layers, latest, before);
     const direction = part && part.own > 0 ? 'more' : 'less';
     if (part)

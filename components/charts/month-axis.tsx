@@ -9,7 +9,7 @@ export const MonthAxis = ({ months, narrow }: { months: readonly string[]; narro
   if (!band) return null;
   const ticked = tickedMonths(months, band.step, narrow);
   const onlyYears = ticked.length < months.length / 6;
-  const size = narrow ? 14 : 13;
+  const size = narrow ? 14 : 12.5;
   return (
     <g fill="var(--ink-2)" fontSize={size} textAnchor="middle">
       <line x1={band.left} x2={band.right} y1={band.bottom} y2={band.bottom} stroke="var(--ink)" strokeWidth={1.5} />

@@ -15,17 +15,17 @@ export const MonthOverlay = ({ months, active, onPoint }: MonthOverlayProps) => 
   if (!band) return null;
   const { width, step, top, bottom, yOf } = band;
   const beyond = Math.min(3, (step - width) / 2);
-  const steps = months
-    .filter((month) => month.yearBefore !== null)
-    .map((month) => {
-      const x = band.xOf(month.month);
-      return `M${x - beyond} ${yOf(month.yearBefore ?? 0)}H${x + width + beyond}`;
-    })
-    .join('');
+  const steps = months.map(({ month, yearBefore }, index) => {
+    if (yearBefore === null) return '';
+    const joined = (months[index - 1]?.yearBefore ?? null) !== null;
+    const x = band.xOf(month);
+    return `${joined ? 'L' : 'M'}${x - beyond} ${yOf(yearBefore)}H${x + width + beyond}`;
+  });
+  const line = steps.join('');
   return (
     <g>
-      <path d={steps} fill="none" stroke="var(--sheet)" strokeWidth={4.5} />
-      <path d={steps} fill="none" stroke="var(--ink)" strokeWidth={1.75} />
+      <path d={line} fill="none" stroke="var(--sheet)" strokeWidth={4} />
+      <path d={line} fill="none" stroke="var(--ink)" strokeWidth={1.5} />
       {months.map(({ month }) => (
         <rect
           key={month}

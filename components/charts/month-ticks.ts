@@ -5,7 +5,7 @@ const isQuarter = (month: string) => ['01', '04', '07', '10'].includes(month.sli
 
 /** Months that get a tick: all of them, quarters or years, by the pixels each month has. */
 export const tickedMonths = (months: readonly string[], pixelsPerMonth: number, narrow: boolean): string[] => {
-  if (pixelsPerMonth >= (narrow ? 16 : 27)) return [...months];
+  if (pixelsPerMonth >= (narrow ? 16 : 25)) return [...months];
   if (pixelsPerMonth >= 10) return months.filter(isQuarter);
   return months.filter(isJanuary);
 };

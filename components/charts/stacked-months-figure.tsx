@@ -9,6 +9,7 @@ import { Loading } from '@/components/ui/states';
 import { formatDesignation, formatMonth } from '@/lib/format';
 import type { ChartLayer, ChartMonth } from './layer';
 import { useMonthCursor } from './use-month-cursor';
+import { useWidth } from './use-width';
 
 const HEIGHT = { wide: 400, narrow: 320 } as const;
 /** A phone shows the last twelve months; the table has them all. */
@@ -40,6 +41,7 @@ export const StackedMonthsFigure = ({ label, layers, months, wordsOf, recordsOf 
   const shown = useMemo(() => (narrow ? months.slice(-NARROW_MONTHS) : months), [narrow, months]);
   const names = useMemo(() => shown.map(({ month }) => month), [shown]);
   const { active, index, setActive, onKeyDown } = useMonthCursor(names, (month) => router.push(recordsOf(month)));
+  const [measured, width] = useWidth();
   const height = narrow ? HEIGHT.narrow : HEIGHT.wide;
   const first = names[0];
   return (
@@ -58,15 +60,18 @@ export const StackedMonthsFigure = ({ label, layers, months, wordsOf, recordsOf 
         style={{ height }}
         className="[&_.visx-bar]:stroke-sheet [&_.visx-bar]:[stroke-width:0.75px] [&_svg]:block [&_svg]:overflow-visible"
       >
-        <div aria-hidden="true" className="h-full">
-          <StackedMonths
-            layers={layers}
-            months={shown}
-            height={height}
-            narrow={narrow}
-            active={active}
-            onPoint={setActive}
-          />
+        <div aria-hidden="true" ref={measured} className="h-full">
+          {width > 0 ? (
+            <StackedMonths
+              layers={layers}
+              months={shown}
+              width={width}
+              height={height}
+              narrow={narrow}
+              active={active}
+              onPoint={setActive}
+            />
+          ) : null}
         </div>
       </div>
       {narrow ? (

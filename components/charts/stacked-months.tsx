@@ -13,6 +13,7 @@ import { chartTheme } from './theme';
 export type StackedMonthsProps = {
   layers: readonly ChartLayer[];
   months: readonly ChartMonth[];
+  width: number;
   height: number;
   /** On a phone: larger type, letters for months, no labels beside the bars. */
   narrow: boolean;
@@ -22,8 +23,17 @@ export type StackedMonthsProps = {
 
 const month = (datum: ChartMonth) => datum.month;
 
+/** Pixels for the names beside the last bar. */
+const LABELS = 136;
+
+const tickText = (value: number, highest: number): string => formatNumber(value, highest < 5 ? 1 : 0);
+
+// The reading face is monospaced: a figure is 0.6 em wide.
+const labelWidth = (highest: number, narrow: boolean): number =>
+  Math.ceil(tickText(Math.max(1, highest * 1.2), highest).length * 0.6 * (narrow ? 14 : 13)) + 14;
+
 /** Bars stacked by month from zero. Draws finished data: it neither fills, sums nor orders. */
-export const StackedMonths = ({ layers, months, height, narrow, active, onPoint }: StackedMonthsProps) => {
+export const StackedMonths = ({ layers, months, width, height, narrow, active, onPoint }: StackedMonthsProps) => {
   const chartId = useId();
   const highest = Math.max(...months.map(({ total, yearBefore }) => Math.max(total, yearBefore ?? 0)));
   // Series register themselves anew whenever they change: pointing at a month must not change them.
@@ -47,8 +57,9 @@ export const StackedMonths = ({ layers, months, height, narrow, active, onPoint 
   const last = months.at(-1);
   return (
     <XYChart
+      width={width}
       height={height}
-      margin={{ top: 12, right: narrow ? 2 : 132, bottom: 44, left: narrow ? 44 : 52 }}
+      margin={{ top: 12, right: narrow ? 2 : LABELS, bottom: 44, left: labelWidth(highest, narrow) }}
       xScale={{ type: 'band', domain: months.map(month), paddingInner: 0.22, paddingOuter: 0.11 }}
       yScale={{ type: 'linear', domain: [0, highest || 1], nice: 5, zero: true }}
       theme={chartTheme}
@@ -62,8 +73,8 @@ export const StackedMonths = ({ layers, months, height, narrow, active, onPoint 
         numTicks={5}
         hideAxisLine
         hideTicks
-        tickFormat={(value: number) => formatNumber(value, highest < 5 ? 1 : 0)}
-        tickLabelProps={{ dx: -2, ...(narrow ? { fontSize: 14 } : {}) }}
+        tickFormat={(value: number) => tickText(value, highest)}
+        tickLabelProps={() => ({ dx: -4, fontSize: narrow ? 14 : 13 })}
       />
       {stack}
       <MonthOverlay months={months} active={active} onPoint={onPoint} />

@@ -38,12 +38,10 @@ export const MonthsTable = ({ stacks: { layers, months }, by, scope, colours }: 
         <Th>Month</Th>
         {layers.map((layer) => (
           <UnitHead key={layer.id} unit={scope.unit}>
-            <span
-              aria-hidden="true"
-              className="mr-1.5 inline-block size-2.5"
-              style={{ background: colours[layer.id] }}
-            />
-            {layerName(by, layer)}
+            <span className="inline-flex items-baseline gap-1.5">
+              <span aria-hidden="true" className="size-2.5 shrink-0" style={{ background: colours[layer.id] }} />
+              {layerName(by, layer)}
+            </span>
           </UnitHead>
         ))}
         <UnitHead unit={scope.unit}>All</UnitHead>

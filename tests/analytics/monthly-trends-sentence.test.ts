@@ -63,6 +63,7 @@ test('names the part that makes most of the difference, and only then', () => {
     ]);
   expect(notes(shift(50, 90))).toEqual(['Most of the difference is R-410A: 40 kg more.']);
   expect(notes(shift(10, 60))).toEqual(['Most of the difference is R-22: 40 kg less.']);
+  expect(notes({ ...shift(50, 90), by: 'technician' })).toEqual([]);
   expect(notes(shift(70, 70))).toEqual([]);
   expect(notes(shift(50, 50))).toEqual([]);
 });
