@@ -69,8 +69,8 @@ export const CorrectionForm = ({ record, onSaved, onCancel }: CorrectionFormProp
         errors={refusal.errors}
         names={names}
         ownName={role === 'technician' ? began.technician : undefined}
+        before={{ 'Vacuum and hold': <LiveYieldLine texts={texts} unit={massUnit} /> }}
       />
-      <LiveYieldLine texts={texts} unit={massUnit} />
       <NewNames texts={texts} fields={unknownNames(texts, names)} confirmed={confirmed} onConfirm={setConfirmed} />
       <Field
         label="Why the record is corrected"

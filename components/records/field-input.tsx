@@ -14,11 +14,19 @@ type FieldInputProps = {
   /** Names that are known; typing another is allowed. */
   suggestions?: readonly string[] | undefined;
   readOnly?: boolean;
+  /** The unit the figure is in, said beside its name. */
+  unit?: string | undefined;
 };
 
 const TALL = 'h-12';
 
-const Control = ({ field, value, onChange, suggestions, readOnly = false }: Omit<FieldInputProps, 'error'>) => {
+const Control = ({
+  field,
+  value,
+  onChange,
+  suggestions,
+  readOnly = false,
+}: Omit<FieldInputProps, 'error' | 'unit'>) => {
   const listId = useId();
   const choices = CHOICES[field];
   if (field === 'recoveredAt') return <WhenInput value={value} onChange={onChange} className={TALL} />;
@@ -61,13 +69,13 @@ const Control = ({ field, value, onChange, suggestions, readOnly = false }: Omit
 };
 
 /** One field of a record with its label, hint and what is wrong with it. */
-export const FieldInput = ({ error, ...rest }: FieldInputProps) => (
+export const FieldInput = ({ error, unit, ...rest }: FieldInputProps) => (
   <Field
-    label={FIELD_LABELS[rest.field]}
+    label={unit ? `${FIELD_LABELS[rest.field]}, ${unit}` : FIELD_LABELS[rest.field]}
     hint={HINTS[rest.field]}
     error={error}
     required={NEEDED.has(rest.field)}
-    className={rest.field === 'notes' ? 'sm:col-span-2' : ''}
+    className={rest.field === 'notes' ? 'sm:col-span-2' : 'sm:justify-end'}
   >
     <Control {...rest} />
   </Field>

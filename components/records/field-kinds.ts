@@ -71,5 +71,5 @@ export const HINTS: Partial<Record<RecordField, string>> = {
   endWeight: 'The same cylinder after it',
   recoveredMass: 'Leave empty when both weights are there',
   holdMinutes: 'The wait after pull-down',
-  holdRise: 'Pressure regained while waiting, in the same unit',
+  holdRise: 'Pressure regained while waiting',
 };

@@ -12,14 +12,14 @@ export const LiveYieldLine = ({ texts, unit }: { texts: RecordTexts; unit: Displ
   const live = liveYield(texts);
   return (
     <div aria-live="polite" className="mb-5">
-      <p className="flex flex-wrap items-baseline justify-between gap-x-6 border-y-2 border-ink py-2 font-mono">
+      <p className="flex items-baseline justify-between gap-6 border-y-2 border-ink py-2 font-mono">
         <span className="text-sm text-ink-2">
           {live.recoveredMassKg === null
             ? 'The recovered mass follows from the weights'
             : `${formatMassWithUnit(live.recoveredMassKg, unit, 2)} recovered`}
           {live.fullChargeKg === null ? '' : ` of ${formatMassWithUnit(live.fullChargeKg, unit, 2)}`}
         </span>
-        <span className="text-xl font-medium">{live.yield === null ? '—' : formatPercent(live.yield)}</span>
+        <span className="shrink-0 text-xl font-medium">{live.yield === null ? '—' : formatPercent(live.yield)}</span>
       </p>
       {live.yield !== null && live.yield > DOUBTFUL_YIELD ? (
         <Notice tone="warning" title="More than the full charge" className="mt-3">

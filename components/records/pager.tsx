@@ -23,17 +23,18 @@ export const Pager = ({ list, limit, onPage, onLimit }: PagerProps) => (
         Next page →
       </Button>
     </div>
-    <Select
-      aria-label="Records a page"
-      value={limit}
-      onChange={(event) => onLimit(PAGE_SIZES.find((size) => size === Number(event.target.value)) ?? PAGE_SIZES[0])}
-      className="w-auto"
-    >
-      {PAGE_SIZES.map((size) => (
-        <option key={size} value={size}>
-          {size} a page
-        </option>
-      ))}
-    </Select>
+    <div className="w-36">
+      <Select
+        aria-label="Records a page"
+        value={limit}
+        onChange={(event) => onLimit(PAGE_SIZES.find((size) => size === Number(event.target.value)) ?? PAGE_SIZES[0])}
+      >
+        {PAGE_SIZES.map((size) => (
+          <option key={size} value={size}>
+            {size} a page
+          </option>
+        ))}
+      </Select>
+    </div>
   </nav>
 );

@@ -3,7 +3,7 @@
 import type { RecordDetail } from '@/analytics/records/contract';
 import { formatDay, formatNumber } from '@/lib/format';
 import { FIELD_LABELS, type RecordField } from '@/lib/recoveries/fields';
-import { fieldValue } from './wording';
+import { fieldValue, RISE_UNIT_NAMES, VACUUM_UNIT_NAMES } from './wording';
 
 const SHOWN: readonly RecordField[] = [
   'technician',
@@ -29,9 +29,11 @@ const factOf = (record: RecordDetail, field: RecordField): string => {
   if (field === 'manufacturedOn') return formatDay(text);
   if (field === 'holdMinutes') return `${text} min`;
   if (field !== 'finalVacuum' && field !== 'holdRise') return fieldValue(field, text);
-  const unit = fieldValue('vacuumUnit', record.vacuumUnit ?? '');
-  const kpa = field === 'finalVacuum' ? record.finalVacuumKpaAbs : null;
-  return `${text} ${unit}${kpa === null || record.vacuumUnit === 'kpa_abs' ? '' : ` (${formatNumber(kpa, 2)} kPa absolute)`}`;
+  const { vacuumUnit, finalVacuumKpaAbs: kpa } = record;
+  if (!vacuumUnit) return text;
+  if (field === 'holdRise') return `${text} ${RISE_UNIT_NAMES[vacuumUnit]}`;
+  const absolute = kpa === null || vacuumUnit === 'kpa_abs' ? '' : ` (${formatNumber(kpa, 2)} kPa absolute)`;
+  return `${text} ${VACUUM_UNIT_NAMES[vacuumUnit]}${absolute}`;
 };
 
 const Fact = ({ label, value }: { label: string; value: string }) => (

@@ -2,9 +2,10 @@
 
 import type { ReactNode } from 'react';
 import type { KnownNames } from '@/analytics/records/known-names-contract';
-import type { RecordField, RecordTexts } from '@/lib/recoveries/fields';
+import { MASS_FIELDS, type RecordField, type RecordTexts } from '@/lib/recoveries/fields';
 import { FieldInput } from './field-input';
 import { FORM_PARTS } from './field-kinds';
+import { fieldValue } from './wording';
 
 type RecordFieldsProps = {
   texts: RecordTexts;
@@ -29,6 +30,15 @@ const suggestionsOf = (names: KnownNames | undefined): Partial<Record<RecordFiel
       }
     : {};
 
+const MASSES: readonly RecordField[] = MASS_FIELDS;
+
+const unitOf = (field: RecordField, { massUnit, vacuumUnit }: RecordTexts): string | undefined => {
+  if (MASSES.includes(field)) return massUnit;
+  return field === 'finalVacuum' || field === 'holdRise'
+    ? vacuumUnit && fieldValue('vacuumUnit', vacuumUnit)
+    : undefined;
+};
+
 /** All fields of a record in the order of the work. */
 export const RecordFields = ({ texts, onChange, errors, names, ownName, before = {} }: RecordFieldsProps) => {
   const suggestions = suggestionsOf(names);
@@ -48,6 +58,7 @@ export const RecordFields = ({ texts, onChange, errors, names, ownName, before =
                   onChange={(value) => onChange(field, value)}
                   error={errors[field]}
                   suggestions={suggestions[field]}
+                  unit={unitOf(field, texts)}
                   readOnly={field === 'technician' && ownName !== undefined}
                 />
               ))}

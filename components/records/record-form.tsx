@@ -62,9 +62,11 @@ export const RecordForm = ({ empty, ownName }: RecordFormProps) => {
         errors={refusal.errors}
         names={names}
         ownName={ownName}
-        before={{ 'The scale': <Cautions /> }}
+        before={{
+          'The scale': <Cautions />,
+          'Vacuum and hold': <LiveYieldLine texts={texts} unit={viewer.massUnit} />,
+        }}
       />
-      <LiveYieldLine texts={texts} unit={viewer.massUnit} />
       <NewNames texts={texts} fields={unknown} confirmed={confirmed} onConfirm={setConfirmed} />
       <FaultSummary {...refusal} />
       <Button type="submit" tone="primary" disabled={sending} className="min-h-12 w-full sm:w-auto sm:px-8">

@@ -28,7 +28,7 @@ export const RecordTicket = ({ record }: { record: RecordDetail }) => {
     weight('Nameplate charge', record.nameplateCharge, 'nameplateCharge'),
     ...(record.addedCharge ? [weight('Added charge', record.addedCharge, 'addedCharge')] : []),
     { label: 'Full charge', value: formatMassWithUnit(record.fullCharge, unit, 2) },
-    { label: 'Yield', value: formatPercent(record.yield, 1), small: 'recovered over full charge' },
+    { label: 'Yield', value: formatPercent(record.yield, 1) },
   ];
   return (
     <Ticket

@@ -18,6 +18,15 @@ export const VACUUM_UNIT_NAMES: Record<VacuumUnit, string> = {
   micron: 'microns',
 };
 
+/** Units of a difference of pressure: a rise has no zero to count from. */
+export const RISE_UNIT_NAMES: Record<VacuumUnit, string> = {
+  inhg: 'inHg',
+  psig: 'psi',
+  mmhg_abs: 'mm Hg',
+  kpa_abs: 'kPa',
+  micron: 'microns',
+};
+
 /** How the order of the table is said: `newest first`. */
 export const ORDER_WORDS: Record<SortKey, readonly [ascending: string, descending: string]> = {
   recoveredOn: ['oldest first', 'newest first'],

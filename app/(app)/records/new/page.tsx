@@ -27,7 +27,7 @@ export default async function NewRecordPage() {
       <PageHead
         className="mb-5"
         title="Write down one recovery"
-        sub="What the scale and the gauge said, in the units they said it."
+        sub="Ref, day, technician, site, appliance, refrigerant, nameplate and weights are needed; what is not known may stay empty."
       />
       <RecordForm empty={empty} ownName={own ?? undefined} />
     </>
