@@ -11,7 +11,7 @@ export const ImportProgress = ({ view }: { view: ImportView }) => {
         aria-label={importSentence(view)}
         max={1}
         {...(rowsTotal && rowsRead ? { value: share } : {})}
-        className="h-3 w-full accent-shoulder"
+        className="h-4 w-full appearance-none border border-edge bg-sheet-2 [&::-moz-progress-bar]:bg-shoulder [&::-webkit-progress-bar]:bg-sheet-2 [&::-webkit-progress-value]:bg-shoulder"
       />
       <p className="mt-2 text-ink-2">
         {dryRun ? 'No record is changed by this.' : 'You may leave this page; the work goes on.'}

@@ -14,7 +14,7 @@ export const OutcomeCounts = ({ view }: { view: ImportView }) => {
       {counts.map(([label, count]) => (
         <div key={label} className="flex flex-col-reverse bg-sheet px-4 py-3 sm:px-6">
           <dt className="text-sm text-ink-2">{label}</dt>
-          <dd className="font-mono text-xl font-semibold tabular-nums">{formatCount(count)}</dd>
+          <dd className="text-xl font-semibold tabular-nums">{formatCount(count)}</dd>
         </div>
       ))}
     </dl>

@@ -1,56 +1,55 @@
 import { Sheet } from '@/components/ui/sheet';
-import { Table, Td, Th } from '@/components/ui/table';
-import { formatCount } from '@/lib/format';
-import type { ImportView } from '@/lib/imports/contract';
+import { formatCount, plural } from '@/lib/format';
+import type { ImportSummary, ImportView } from '@/lib/imports/contract';
 import { refusedRowsPath } from './import-api';
+import { reasonTitle } from './reason-titles';
+
+type Reason = ImportSummary['rejectedByReason'][number];
 
 const quoted = (value: string) => (value === '' ? 'empty' : `“${value}”`);
 
+const RefusedGroup = ({ reason }: { reason: Reason }) => {
+  const title = reasonTitle(reason.code);
+  return (
+    <li className="grid gap-x-6 gap-y-1 border-b border-rule-2 py-3 last:border-b-0 md:grid-cols-[minmax(0,2fr)_minmax(0,1.2fr)]">
+      <div className="min-w-0">
+        <p className="font-semibold">{title ?? reason.message}</p>
+        <p className="break-words text-ink-2">
+          {plural(reason.count, 'row', 'rows')}
+          {reason.column ? ` in ${reason.column}` : ''}
+        </p>
+        {title ? <p className="mt-1 max-w-prose text-sm break-words text-ink-2">{reason.message}</p> : null}
+      </div>
+      <ul className="min-w-0 text-[0.9375rem]">
+        {reason.examples.map(({ line, recordRef, value }) => (
+          <li key={line} className="break-words">
+            line {formatCount(line)}
+            {recordRef ? `, ${recordRef}` : ''}: {quoted(value)}
+          </li>
+        ))}
+      </ul>
+    </li>
+  );
+};
+
 /** Refused rows by reason, with examples, and the file in which each has its reason. */
 export const RefusedRows = ({ view }: { view: ImportView }) => {
-  const reasons = view.summary?.rejectedByReason ?? [];
   if (view.rejected === 0) return null;
   return (
     <Sheet
       title="Refused rows"
-      aside={`${formatCount(view.rejected)} of ${formatCount(view.rowsRead)} rows`}
+      aside={`${formatCount(view.rejected)} of ${plural(view.rowsRead, 'row', 'rows')}`}
       tools={
         <a className="link" href={refusedRowsPath(view.id)} download>
           Download refused rows
         </a>
       }
     >
-      <Table label="Refused rows by reason">
-        <thead>
-          <tr>
-            <Th>Column</Th>
-            <Th numeric>Rows</Th>
-            <Th>Reason</Th>
-            <Th>For example</Th>
-          </tr>
-        </thead>
-        <tbody>
-          {reasons.map((reason) => (
-            <tr key={`${reason.code} ${reason.column ?? ''}`}>
-              <Th scope="row" className="max-w-40 align-top break-words">
-                {reason.column ?? 'whole row'}
-              </Th>
-              <Td numeric className="align-top">
-                {formatCount(reason.count)}
-              </Td>
-              <Td className="min-w-56 align-top">{reason.message}</Td>
-              <Td className="min-w-56 align-top">
-                {reason.examples.map(({ line, recordRef, value }) => (
-                  <span key={line} className="block break-words">
-                    line {formatCount(line)}
-                    {recordRef ? `, ${recordRef}` : ''}: {quoted(value)}
-                  </span>
-                ))}
-              </Td>
-            </tr>
-          ))}
-        </tbody>
-      </Table>
+      <ul className="border-t-2 border-ink">
+        {view.summary?.rejectedByReason.map((reason) => (
+          <RefusedGroup key={`${reason.code} ${reason.column ?? ''}`} reason={reason} />
+        ))}
+      </ul>
       <p className="mt-3 max-w-prose text-sm text-ink-2">
         A row can have several reasons. Mend the downloaded file and hand it in again: rows that came in before stay as
         they are.

@@ -21,9 +21,9 @@ export const UndoImport = ({ view, undo }: UndoImportProps) => {
   return (
     <Notice tone="warning" title="Undo this import?" className="w-full">
       <p>
-        {plural(view.added, 'record', 'records')} that came with it {view.added === 1 ? 'goes' : 'go'}, and{' '}
-        {plural(view.updated, 'changed record gets its', 'changed records get their')} former values back. Records that
-        somebody edited since are kept and listed. The history keeps all of it.
+        {view.added ? `${plural(view.added, 'record that came with it goes', 'records that came with it go')}. ` : ''}
+        {view.updated ? `${plural(view.updated, 'record gets its', 'records get their')} former values back. ` : ''}
+        Records that somebody edited since are kept and listed. The history keeps all of it.
       </p>
       <div className="mt-3 flex flex-wrap gap-3">
         <Button

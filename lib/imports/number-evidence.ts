@@ -38,7 +38,8 @@ export class NumberEvidence {
     if (point.count > 0 === comma.count > 0) return null;
     const value = point.count > 0 ? 'point' : 'comma';
     const { count, example } = this.proofs[value];
-    return { value, evidence: `${countText(count)} numbers have a ${NAME[value]}, as in “${example}”.` };
+    const numbers = count === 1 ? 'One number has' : `${countText(count)} numbers have`;
+    return { value, evidence: `${numbers} a ${NAME[value]}, as in “${example}”.` };
   }
 
   /** Whether the column's numbers read the same either way. */
