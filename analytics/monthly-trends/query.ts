@@ -1,13 +1,14 @@
 import 'server-only';
 import { and, eq, isNull, sql } from 'drizzle-orm';
-import { factFigures, toGram } from '@/analytics/figures';
+import { toGram } from '@/analytics/figures';
 import type { Dimension, Scope } from '@/analytics/scope';
 import { FACT_COLUMNS, inScope } from '@/analytics/scope-query';
 import type { Tx } from '@/db/client';
 import { recoveryFacts as f } from '@/db/views/recovery-facts';
 import { lowRecoveries as low } from '@/db/views/yield-limits';
 import type { MonthlyTrends, MonthlyTrendsQuery } from './contract';
-import { answeredByMonth, cutMonths, partialMonth, yearBeforeScope } from './range';
+import { sumsByMonth, sumsByRecord } from './months';
+import { answeredByMonth, cutMonths, partialMonth, summedByMonth, yearBeforeScope } from './range';
 import { keyOf, rowsByMonth, rowsByRecord } from './rows';
 import { monthsAfter } from './series';
 
@@ -21,15 +22,6 @@ const countFlagged = (tx: Tx, scope: Scope, by: Dimension) =>
     .innerJoin(f, and(eq(f.companyId, low.companyId), eq(f.id, low.recoveryId)))
     .where(inScope(scope))
     .groupBy(f.month, FACT_COLUMNS[by]);
-
-/** Figures over all keys by month, and of the whole scope: the row without a month. */
-const sumMonths = (tx: Tx, scope: Scope) =>
-  tx
-    .select({ month: sql<string | null>`${f.month}`, ...factFigures })
-    .from(f)
-    .where(inScope(scope))
-    .groupBy(sql`rollup(${f.month})`)
-    .orderBy(f.month);
 
 const massByMonth = (tx: Tx, scope: Scope) =>
   tx
@@ -54,7 +46,7 @@ export const getMonthlyTrends = async (
   { now, timeZone }: { now: Date; timeZone: string },
 ): Promise<MonthlyTrends> => {
   const grouped = await (answeredByMonth(scope, by) ? rowsByMonth : rowsByRecord)(tx, scope, by);
-  const sums = await sumMonths(tx, scope);
+  const sums = await (summedByMonth(scope) ? sumsByMonth : sumsByRecord)(tx, scope);
   const flags = await countFlagged(tx, scope, by);
   const beforeScope = yearBeforeScope(scope);
   const before = beforeScope ? await massByMonth(tx, beforeScope) : [];
@@ -65,7 +57,7 @@ export const getMonthlyTrends = async (
   for (const row of flags)
     flaggedByMonth.set(toMonth(row.month), (flaggedByMonth.get(toMonth(row.month)) ?? 0) + row.flagged);
 
-  const months = sums.flatMap(({ month, medianYield, totalYield, excluded: _, fullCharge: __, ...figures }) =>
+  const months = sums.flatMap(({ month, medianYield, totalYield, excluded: _, ...figures }) =>
     month === null || medianYield === null || totalYield === null
       ? []
       : [{ ...figures, month: toMonth(month), medianYield, totalYield }],

@@ -5,11 +5,16 @@ import { monthsAfter } from './series';
 const monthOf = (day: string): string => day.slice(0, 7);
 const startsMonth = (day: string): boolean => day.endsWith('-01');
 
+const wholeMonths = (scope: Scope): boolean =>
+  (!scope.from || startsMonth(firstDay(scope.from))) && (!scope.to || startsMonth(dayAfter(scope.to)));
+
 /** Whether views that are summed by month can answer: whole months, narrowed by nothing but the split dimension. */
 export const answeredByMonth = (scope: Scope, by: Dimension): boolean =>
-  (!scope.from || startsMonth(firstDay(scope.from))) &&
-  (!scope.to || startsMonth(dayAfter(scope.to))) &&
-  DIMENSIONS.every((dimension) => dimension === by || !scope[dimension]?.length);
+  wholeMonths(scope) && DIMENSIONS.every((dimension) => dimension === by || !scope[dimension]?.length);
+
+/** Whether the months over all keys stand ready: whole months, narrowed by nothing. */
+export const summedByMonth = (scope: Scope): boolean =>
+  wholeMonths(scope) && DIMENSIONS.every((dimension) => !scope[dimension]?.length);
 
 /** Months of which the scope's first or last day leaves a part out. */
 export const cutMonths = (scope: Scope): string[] => {

@@ -1,5 +1,6 @@
 import fc from 'fast-check';
 import { beforeAll, expect, test } from 'vitest';
+import { type MonthSums, sumsByMonth, sumsByRecord } from '@/analytics/monthly-trends/months';
 import { rowsByMonth, rowsByRecord } from '@/analytics/monthly-trends/rows';
 import { DIMENSIONS, type Scope, UNSTATED } from '@/analytics/scope';
 import { readCompany } from '@/db/client';
@@ -65,5 +66,27 @@ test('views summed by month and the records themselves give the same rows', asyn
         expect(row.co2e).toBeCloseTo(fromRecords[index]?.co2e ?? Number.NaN, 2);
     }),
     { numRuns: 60, seed: 11 },
+  );
+});
+
+test('months that stand ready and the records themselves give the same sums', async () => {
+  const plain = (sums: MonthSums[]) =>
+    sums.map(({ co2e, totalYield, ...rest }) => ({ ...rest, co2e: Math.round(co2e * 10) }));
+  const range = fc.record(
+    { from: month.filter((m) => m < '2025-06'), to: month.filter((m) => m >= '2025-06') },
+    { requiredKeys: [] },
+  );
+  await fc.assert(
+    fc.asyncProperty(range, async (scope) => {
+      const [ready, fromRecords] = await readCompany(company.scope, async (tx) => [
+        await sumsByMonth(tx, scope),
+        await sumsByRecord(tx, scope),
+      ]);
+      expect(ready.length).toBeGreaterThan(1);
+      expect(plain(ready)).toEqual(plain(fromRecords));
+      for (const [index, row] of ready.entries())
+        expect(row.totalYield).toBeCloseTo(fromRecords[index]?.totalYield ?? Number.NaN, 12);
+    }),
+    { numRuns: 20, seed: 12 },
   );
 });

@@ -1,0 +1,64 @@
+import 'server-only';
+import { and, gte, lt, sql } from 'drizzle-orm';
+import { factFigures, toGram } from '@/analytics/figures';
+import { dayAfter, firstDay, type Scope } from '@/analytics/scope';
+import { inScope } from '@/analytics/scope-query';
+import type { Tx } from '@/db/client';
+import { monthlyRecoveredMass as v } from '@/db/views/monthly-recovered-mass';
+import { recoveryFacts as f } from '@/db/views/recovery-facts';
+
+/** Figures over all keys: of one month (its first day), or of the whole scope where `month` is null. */
+export type MonthSums = {
+  month: string | null;
+  recoveredMass: number;
+  recoveries: number;
+  medianYield: number | null;
+  totalYield: number | null;
+  co2e: number;
+  /** Records left out as entry errors; told for the whole scope only. */
+  excluded: number;
+};
+
+/** Sums out of the months that stand ready; only for whole months narrowed by nothing. */
+export const sumsByMonth = async (tx: Tx, scope: Scope): Promise<MonthSums[]> => {
+  const sums = await tx
+    .select({
+      month: sql<string | null>`${v.month}`,
+      recoveredMass: toGram(sql`coalesce(sum(${v.recoveredMassKg}), 0)`),
+      recoveries: sql<number>`coalesce(sum(${v.recoveries}), 0)`.mapWith(Number),
+      // Of one month there is one median; that of the whole scope needs the records.
+      medianYield: sql<number | null>`min(${v.medianYield})`,
+      totalYield: sql<number | null>`(sum(${v.recoveredMassKg}) / sum(${v.fullChargeKg}))::double precision`,
+      co2e: toGram(sql`coalesce(sum(${v.co2eKg}), 0)`),
+    })
+    .from(v)
+    .where(
+      and(
+        scope.from ? gte(v.month, firstDay(scope.from)) : undefined,
+        scope.to ? lt(v.month, dayAfter(scope.to)) : undefined,
+      ),
+    )
+    .groupBy(sql`rollup(${v.month})`)
+    .orderBy(v.month);
+  const { medianYield, excluded } = factFigures;
+  const [whole] = await tx.select({ medianYield, excluded }).from(f).where(inScope(scope));
+  return sums.map((row) =>
+    row.month === null
+      ? { ...row, medianYield: whole?.medianYield ?? null, excluded: whole?.excluded ?? 0 }
+      : { ...row, excluded: 0 },
+  );
+};
+
+/** The same sums out of the records themselves, for any scope. */
+export const sumsByRecord = async (tx: Tx, scope: Scope): Promise<MonthSums[]> => {
+  const { fullCharge: _, ...figures } = factFigures;
+  const rows = await tx
+    .select({ month: sql<string | null>`${f.month}`, ...figures })
+    .from(f)
+    .where(inScope(scope))
+    .groupBy(sql`rollup(${f.month})`)
+    .orderBy(f.month);
+  return rows
+    .filter((row) => row.month === null || row.recoveries > 0)
+    .map((row) => (row.month === null ? row : { ...row, excluded: 0 }));
+};
