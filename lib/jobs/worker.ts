@@ -11,7 +11,7 @@ const SWEEP_EVERY_MS = 3_000;
 const RETRY_WITHIN_SECONDS = 3;
 const TRY_AGAIN_AFTER_MS = 500;
 /** After a lost database a job notices by itself that its connection is gone; one that does not is left behind. */
-const STOP_WITHIN_MS = 10_000;
+const STOP_WITHIN_MS = 3_000;
 
 const queueLogger = new Logger(() => (level, message) => {
   if (level === 'error' || level === 'warning') log.warn({ queue: message }, 'queue');
@@ -31,6 +31,9 @@ const startRunner = (liveness: Liveness): Promise<Runner> =>
     logger: queueLogger,
     parsedCronItems: [],
     preset: {
+      // Without batches graphile-worker 0.17 reports a job's end and does not wait: when the database is away just then,
+      // the rejected promise would end the process.
+      worker: { completeJobBatchDelay: 0, failJobBatchDelay: 0 },
       plugins: [
         {
           name: 'liveness',
@@ -64,7 +67,7 @@ const workUntil = async (stopWanted: Promise<void>) => {
     try {
       await sweepUntil(Promise.race([stopWanted, liveness.lost, broken]));
     } finally {
-      await Promise.race([runner.stop().catch(() => undefined), sleep(STOP_WITHIN_MS, undefined, { ref: false })]);
+      await Promise.race([runner.stop().catch(() => undefined), sleep(STOP_WITHIN_MS)]);
     }
   } finally {
     await liveness.release();
