@@ -32,7 +32,7 @@ export const Notice = ({ tone = 'info', title, announce = false, className, chil
     >
       {TONES[tone].mark}
     </span>
-    <div className="min-w-0 px-3.5 py-2">
+    <div className="min-w-0 flex-1 px-3.5 py-2">
       {title ? <p className="font-semibold">{title}</p> : null}
       {children ? <div className={clsx('max-w-prose', title && 'text-ink-2')}>{children}</div> : null}
     </div>

@@ -1,16 +1,16 @@
 'use client';
 
-import { useActionState, useState } from 'react';
+import { useState } from 'react';
 import { Button } from '@/components/ui/button';
 import { Dialog } from '@/components/ui/dialog';
 import { Field, TextInput } from '@/components/ui/field';
-import { UNTOUCHED } from './action-state';
 import { addPerson } from './actions';
 import { Outcome } from './outcome';
 import { RoleFields, type Technicians } from './role-fields';
+import { useFormAction } from './use-form-action';
 
 const AddPersonForm = ({ technicians, close }: { technicians: Technicians; close: () => void }) => {
-  const [state, act, busy] = useActionState(addPerson, UNTOUCHED);
+  const { state, submit, busy } = useFormAction(addPerson);
   // Typed text lives here, so that a refusal takes nothing away.
   const [name, setName] = useState('');
   const [email, setEmail] = useState('');
@@ -25,7 +25,7 @@ const AddPersonForm = ({ technicians, close }: { technicians: Technicians; close
       </div>
     );
   return (
-    <form action={act} noValidate className="flex flex-col gap-4">
+    <form onSubmit={submit} noValidate className="flex flex-col gap-4">
       <Field label="Name" error={state.fields.name} required>
         <TextInput name="name" autoComplete="off" value={name} onChange={(event) => setName(event.target.value)} />
       </Field>

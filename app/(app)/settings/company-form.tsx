@@ -1,26 +1,26 @@
 'use client';
 
-import { useActionState, useState } from 'react';
+import { useState } from 'react';
 import { Button } from '@/components/ui/button';
 import { Field, Select, TextInput } from '@/components/ui/field';
 import { Sheet } from '@/components/ui/sheet';
 import { DISPLAY_UNITS, type DisplayUnit } from '@/lib/vocabulary';
 import { UNIT_NAMES } from '@/lib/wording';
-import { UNTOUCHED } from './action-state';
 import { saveCompany } from './actions';
 import { Outcome } from './outcome';
+import { useFormAction } from './use-form-action';
 
 type CompanyFormProps = { name: string; timeZone: string; massUnit: DisplayUnit; zones: readonly string[] };
 
 /** Name, zone and unit of the company. */
 export const CompanyForm = ({ name: before, timeZone, massUnit, zones }: CompanyFormProps) => {
-  const [state, act, busy] = useActionState(saveCompany, UNTOUCHED);
+  const { state, submit, busy } = useFormAction(saveCompany);
   const [name, setName] = useState(before);
   const [zone, setZone] = useState(timeZone);
   const [unit, setUnit] = useState<DisplayUnit>(massUnit);
   return (
     <Sheet title="Company">
-      <form action={act} noValidate className="flex flex-col gap-4 pb-2">
+      <form onSubmit={submit} noValidate className="flex flex-col gap-4 pb-2">
         <Field label="Name" error={state.fields.name} required>
           <TextInput name="name" value={name} onChange={(event) => setName(event.target.value)} />
         </Field>

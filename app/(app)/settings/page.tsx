@@ -23,10 +23,12 @@ export default async function SettingsPage() {
     listAccessTokens(scope),
   ]);
   const waiting = members.filter((member) => !member.hasPassword).length;
+  const programs = tokens.length ? ` and ${plural(tokens.length, 'program', 'programs')}` : '';
   return (
     <div className="flex flex-col gap-8">
       <PageHead
-        title={`${plural(members.length, 'person', 'people')} and ${plural(tokens.length, 'program', 'programs')} can open ${viewer.companyName}.`}
+        className="mt-3"
+        title={`${plural(members.length, 'person', 'people')}${programs} can open ${viewer.companyName}.`}
         sub={
           waiting
             ? `${plural(waiting, 'person has', 'people have')} not set a password yet.`

@@ -22,7 +22,7 @@ export const PeopleTable = ({ members, technicians, self }: PeopleTableProps) =>
         <thead>
           <tr>
             <Th>Name</Th>
-            <Th>E-mail</Th>
+            <Th className="max-md:hidden">E-mail</Th>
             <Th>Role</Th>
             <Th>Password</Th>
             <Th>
@@ -36,8 +36,9 @@ export const PeopleTable = ({ members, technicians, self }: PeopleTableProps) =>
               <Th scope="row">
                 {member.name}
                 {member.personId === self ? <span className="text-ink-2"> (you)</span> : null}
+                <span className="block text-sm break-all text-ink-2 md:hidden">{member.email}</span>
               </Th>
-              <Td>{member.email}</Td>
+              <Td className="max-md:hidden">{member.email}</Td>
               <Td>
                 {ROLE_NAMES[member.role]}
                 {member.technician ? <span className="block text-sm text-ink-2">as {member.technician}</span> : null}

@@ -1,18 +1,18 @@
 'use client';
 
-import { useActionState, useState } from 'react';
+import { useState } from 'react';
 import { Button } from '@/components/ui/button';
 import type { Member } from '@/lib/auth/members';
-import { UNTOUCHED } from './action-state';
 import { removePerson, renewPassword, setRole } from './actions';
 import { Outcome } from './outcome';
 import { RoleFields, type Technicians } from './role-fields';
+import { useFormAction } from './use-form-action';
 
 const Remove = ({ member }: { member: Member }) => {
   const [asked, setAsked] = useState(false);
-  const [state, act, busy] = useActionState(removePerson, UNTOUCHED);
+  const { state, submit, busy } = useFormAction(removePerson);
   return (
-    <form action={act} className="flex flex-col gap-3">
+    <form onSubmit={submit} className="flex flex-col gap-3">
       <input type="hidden" name="personId" value={member.personId} />
       {asked ? (
         <p>
@@ -45,27 +45,27 @@ type PersonFormProps = { member: Member; technicians: Technicians; isSelf: boole
 
 /** What can be changed about one person: role, password link, belonging. */
 export const PersonForm = ({ member, technicians, isSelf }: PersonFormProps) => {
-  const [changed, change, changing] = useActionState(setRole, UNTOUCHED);
-  const [renewed, renew, renewing] = useActionState(renewPassword, UNTOUCHED);
+  const change = useFormAction(setRole);
+  const renew = useFormAction(renewPassword);
   return (
     <div className="flex flex-col gap-5">
-      <form action={change} className="flex flex-col gap-4">
+      <form onSubmit={change.submit} className="flex flex-col gap-4">
         <input type="hidden" name="personId" value={member.personId} />
         <RoleFields
           technicians={technicians}
           role={member.role}
           technicianId={member.technicianId}
-          fields={changed.fields}
+          fields={change.state.fields}
         />
-        <Outcome state={changed} />
-        <Button type="submit" tone="primary" disabled={changing} className="self-start">
+        <Outcome state={change.state} />
+        <Button type="submit" tone="primary" disabled={change.busy} className="self-start">
           Change the role
         </Button>
       </form>
-      <form action={renew} className="flex flex-col gap-3 border-t border-rule pt-4">
+      <form onSubmit={renew.submit} className="flex flex-col gap-3 border-t border-rule pt-4">
         <input type="hidden" name="personId" value={member.personId} />
-        <Outcome state={renewed} />
-        <Button type="submit" disabled={renewing} className="self-start">
+        <Outcome state={renew.state} />
+        <Button type="submit" disabled={renew.busy} className="self-start">
           Make a link for a new password
         </Button>
       </form>

@@ -1,6 +1,6 @@
 'use client';
 
-import { useActionState, useState } from 'react';
+import { useState } from 'react';
 import { Button, TextButton } from '@/components/ui/button';
 import { Field, Select, TextInput } from '@/components/ui/field';
 import { Sheet } from '@/components/ui/sheet';
@@ -9,15 +9,15 @@ import type { TokenSummary } from '@/lib/auth/company-settings';
 import { formatInstant } from '@/lib/format';
 import { ROLES } from '@/lib/vocabulary';
 import { ROLE_NAMES } from '@/lib/wording';
-import { UNTOUCHED } from './action-state';
 import { addToken, revokeToken } from './actions';
 import { Outcome } from './outcome';
+import { useFormAction } from './use-form-action';
 
 const Revoke = ({ token }: { token: TokenSummary }) => {
-  const [state, act, busy] = useActionState(revokeToken, UNTOUCHED);
+  const { state, submit, busy } = useFormAction(revokeToken);
   const [asked, setAsked] = useState(false);
   return (
-    <form action={act}>
+    <form onSubmit={submit}>
       <input type="hidden" name="tokenId" value={token.id} />
       <Outcome state={state} />
       {asked ? (
@@ -34,11 +34,11 @@ const Revoke = ({ token }: { token: TokenSummary }) => {
 };
 
 const NewToken = () => {
-  const [state, act, busy] = useActionState(addToken, UNTOUCHED);
+  const { state, submit, busy } = useFormAction(addToken);
   const [label, setLabel] = useState('');
   const [role, setRole] = useState('auditor');
   return (
-    <form action={act} noValidate className="mt-4 flex flex-col gap-3">
+    <form onSubmit={submit} noValidate className="mt-4 flex flex-col gap-3">
       <div className="flex flex-wrap items-start gap-3">
         <Field label="What it is for" error={state.fields.label} className="min-w-44 flex-1">
           <TextInput
