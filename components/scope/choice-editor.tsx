@@ -22,7 +22,8 @@ type ChoiceEditorProps = {
   close: () => void;
 };
 
-const folded = (text: string) => text.toLowerCase().replaceAll('\u2011', '-');
+// "r22" finds R-22: nobody types the hyphen.
+const folded = (text: string) => text.toLowerCase().replace(/[\s\u2011-]/g, '');
 
 /** Values to tick, with the number of their records; nothing changes before "Show". */
 export const ChoiceEditor = ({ dimension, choices, selected, onApply, close }: ChoiceEditorProps) => {
@@ -35,7 +36,7 @@ export const ChoiceEditor = ({ dimension, choices, selected, onApply, close }: C
   const known = new Set(choices.map((choice) => choice.value));
   const unknown = selected.filter((value) => !known.has(value)).map((value) => ({ value, recoveries: 0 }));
   const found = [...unknown, ...choices].filter(({ value }) =>
-    folded(choiceName(dimension, value)).includes(folded(typed.trim())),
+    folded(choiceName(dimension, value)).includes(folded(typed)),
   );
   const shown = found.slice(0, MOST_SHOWN);
 
