@@ -1,5 +1,5 @@
 import { clsx } from 'clsx';
-import { Fragment, type ReactNode } from 'react';
+import type { ReactNode } from 'react';
 
 /** One line of a ticket; `small` is said under the value. */
 export type TicketRow = { label: ReactNode; value: ReactNode; small?: ReactNode };
@@ -24,17 +24,17 @@ export const Ticket = ({ heading, of, net, rows, className }: TicketProps) => (
         <span className="shrink-0 text-base text-ink-2">{net.unit}</span>
       </p>
     ) : null}
-    <dl className={clsx('grid grid-cols-[1fr_auto] text-sm', !net && 'mt-3 border-t-2 border-ink')}>
+    <dl className={clsx('text-sm', !net && 'mt-3 border-t-2 border-ink')}>
       {rows.map((row, index) => (
         // Rows of a ticket are told in a fixed order.
         // biome-ignore lint/suspicious/noArrayIndexKey: labels are nodes, and the order never changes.
-        <Fragment key={index}>
-          <dt className="border-b border-rule-2 py-2 pr-4 text-ink-2">{row.label}</dt>
-          <dd className="border-b border-rule-2 py-2 text-right font-mono">
+        <div key={index} className="flex justify-between gap-4 border-b border-rule-2 py-2">
+          <dt className="text-ink-2">{row.label}</dt>
+          <dd className="text-right font-mono">
             {row.value}
             {row.small ? <span className="block text-xs leading-tight text-ink-3">{row.small}</span> : null}
           </dd>
-        </Fragment>
+        </div>
       ))}
     </dl>
   </aside>
