@@ -1,10 +1,10 @@
 import { columnVisibilityFeature, createColumnHelper, rowSortingFeature, tableFeatures } from '@tanstack/react-table';
-import Link from 'next/link';
 import type { RecordRow } from '@/analytics/records/contract';
 import { formatDay, formatDesignation, formatMass, formatPercent } from '@/lib/format';
 import type { DisplayUnit } from '@/lib/vocabulary';
 import { CATEGORY_NAMES, JOB_TYPE_NAMES } from '@/lib/wording';
 import { COLUMN_NAMES, type ColumnId } from './column-list';
+import { RecordLink } from './record-link';
 
 /** The server sorts and pages; the table only knows by what, and which columns stand. */
 export const RECORD_TABLE_FEATURES = tableFeatures({ columnVisibilityFeature, rowSortingFeature });
@@ -22,9 +22,9 @@ export const recordColumns = (unit: DisplayUnit) =>
     helper.accessor('recordRef', {
       header: COLUMN_NAMES.recordRef,
       cell: ({ row }) => (
-        <Link href={`/records/${row.original.id}`} className="link font-medium whitespace-nowrap">
+        <RecordLink id={row.original.id} className="link font-medium whitespace-nowrap">
           {row.original.recordRef}
-        </Link>
+        </RecordLink>
       ),
     }),
     helper.accessor('recoveredOn', {

@@ -3,9 +3,10 @@
 import type { ReactNode } from 'react';
 import type { KnownNames } from '@/analytics/records/known-names-contract';
 import { MASS_FIELDS, type RecordField, type RecordTexts } from '@/lib/recoveries/fields';
+import { VACUUM_UNITS } from '@/lib/vocabulary';
 import { FieldInput } from './field-input';
 import { FORM_PARTS } from './field-kinds';
-import { fieldValue } from './wording';
+import { RISE_UNIT_NAMES, VACUUM_UNIT_NAMES } from './wording';
 
 type RecordFieldsProps = {
   texts: RecordTexts;
@@ -34,9 +35,9 @@ const MASSES: readonly RecordField[] = MASS_FIELDS;
 
 const unitOf = (field: RecordField, { massUnit, vacuumUnit }: RecordTexts): string | undefined => {
   if (MASSES.includes(field)) return massUnit;
-  return field === 'finalVacuum' || field === 'holdRise'
-    ? vacuumUnit && fieldValue('vacuumUnit', vacuumUnit)
-    : undefined;
+  const unit = VACUUM_UNITS.find((known) => known === vacuumUnit);
+  if (field === 'finalVacuum') return unit && VACUUM_UNIT_NAMES[unit];
+  return field === 'holdRise' ? unit && RISE_UNIT_NAMES[unit] : undefined;
 };
 
 /** All fields of a record in the order of the work. */

@@ -1,7 +1,6 @@
 'use client';
 
 import { useQueryClient } from '@tanstack/react-query';
-import Link from 'next/link';
 import { useRouter } from 'next/navigation';
 import { useState } from 'react';
 import type { HistoryEntry, RecordDetail } from '@/analytics/records/contract';
@@ -15,6 +14,7 @@ import { CorrectionForm } from './correction-form';
 import { LikeJobs } from './like-jobs';
 import { RecordFacts } from './record-facts';
 import { RecordHistoryList } from './record-history';
+import { BackToRecords } from './record-link';
 import { RecordSource } from './record-source';
 import { RecordTicket } from './record-ticket';
 import { recordSentence } from './sentence';
@@ -35,11 +35,7 @@ export const RecordScreen = ({ record, history }: RecordScreenProps) => {
   };
   return (
     <>
-      <p className="mb-3 print:hidden">
-        <Link href="/records" className="link">
-          ← All records
-        </Link>
-      </p>
+      <BackToRecords />
       <PageHead
         className="mb-5"
         title={recordSentence(record, massUnit)}
