@@ -3,7 +3,7 @@ import type { DisplayUnit } from '@/lib/vocabulary';
 import type { MonthlyTrends } from './contract';
 import { lastWholeMonth, monthsAfter, type StackedMonth, type StackLayer, type Stacks } from './series';
 
-/** A sentence in pieces: text, and one figure that opens the records of its month. */
+/** A sentence in pieces: text, and one figure that opens the records of its month, or of the whole scope. */
 export type Answer = { before: string; figure: string | null; after: string; month: string | null };
 
 const text = (before: string): Answer => ({ before, figure: null, after: '', month: null });
@@ -23,29 +23,42 @@ const comparison = (mass: number, yearBefore: number | null, month: string): str
   return `, ${formatPercent(Math.abs(change))} ${change > 0 ? 'more' : 'less'} than in ${then}.`;
 };
 
+/** What all months of a scope without a whole month come to. */
+const sumAnswer = (months: readonly StackedMonth[], unit: DisplayUnit): Answer => {
+  const mass = months.reduce((sum, { recoveredMass }) => sum + recoveredMass, 0);
+  const recoveries = months.reduce((sum, month) => sum + month.recoveries, 0);
+  return {
+    before: 'The chosen days brought in ',
+    figure: formatMassWithUnit(mass, unit, 0),
+    after: ` in ${plural(recoveries, 'recovery', 'recoveries')}.`,
+    month: null,
+  };
+};
+
 /**
  * What the latest whole month brought in against the same month a year before, in plain words. A month that is running
  * or cut by the scope is never compared.
  */
 export const trendAnswer = ({ months }: Stacks, unit: DisplayUnit): Answer => {
-  const latest = lastWholeMonth(months) ?? months.at(-1);
-  if (!latest) return text('No recoveries in this period.');
-  const { month, recoveredMass, recoveries } = latest;
-  const figure = formatMassWithUnit(recoveredMass, unit, 0);
-  const said = { figure, month };
-  if (latest.state === 'running')
-    return { ...said, before: `${formatMonth(month)} has brought in `, after: ' so far.' };
-  if (latest.state === 'cut')
+  const latest = lastWholeMonth(months);
+  const only = months[0];
+  if (latest) {
+    const { month, recoveredMass, recoveries, yearBefore } = latest;
+    if (recoveries === 0) return text(`Nothing was recovered in ${formatMonth(month)}.`);
     return {
-      ...said,
-      before: 'The chosen days brought in ',
-      after: ` in ${plural(recoveries, 'recovery', 'recoveries')}.`,
+      before: `${formatMonth(month)} brought in `,
+      figure: formatMassWithUnit(recoveredMass, unit, 0),
+      after: comparison(recoveredMass, yearBefore, month),
+      month,
     };
-  if (recoveries === 0) return text(`Nothing was recovered in ${formatMonth(month)}.`);
+  }
+  if (!only) return text('No recoveries in this scope.');
+  if (months.length > 1 || only.state === 'cut') return sumAnswer(months, unit);
   return {
-    ...said,
-    before: `${formatMonth(month)} brought in `,
-    after: comparison(recoveredMass, latest.yearBefore, month),
+    before: `${formatMonth(only.month)} has brought in `,
+    figure: formatMassWithUnit(only.recoveredMass, unit, 0),
+    after: ' so far.',
+    month: only.month,
   };
 };
 

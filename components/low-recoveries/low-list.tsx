@@ -15,7 +15,7 @@ const LowItem = ({ item, unit }: { item: LowRecovery; unit: DisplayUnit }) => (
         <span className="text-sm text-ink-2">{formatDay(item.recoveredOn)}</span>
       </p>
       <p className="text-sm break-words text-ink-2">
-        {item.technician} at {item.site}, {item.appliance}
+        {item.technician} at {item.site}, {formatDesignation(item.appliance)}
       </p>
       <p className="text-sm text-ink-2">
         {formatDesignation(item.refrigerant)}, {choiceName('category', item.category)}

@@ -25,6 +25,7 @@ export const LowRecoveriesScreen = () => {
   const low = useLowRecoveries(query, order);
   return (
     <ScopedReport
+      screen="Low recoveries"
       data={low.data}
       error={low.error}
       stale={low.isPlaceholderData}

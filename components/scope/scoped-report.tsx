@@ -7,6 +7,8 @@ import { NothingInScope } from './nothing-in-scope';
 import { ScopeSentence } from './scope-sentence';
 
 type ScopedReportProps<Answer> = {
+  /** Name of the screen, for who cannot see it while there is no answer to head it. */
+  screen: string;
   data: Answer | undefined;
   error: Error | null;
   /** Whether newer figures are on their way. */
@@ -17,9 +19,18 @@ type ScopedReportProps<Answer> = {
 };
 
 /** A screen of one answer under its scope: being read, failed, nothing there, or the answer itself. */
-export const ScopedReport = <Answer,>({ data, error, stale, retry, isEmpty, children }: ScopedReportProps<Answer>) => (
+export const ScopedReport = <Answer,>({
+  screen,
+  data,
+  error,
+  stale,
+  retry,
+  isEmpty,
+  children,
+}: ScopedReportProps<Answer>) => (
   <>
     <ScopeSentence />
+    {data ? null : <h1 className="sr-only">{screen}</h1>}
     {data ? (
       <div aria-busy={stale} className={clsx('flex flex-col gap-6 transition-opacity', stale && 'opacity-50')}>
         {isEmpty(data) ? <NothingInScope /> : children(data)}

@@ -19,6 +19,7 @@ export const SitesScreen = () => {
   const { data, error, isPlaceholderData, refetch } = useSiteRecoveries(query);
   return (
     <ScopedReport
+      screen="Sites"
       data={data}
       error={error}
       stale={isPlaceholderData}

@@ -19,6 +19,7 @@ export const TechniciansScreen = () => {
   const { data, error, isPlaceholderData, refetch } = useTechnicianRecoveries(query);
   return (
     <ScopedReport
+      screen="Technicians"
       data={data}
       error={error}
       stale={isPlaceholderData}

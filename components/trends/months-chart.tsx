@@ -10,6 +10,13 @@ import { kgToUnit } from '@/lib/units';
 import { recordsHref } from './records-link';
 import { layerName, monthInWords } from './wording';
 
+/** With more months than this the line of the year before hides more than it shows. */
+const MOST_COMPARED = 37;
+
+/** Whether the chart draws the year before. */
+export const comparesYears = ({ months }: Stacks): boolean =>
+  months.length <= MOST_COMPARED && months.some(({ yearBefore, state }) => yearBefore !== null && state === 'whole');
+
 type MonthsChartProps = { stacks: Stacks; by: Dimension; scope: ScopeSelection; colours: Record<string, string> };
 
 /** The stacks in the viewer's unit, with the words of their months. */
@@ -25,14 +32,15 @@ export const MonthsChart = ({ stacks, by, scope, colours }: MonthsChartProps) =>
   );
   const months = useMemo<ChartMonth[]>(() => {
     const inUnit = (kg: number) => kgToUnit(kg, scope.unit);
+    const compared = comparesYears(stacks);
     return stacks.months.map((month) => ({
       month: month.month,
       values: Object.fromEntries(Object.entries(month.layers).map(([id, kg]) => [id, inUnit(kg)])),
       total: inUnit(month.recoveredMass),
-      yearBefore: month.yearBefore === null || month.state !== 'whole' ? null : inUnit(month.yearBefore),
+      yearBefore: !compared || month.yearBefore === null || month.state !== 'whole' ? null : inUnit(month.yearBefore),
       unfinished: month.state !== 'whole',
     }));
-  }, [stacks.months, scope.unit]);
+  }, [stacks, scope.unit]);
   return (
     <StackedMonthsFigure
       label="Recovered mass by month"

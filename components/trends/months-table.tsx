@@ -40,7 +40,7 @@ export const MonthsTable = ({ stacks: { layers, months }, by, scope, colours }: 
           <UnitHead key={layer.id} unit={scope.unit}>
             <span className="inline-flex items-baseline gap-1.5">
               <span aria-hidden="true" className="size-2.5 shrink-0" style={{ background: colours[layer.id] }} />
-              {layerName(by, layer)}
+              <span className="w-min">{layerName(by, layer)}</span>
             </span>
           </UnitHead>
         ))}

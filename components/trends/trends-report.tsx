@@ -7,14 +7,14 @@ import type { Dimension } from '@/analytics/dimensions';
 import type { MonthlyTrends } from '@/analytics/monthly-trends/contract';
 import { trendAnswer, trendNotes } from '@/analytics/monthly-trends/sentence';
 import { lastWholeMonth, toStacks } from '@/analytics/monthly-trends/series';
-import type { ScopeSelection } from '@/analytics/scope-address';
+import { type ScopeSelection, scopeSearch } from '@/analytics/scope-address';
 import { NothingInScope } from '@/components/scope/nothing-in-scope';
 import { choiceName, DIMENSION_WORDS } from '@/components/scope/wording';
 import { PageHead } from '@/components/ui/page-head';
 import { Sheet } from '@/components/ui/sheet';
 import { layerColours } from './layer-colours';
 import { MonthTicket } from './month-ticket';
-import { MonthsChart } from './months-chart';
+import { comparesYears, MonthsChart } from './months-chart';
 import { MonthsTable } from './months-table';
 import { recordsHref } from './records-link';
 import { SplitSelector } from './split-selector';
@@ -37,11 +37,10 @@ export const TrendsReport = ({ trends, scope, by, onSplit, stale }: TrendsReport
   const answer = trendAnswer(stacks, scope.unit);
   const notes = trendNotes(stacks, trends, scope.unit, (key) => choiceName(shownBy, key));
   const ticketMonth = lastWholeMonth(stacks.months) ?? stacks.months.at(-1);
-  const href = answer.month ? recordsHref(scope, answer.month) : null;
+  const href = (answer.month && recordsHref(scope, answer.month)) || `/records${scopeSearch(scope)}`;
   if (!ticketMonth)
     return (
       <div aria-busy={stale} className={clsx(stale && 'opacity-50')}>
-        <PageHead title={answer.before} />
         <NothingInScope />
       </div>
     );
@@ -57,13 +56,11 @@ export const TrendsReport = ({ trends, scope, by, onSplit, stale }: TrendsReport
         title={
           <>
             {answer.before}
-            {answer.figure && href ? (
+            {answer.figure ? (
               <Link href={href} className="figure-link">
                 {answer.figure}
               </Link>
-            ) : (
-              answer.figure
-            )}
+            ) : null}
             {answer.after}
           </>
         }
@@ -73,7 +70,7 @@ export const TrendsReport = ({ trends, scope, by, onSplit, stale }: TrendsReport
       <MonthTicket month={ticketMonth} months={stacks.months} scope={scope} className="lg:row-span-2 lg:self-start" />
       <Sheet
         title="Recovered mass by month"
-        aside={`${scope.unit}, by ${DIMENSION_WORDS[shownBy].one}; the line is the year before`}
+        aside={`${scope.unit}, by ${DIMENSION_WORDS[shownBy].one}${comparesYears(stacks) ? '; the line is the year before' : ''}`}
         className="lg:col-start-1"
       >
         <SplitSelector by={by} onChange={onSplit} />

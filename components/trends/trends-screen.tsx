@@ -22,6 +22,7 @@ export const TrendsScreen = () => {
   return (
     <>
       <ScopeSentence />
+      {data ? null : <h1 className="sr-only">Trends</h1>}
       {data ? (
         <TrendsReport trends={data} scope={scope} by={by} onSplit={setBy} stale={isPlaceholderData} />
       ) : error ? (

@@ -64,7 +64,7 @@ export const SortableTable = <Row extends RowData>({ label, columns, data, rowId
                   <button
                     type="button"
                     onClick={header.column.getToggleSortingHandler()}
-                    className="inline-flex min-h-8 items-end gap-1 font-medium hover:text-act pointer-coarse:min-h-11"
+                    className="inline-flex min-h-8 items-end align-bottom gap-1 font-medium hover:text-act pointer-coarse:min-h-11"
                   >
                     {/* The arrow stands where it does not push the heading away from its figures. */}
                     <span aria-hidden="true" className="order-last w-3 text-ink in-data-numeric:order-first">

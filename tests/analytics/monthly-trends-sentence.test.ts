@@ -42,6 +42,13 @@ test('one month, cut days, an empty month and no records at all', () => {
   expect(answer(trendsOf([['2026-11', 'R-22', 50]], { cutMonths: ['2026-11'] }))).toBe(
     'The chosen days brought in 50 kg in 1 recovery.',
   );
+  const days: [string, string, number][] = [
+    ['2026-10', 'R-22', 20],
+    ['2026-11', 'R-22', 50],
+  ];
+  expect(answer(trendsOf(days, { cutMonths: ['2026-10', '2026-11'] }))).toBe(
+    'The chosen days brought in 70 kg in 2 recoveries.',
+  );
   const gap = trendsOf(
     [
       ['2026-10', 'R-22', 5],
@@ -50,7 +57,7 @@ test('one month, cut days, an empty month and no records at all', () => {
     { partialMonth: '2026-12' },
   );
   expect(answer(gap)).toBe('Nothing was recovered in November 2026.');
-  expect(answer(trendsOf([]))).toBe('No recoveries in this period.');
+  expect(answer(trendsOf([]))).toBe('No recoveries in this scope.');
 });
 
 test('names the part that makes most of the difference, and only then', () => {
