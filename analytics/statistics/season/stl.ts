@@ -43,15 +43,14 @@ const levelled = (season: readonly number[], period: number): number[] => {
 };
 
 /**
- * Seasonal-trend decomposition by loess. Needs two full periods and one value more, as R's `stl` does; the product asks
- * for 24 full months before it shows one. Cleveland, Cleveland, McRae & Terpenning (1990), Journal of Official
- * Statistics 6, 3-73.
+ * Seasonal-trend decomposition by loess. Needs two full periods (R's `stl` asks for one value more, for no reason in the
+ * method). Cleveland, Cleveland, McRae & Terpenning (1990), Journal of Official Statistics 6, 3-73.
  */
 export const stl = (values: readonly number[], options: StlOptions): Estimate<Decomposition> => {
   requireFinite(values, 'The values of the series');
   const { period, seasonWindow } = options;
   const plan = stlPlan(values.length, options);
-  const least = 2 * period + 1;
+  const least = 2 * period;
   if (values.length < least) return tooFew(least, values.length, 'values');
 
   let weights: number[] | undefined;
