@@ -1,7 +1,9 @@
 import { determinant, inverse, Matrix } from 'ml-matrix';
 import { requireFinite, requireSameLength } from '../checked';
 import { type Estimate, enough, tooFew } from '../estimate';
+import { groupBy } from '../group-by';
 import { minimise } from '../minimise';
+import { requireDesign } from './design';
 
 export type RandomIntercept = {
   coefficients: number[];
@@ -15,15 +17,8 @@ export type RandomIntercept = {
 
 type Group = { rows: number[]; name: string };
 
-const groupsOf = (names: readonly string[]): Group[] => {
-  const rows = new Map<string, number[]>();
-  names.forEach((name, row) => {
-    const own = rows.get(name);
-    if (own) own.push(row);
-    else rows.set(name, [row]);
-  });
-  return [...rows].map(([name, own]) => ({ name, rows: own }));
-};
+const groupsOf = (names: readonly string[]): Group[] =>
+  [...groupBy([...names.keys()], (row) => names[row] ?? '')].map(([name, rows]) => ({ name, rows }));
 
 const total = (rows: readonly number[], values: readonly number[]): number =>
   rows.reduce((sum, row) => sum + (values[row] ?? 0), 0);
@@ -66,7 +61,6 @@ export const randomIntercept = (
   design: readonly number[][],
 ): Estimate<RandomIntercept> => {
   requireFinite(values, 'Values');
-  requireFinite(design.flat(), 'The design');
   requireSameLength(values, names, 'Values and groups');
   requireSameLength(values, design, 'Values and rows of the design');
   const groups = groupsOf(names);
@@ -74,7 +68,7 @@ export const randomIntercept = (
   const least = (design[0]?.length ?? 0) + groups.length + 1;
   if (values.length < least) return tooFew(least, values.length, 'values');
 
-  const predictors = new Matrix(design.map((row) => [...row]));
+  const predictors = requireDesign(design);
   const at = (ratio: number) => fitAt(ratio, values, predictors, groups);
   const best = minimise((logRatio) => at(Math.exp(logRatio)).restrictedCriterion, -20, 20);
   const ratio = at(0).restrictedCriterion <= best.value ? 0 : Math.exp(best.at);
