@@ -21,7 +21,12 @@ export const COLOURED_REFRIGERANTS = [
   'R-507A',
   'R-513A',
   'R-744',
+  'R-1233zd(E)',
 ] as const;
+
+/** Name of a refrigerant's CSS variable: `R-1233zd(E)` is kept as `--refrigerant-r-1233zde`. */
+const variableOf = (designation: string): string =>
+  `--refrigerant-${designation.toLowerCase().replace(/[^a-z0-9-]/g, '')}`;
 
 const own = new Set<string>(COLOURED_REFRIGERANTS.map((designation) => designation.toLowerCase()));
 
@@ -36,7 +41,7 @@ const hashOf = (text: string): number => {
 export const refrigerantColour = (designation: string): string => {
   const name = designation.trim().toLowerCase();
   if (name === 'other' || name === '') return 'var(--refrigerant-other)';
-  if (own.has(name)) return `var(--refrigerant-${name})`;
+  if (own.has(name)) return `var(${variableOf(name)})`;
   const borrowed = COLOURED_REFRIGERANTS[hashOf(name) % COLOURED_REFRIGERANTS.length] ?? 'other';
-  return `var(--refrigerant-${borrowed.toLowerCase()})`;
+  return `var(${variableOf(borrowed)})`;
 };
