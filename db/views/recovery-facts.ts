@@ -4,6 +4,9 @@ import { appliances, branches, cylinders, sites, technicians } from '@/db/schema
 import { recoveries as r } from '@/db/schema/recoveries';
 import { refrigerants } from '@/db/schema/refrigerants';
 
+// The judgement of the monthly summary: a reading in inHg is good to about 0.1 kPa. NULL vacuum gives NULL.
+const DOWN_TO_LEVEL = sql`(${r.finalVacuumKpaAbs}::double precision <= required_level_kpa_abs(${refrigerants.pressureClass}, ${r.fullChargeKg}, ${r.category}) + 0.1)`;
+
 /**
  * One row a recovery with its names and derived figures: yield = recovered mass over full charge (40 CFR 82.152
  * "full charge"), CO2-equivalent = recovered mass times GWP (AR4). The grain that every scope can filter. Foreign keys
@@ -37,6 +40,14 @@ export const recoveryFacts = pgView('recovery_facts')
         co2eKg: sql<number>`(${r.recoveredMassKg}::double precision * ${refrigerants.gwpAr4})`
           .mapWith(Number)
           .as('co2e_kg'),
+        /** Whether the final vacuum reached the level of 40 CFR 82.156; NULL where none is stated. */
+        downToLevel: sql<boolean | null>`${DOWN_TO_LEVEL}`.as('down_to_level'),
+        /** Whether a hold was made; NULL where the record says nothing of one. */
+        held: sql<boolean | null>`(${r.holdMinutes} > 0)`.as('held'),
+        /** The same with the GWP of AR6; NULL where the catalogue has none. */
+        co2eAr6Kg: sql<number | null>`(${r.recoveredMassKg}::double precision * ${refrigerants.gwpAr6})`.as(
+          'co2e_ar6_kg',
+        ),
         cylinder: sql<string | null>`${cylinders.name}`.as('cylinder'),
         exclusion: r.exclusion,
         importId: r.importId,

@@ -11,6 +11,7 @@ const TRACKED: Record<string, [column: string, value: string]> = {
   flag_decisions: ['note', 'New note'],
   flags: ['state', 'decided'],
   memberships: ['role', 'auditor'],
+  notes: ['text', 'New note'],
   recoveries: ['notes', 'New note'],
   sites: ['name', 'New name'],
   technicians: ['name', 'New name'],
@@ -27,6 +28,7 @@ const DELETE_ORDER = [
   'technicians',
   'cylinders',
   'branches',
+  'notes',
 ];
 
 test('the tracked tables are the ones named here, for all three commands', async () => {

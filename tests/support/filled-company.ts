@@ -3,6 +3,7 @@ import { addSettings, type Tx, withCompany } from '@/db/client';
 import { settings } from '@/db/schema/companies';
 import { flagDecisions, flags } from '@/db/schema/flags';
 import { importFileChunks, importMappings, importRows, imports } from '@/db/schema/imports';
+import { notes } from '@/db/schema/notes';
 import { passwordLinks, sessions } from '@/db/schema/people';
 import { appliances, branches, cylinders, sites, technicianCertifications, technicians } from '@/db/schema/places';
 import { recoveries } from '@/db/schema/recoveries';
@@ -22,6 +23,7 @@ const ids = () => ({
   importId: randomUUID(),
   flagId: randomUUID(),
   recoveryId: randomUUID(),
+  noteId: randomUUID(),
   otherRecoveryId: randomUUID(),
 });
 type Ids = ReturnType<typeof ids>;
@@ -73,6 +75,16 @@ const fillRecords = async (tx: Tx, companyId: string, label: string, id: Ids, ma
     .values({ companyId, flagId: id.flagId, decision: 'confirmed_correct', decidedBy: 'test' });
 };
 
+const fillNotes = (tx: Tx, companyId: string, label: string, id: Ids) =>
+  tx.insert(notes).values({
+    companyId,
+    id: id.noteId,
+    fromDay: '2025-03-01',
+    toDay: '2025-03-31',
+    text: `Note of ${label}`,
+    writtenBy: 'test',
+  });
+
 const fillImports = async (tx: Tx, companyId: string, label: string, id: Ids): Promise<void> => {
   const { importId } = id;
   await tx.insert(imports).values({
@@ -112,6 +124,7 @@ export const filledCompany = async (label: string, massKg: string) => {
     await fillPlaces(tx, companyId, label, id);
     await fillRecords(tx, companyId, label, id, massKg);
     await fillImports(tx, companyId, label, id);
+    await fillNotes(tx, companyId, label, id);
   });
   const { personId } = await newPerson(companyId, 'owner');
   const expiresAt = '2099-01-01T00:00:00Z';
