@@ -52,7 +52,7 @@ export const RecordScreen = ({ record, history }: RecordScreenProps) => {
         <RecordTicket record={record} />
         <div className="grid min-w-0 gap-5">
           {correcting ? (
-            <Sheet title="Correct this record" aside={`Version ${record.version}`}>
+            <Sheet title="Correct this record">
               <CorrectionForm
                 key={record.version}
                 record={record}

@@ -3,6 +3,7 @@ import { MASS_UNITS, VACUUM_UNITS } from '@/lib/vocabulary';
 import type { RecordTexts } from './fields';
 import { whenText } from './local-time';
 import { storedTexts } from './stored-texts';
+import { massText } from './unit-text';
 
 const blankAsNull = <Value>(value: Value | null | undefined): Value | null => value ?? null;
 const text = z.string().nullish().transform(blankAsNull);
@@ -45,8 +46,8 @@ export type HistoryRow = z.output<typeof historyRowSchema>;
 export type NameOf = (id: string | null) => string | null;
 
 /** A row of the history as texts by field, in the units of that time. */
-export const historyTexts = (row: HistoryRow, nameOf: NameOf, timeZone: string): RecordTexts =>
-  storedTexts({
+export const historyTexts = (row: HistoryRow, nameOf: NameOf, timeZone: string): RecordTexts => ({
+  ...storedTexts({
     recordRef: row.record_ref,
     recoveredWhen: whenText(
       { recoveredOn: row.recovered_on, recoveredAt: row.recovered_at && new Date(row.recovered_at).toISOString() },
@@ -75,4 +76,7 @@ export const historyTexts = (row: HistoryRow, nameOf: NameOf, timeZone: string):
     technicianCertification: row.technician_certification,
     notes: row.notes,
     entered: row.entered,
-  });
+  }),
+  // Also where nobody typed it: a corrected weight changes it all the same.
+  recoveredMass: massText(row.recovered_mass_kg, row.mass_unit),
+});

@@ -204,6 +204,7 @@ test('a correction changes only what it names, and the history tells it', async 
     { field: 'nameplateCharge', before: '12.5 lb', after: '14.5 oz' },
     { field: 'startWeight', before: '17.5 lb', after: '1.0 oz' },
     { field: 'endWeight', before: '28.2 lb', after: '9 oz' },
+    { field: 'recoveredMass', before: '10.7 lb', after: '8 oz' },
     { field: 'massUnit', before: 'lb', after: 'oz' },
   ]);
   expect(items[1]?.changes).toContainEqual({ field: 'technician', before: null, after: 'Robin Vale' });
