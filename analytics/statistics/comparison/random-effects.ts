@@ -1,6 +1,6 @@
 import { sum } from 'simple-statistics';
 import { chiSquareUpperTail } from '../distributions/gamma';
-import { Z_95 } from '../distributions/normal';
+import { Z_95 } from '../distributions/z-95';
 import { type Estimate, enough, tooFew } from '../estimate';
 import type { Interval } from '../intervals/interval';
 import { type Effect, pooledMean, requireEffects, weightedSquares } from './pooled-mean';

@@ -1,4 +1,4 @@
-import { Z_95 } from '../distributions/normal';
+import { Z_95 } from '../distributions/z-95';
 import { type Estimate, enough, tooFew } from '../estimate';
 import type { Interval } from '../intervals/interval';
 import { pauleMandel } from './paule-mandel';

@@ -2,9 +2,6 @@ import erfc from '@stdlib/math-base-special-erfc';
 import erfcinv from '@stdlib/math-base-special-erfcinv';
 import { requireFiniteNumber, requireProbability } from '../checked';
 
-/** The standard normal quantile at 97.5 %: half-width of a 95 % interval in standard errors. */
-export const Z_95 = 1.959963984540054;
-
 /** Probability that a standard normal value is at most `value`. Abramowitz & Stegun 26.2.29. */
 export const normalCdf = (value: number): number => {
   requireFiniteNumber(value, 'A normal value');

@@ -1,6 +1,6 @@
 import { sum } from 'simple-statistics';
 import { requireNotNegative } from '../checked';
-import { Z_95 } from '../distributions/normal';
+import { Z_95 } from '../distributions/z-95';
 import { type Estimate, enough, tooFew } from '../estimate';
 
 export type SumOfJobs = { total: number; standardError: number };

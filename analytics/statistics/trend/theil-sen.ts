@@ -1,5 +1,5 @@
 import { median } from 'simple-statistics';
-import { Z_95 } from '../distributions/normal';
+import { Z_95 } from '../distributions/z-95';
 import { type Estimate, enough, tooFew } from '../estimate';
 import { countOf, type GappySeries, kendallScore } from './kendall-score';
 

@@ -5,9 +5,10 @@ import { binomialCdf, binomialQuantile } from '@/analytics/statistics/distributi
 import { chiSquareUpperTail, gammaCdf, gammaQuantile } from '@/analytics/statistics/distributions/gamma';
 import { logBeta, logGamma } from '@/analytics/statistics/distributions/log-gamma';
 import { negativeBinomialCdf, negativeBinomialQuantile } from '@/analytics/statistics/distributions/negative-binomial';
-import { normalCdf, normalQuantile, twoSidedP, Z_95 } from '@/analytics/statistics/distributions/normal';
+import { normalCdf, normalQuantile, twoSidedP } from '@/analytics/statistics/distributions/normal';
 import { poissonCdf, poissonQuantile } from '@/analytics/statistics/distributions/poisson';
 import { studentTCdf, studentTQuantile } from '@/analytics/statistics/distributions/student-t';
+import { Z_95 } from '@/analytics/statistics/distributions/z-95';
 import { garwood } from '@/analytics/statistics/intervals/poisson-mean';
 import { agrestiCoull, clopperPearson, jeffreys, wilson } from '@/analytics/statistics/intervals/proportion';
 import { gaussLegendre } from '@/analytics/statistics/quadrature';
