@@ -18,7 +18,9 @@ const RefusedGroup = ({ reason }: { reason: Reason }) => {
           {plural(reason.count, 'row', 'rows')}
           {reason.column ? ` in ${reason.column}` : ''}
         </p>
-        {title ? <p className="mt-1 max-w-prose text-sm break-words text-ink-2">{reason.message}</p> : null}
+        {title && !reason.message.startsWith(title) ? (
+          <p className="mt-1 max-w-prose text-sm break-words text-ink-2">For example: {reason.message}</p>
+        ) : null}
       </div>
       <ul className="min-w-0 text-[0.9375rem]">
         {reason.examples.map(({ line, recordRef, value }) => (

@@ -14,7 +14,7 @@ export const UndoImport = ({ view, undo }: UndoImportProps) => {
   const [asking, setAsking] = useState(false);
   if (!asking)
     return (
-      <Button tone="danger" onClick={() => setAsking(true)}>
+      <Button tone="danger" className="self-start" onClick={() => setAsking(true)}>
         Undo this import
       </Button>
     );
