@@ -1,0 +1,71 @@
+import AxeBuilder from '@axe-core/playwright';
+import type { Page } from '@playwright/test';
+import { findPages } from '../support/discover';
+import { expect, test } from './support';
+
+/** WCAG 2.2, levels A and AA, as axe-core names them. */
+const WCAG = ['wcag2a', 'wcag2aa', 'wcag21a', 'wcag21aa', 'wcag22aa'];
+
+const findFaults = async (page: Page): Promise<string[]> => {
+  const { violations } = await new AxeBuilder({ page }).withTags(WCAG).analyze();
+  return violations.map(
+    ({ id, help, nodes }) => `${id}: ${help} (${nodes.map(({ target }) => target.join(' ')).join(', ')})`,
+  );
+};
+
+/** The address of a page, ids taken from the demo company. */
+const addressOf = async (page: Page, path: string): Promise<string> => {
+  if (!path.includes('[')) return path;
+  const list = path.startsWith('/records') ? '/api/recoveries?limit=1' : '/api/imports?limit=1';
+  const { items } = await (await page.request.get(list)).json();
+  return path.replace(/\[\w+\]/, items[0].id);
+};
+
+/** Goes to a page and waits until its figures are there. */
+const open = async (page: Page, path: string): Promise<void> => {
+  await page.goto(await addressOf(page, path));
+  await expect(page.getByRole('heading', { level: 1 })).toBeVisible();
+  await page.waitForLoadState('networkidle');
+  await expect(page.locator('[aria-busy=true]')).toHaveCount(0);
+};
+
+const INSIDE = findPages('(app)');
+
+test('the pages of the application are found on disk', () => {
+  expect(INSIDE).toContain('/trends');
+  expect(INSIDE.length).toBeGreaterThanOrEqual(6);
+});
+
+for (const scheme of ['light', 'dark'] as const) {
+  test.describe(`in ${scheme}`, () => {
+    test.use({ colorScheme: scheme });
+
+    test('the door has no barrier', async ({ page }) => {
+      await open(page, '/sign-in');
+      expect(await findFaults(page)).toEqual([]);
+    });
+
+    test.describe('signed in', () => {
+      test.use({ role: 'owner' });
+      for (const path of INSIDE)
+        test(`${path} has no barrier`, async ({ page }) => {
+          await open(page, path);
+          expect(await findFaults(page)).toEqual([]);
+        });
+    });
+  });
+}
+
+test.describe('on the narrowest phone', () => {
+  // 320 CSS pixels is what WCAG 2.2, 1.4.10 Reflow, asks a page to fit into without scrolling in two directions.
+  test.use({ role: 'owner', viewport: { width: 320, height: 640 } });
+  for (const path of INSIDE)
+    test(`${path} does not scroll sideways`, async ({ page }) => {
+      await open(page, path);
+      const overflow = await page.evaluate(
+        () => document.documentElement.scrollWidth - document.documentElement.clientWidth,
+      );
+      expect(overflow).toBeLessThanOrEqual(0);
+      expect(await findFaults(page)).toEqual([]);
+    });
+});
