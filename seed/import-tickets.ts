@@ -21,7 +21,7 @@ export const importTickets = async (viewer: Viewer, tickets: readonly Ticket[], 
     const file = { path, fileName, size: bytes.length, sha256: createHash('sha256').update(bytes).digest('hex') };
     const fields = new Map([['mapping', JSON.stringify(recoveryFileMapping)]]);
     const importId = await createImport(viewer, { file, fields }, null);
-    await takeIn({ companyId: viewer.companyId, importId });
+    await takeIn({ companyId: viewer.companyId, importId, actor: viewer.actor });
     return importId;
   } finally {
     await rm(folder, { recursive: true, force: true });

@@ -18,8 +18,8 @@ export type ImportWork = {
 };
 
 /** Loads it; null when the import is gone or over. */
-export const loadImportWork = ({ companyId, importId }: ImportPayload): Promise<ImportWork | null> =>
-  withCompanyJob({ companyId, actor: 'import' }, async (tx) => {
+export const loadImportWork = ({ companyId, importId, actor }: ImportPayload): Promise<ImportWork | null> =>
+  withCompanyJob({ companyId, actor }, async (tx) => {
     const [found] = await tx
       .select({
         record: imports,
@@ -30,11 +30,11 @@ export const loadImportWork = ({ companyId, importId }: ImportPayload): Promise<
       .innerJoin(companies, eq(companies.id, imports.companyId))
       .where(eq(imports.id, importId));
     if (!found || !['queued', 'running'].includes(found.record.status)) return null;
-    const { fileName, createdBy, dryRun, mapping } = found.record;
+    const { fileName, dryRun, mapping } = found.record;
     const catalogue = await tx.select({ designation: refrigerants.designation }).from(refrigerants);
     return {
       importId,
-      scope: { companyId, actor: createdBy, reason: `import of ${fileName}` },
+      scope: { companyId, actor, reason: `import of ${fileName}` },
       dryRun,
       told: mappingSchema.parse(mapping),
       context: {

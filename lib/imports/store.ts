@@ -13,9 +13,9 @@ import type { ReceivedForm } from './multipart';
 import { requireImport } from './view';
 
 /** Puts work on an import into the queue, as part of the transaction. */
-export const enqueue = (tx: Tx, task: 'take-in-file' | 'undo-import', companyId: string, importId: string) =>
+export const enqueue = (tx: Tx, task: 'take-in-file' | 'undo-import', viewer: Viewer, importId: string) =>
   tx.execute(
-    sql`select work.enqueue(${task}, ${JSON.stringify({ companyId, importId })}::json, ${`${task}:${importId}`})`,
+    sql`select work.enqueue(${task}, ${JSON.stringify({ companyId: viewer.companyId, importId, actor: viewer.actor })}::json, ${`${task}:${importId}`})`,
   );
 
 /** The mapping out of a form field; throws 400 with what is wrong. */
@@ -60,7 +60,7 @@ export const createImport = async (viewer: Viewer, form: ReceivedForm, key: stri
       .returning({ id: imports.id });
     if (!made.length) return requireSameFile(tx, id, sha256);
     await writeChunks(tx, companyId, id, path);
-    await enqueue(tx, 'take-in-file', companyId, id);
+    await enqueue(tx, 'take-in-file', viewer, id);
   });
   return id;
 };
@@ -91,7 +91,7 @@ export const readAgain = async (
         ...{ rowsRead: 0, rowsTotal: null, added: 0, updated: 0, unchanged: 0, rejected: 0 },
       })
       .where(and(eq(imports.companyId, companyId), eq(imports.id, id)));
-    await enqueue(tx, 'take-in-file', companyId, id);
+    await enqueue(tx, 'take-in-file', viewer, id);
   });
   return id;
 };

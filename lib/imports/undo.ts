@@ -28,8 +28,8 @@ const LOOK_EVERY_MS = 150;
  * Takes an import back, all or nothing: added records go, changed ones get their former values, records changed since
  * are kept and listed, names that it brought go when nothing else uses them. The history keeps all of it.
  */
-export const undoImport = ({ companyId, importId }: ImportPayload): Promise<void> =>
-  withCompanyConnection({ companyId, actor: 'import', reason: `undo of import ${importId}` }, async (client) => {
+export const undoImport = ({ companyId, importId, actor }: ImportPayload): Promise<void> =>
+  withCompanyConnection({ companyId, actor, reason: `undo of import ${importId}` }, async (client) => {
     const owner = [companyId, importId];
     const { rows } = await client.query<{ status: string }>(LOCK_IMPORT, owner);
     if (rows[0]?.status !== 'done') return;
@@ -63,7 +63,7 @@ const askForUndo = (viewer: Viewer, id: string) =>
       .update(imports)
       .set({ failure: null })
       .where(and(eq(imports.companyId, viewer.companyId), eq(imports.id, id)));
-    await enqueue(tx, 'undo-import', viewer.companyId, id);
+    await enqueue(tx, 'undo-import', viewer, id);
   });
 
 /**

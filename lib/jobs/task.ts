@@ -38,5 +38,10 @@ export const jobHandler =
   };
 
 /** What work on an import needs to know. */
-export const importPayload = z.object({ companyId: z.uuid(), importId: z.uuid() });
+export const importPayload = z.object({
+  companyId: z.uuid(),
+  importId: z.uuid(),
+  /** Who asked for it; stands in the history. */
+  actor: z.string(),
+});
 export type ImportPayload = z.infer<typeof importPayload>;

@@ -1,4 +1,5 @@
 import { randomUUID } from 'node:crypto';
+import { sql } from 'drizzle-orm';
 import { afterAll, beforeAll, expect, test } from 'vitest';
 import { POST as apply } from '@/app/api/imports/[id]/apply/route';
 import { POST as preview } from '@/app/api/imports/[id]/preview/route';
@@ -6,6 +7,7 @@ import { GET as getRefused } from '@/app/api/imports/[id]/rejected.csv/route';
 import { GET as getImport } from '@/app/api/imports/[id]/route';
 import { POST as undo } from '@/app/api/imports/[id]/undo/route';
 import { GET as list, POST as upload } from '@/app/api/imports/route';
+import { withCompany } from '@/db/client';
 import { importListSchema } from '@/lib/imports/contract';
 import { MOST_FILE_BYTES } from '@/lib/imports/multipart';
 import { type RunningWorker, startWorker } from '@/lib/jobs/worker';
@@ -68,6 +70,23 @@ test('an undone import cannot be undone again', async () => {
   expect(await response.json()).toMatchObject({ id, status: 'undone', added: 40 });
   expect(await countOf(other.companyId, 'recoveries')).toBe(0);
   expect((await takeBack(otherToken, id)).status).toBe(409);
+});
+
+test('the history tells who took a file in and who took it back, and its chain is whole', async () => {
+  const other = await newCompany();
+  const [office, owner] = [await other.token('office'), await other.token('owner')];
+  const { id } = await takeIn(office, FILE, { fileName: 'May.csv' });
+  expect((await takeBack(owner, id)).status).toBe(200);
+  const { rows } = await withCompany(other.scope, (tx) =>
+    tx.execute(sql`
+      select action, reason, count(*)::int as entries, count(distinct actor)::int as actors,
+             bool_and(actor like 'token %') as by_token, (select history_break() is null) as whole
+      from history where table_name = 'recoveries' group by action, reason order by action desc`),
+  );
+  expect(rows).toEqual([
+    { action: 'insert', reason: 'import of May.csv', entries: 40, actors: 1, by_token: true, whole: true },
+    { action: 'delete', reason: `undo of import ${id}`, entries: 40, actors: 1, by_token: true, whole: true },
+  ]);
 });
 
 test('the same Idempotency-Key is the same upload, also when it comes twice at once', async () => {
