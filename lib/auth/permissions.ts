@@ -10,6 +10,8 @@ export const ACTIONS = [
   'records:write',
   'records:export',
   'imports:manage',
+  'notes:read',
+  'notes:write',
   'company:manage',
 ] as const;
 export type Action = (typeof ACTIONS)[number];
@@ -29,10 +31,29 @@ export const PERMISSIONS: Record<Role, readonly Action[]> = {
     'records:write',
     'records:export',
     'imports:manage',
+    'notes:read',
+    'notes:write',
   ],
-  trainer: ['trends:read', 'technicians:read', 'sites:read', 'flags:read', 'records:read', 'records:export'],
+  trainer: [
+    'trends:read',
+    'technicians:read',
+    'sites:read',
+    'flags:read',
+    'records:read',
+    'records:export',
+    'notes:read',
+    'notes:write',
+  ],
   technician: ['records:read', 'records:write', 'records:export'],
-  office: ['trends:read', 'sites:read', 'records:read', 'records:write', 'records:export', 'imports:manage'],
+  office: [
+    'trends:read',
+    'sites:read',
+    'records:read',
+    'records:write',
+    'records:export',
+    'imports:manage',
+    'notes:read',
+  ],
   auditor: ['records:read', 'records:export'],
 };
 

@@ -45,6 +45,7 @@ const takenRecord = ({ label }: FilledCompany) =>
 
 const recoveryId = ({ ids }: FilledCompany) => ids.recoveryId;
 const otherRecoveryId = ({ ids }: FilledCompany) => ids.otherRecoveryId;
+const noteId = ({ ids }: FilledCompany) => ids.noteId;
 const importId = ({ ids }: FilledCompany) => ids.importId;
 const sumOf = (items: { recoveries: number }[]) => items.reduce((sum, { recoveries }) => sum + recoveries, 0);
 
@@ -69,6 +70,20 @@ export const ROUTES: Record<string, RouteRule> = {
     status: 200,
     records: (answer: { judged: { records: number } }) => answer.judged.records,
   },
+  'GET /api/notes': { action: 'notes:read', status: 200 },
+  'POST /api/notes': {
+    action: 'notes:write',
+    send: () => asJson({ from: '2025-03-15', text: 'A new pump.' }),
+    status: 201,
+  },
+  // A version that nobody has seen yet.
+  'PATCH /api/notes/[id]': {
+    action: 'notes:write',
+    id: noteId,
+    send: () => asJson({ version: 999, text: 'mended' }),
+    status: 409,
+  },
+  'DELETE /api/notes/[id]': { action: 'notes:write', id: noteId, search: '?version=999', status: 409 },
   'GET /api/recoveries': {
     action: 'records:read',
     status: 200,
