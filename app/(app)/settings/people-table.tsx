@@ -24,7 +24,7 @@ export const PeopleTable = ({ members, technicians, self }: PeopleTableProps) =>
             <Th>Name</Th>
             <Th className="max-md:hidden">E-mail</Th>
             <Th>Role</Th>
-            <Th>Password</Th>
+            <Th className="max-md:hidden">Password</Th>
             <Th>
               <span className="sr-only">Change</span>
             </Th>
@@ -33,17 +33,18 @@ export const PeopleTable = ({ members, technicians, self }: PeopleTableProps) =>
         <tbody>
           {members.map((member) => (
             <tr key={member.personId}>
-              <Th scope="row">
+              <Th scope="row" className="max-md:min-w-44">
                 {member.name}
                 {member.personId === self ? <span className="text-ink-2"> (you)</span> : null}
-                <span className="block text-sm break-all text-ink-2 md:hidden">{member.email}</span>
+                <span className="block text-sm text-ink-2 wrap-anywhere md:hidden">{member.email}</span>
+                {member.hasPassword ? null : <span className="marked text-sm md:hidden">no password yet</span>}
               </Th>
               <Td className="max-md:hidden">{member.email}</Td>
               <Td>
                 {ROLE_NAMES[member.role]}
                 {member.technician ? <span className="block text-sm text-ink-2">as {member.technician}</span> : null}
               </Td>
-              <Td>{member.hasPassword ? 'set' : <span className="marked">not yet</span>}</Td>
+              <Td className="max-md:hidden">{member.hasPassword ? 'set' : <span className="marked">not yet</span>}</Td>
               <Td className="text-right">
                 <TextButton onClick={() => setChosenId(member.personId)}>
                   Change<span className="sr-only"> {member.name}</span>
