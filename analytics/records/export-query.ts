@@ -33,10 +33,12 @@ type ExportRow = StoredRecord & { extra: Record<string, string> };
 
 const camelCase = (column: string): string => column.replace(/_(\w)/g, (_, letter: string) => letter.toUpperCase());
 
-/** A fetched row under the names of `storedColumns`: a cursor gives the database's names. */
-const toExportRow = (row: Record<string, unknown>): ExportRow =>
+/** Fetched rows under the names of `storedColumns`: a cursor gives the database's names. */
+const toExportRows = (rows: Record<string, unknown>[]): ExportRow[] => {
+  const names = Object.keys(rows[0] ?? {}).map((column) => [column, camelCase(column)] as const);
   // The columns are those of exportQuery, whose types Drizzle knows.
-  Object.fromEntries(Object.entries(row).map(([column, value]) => [camelCase(column), value])) as ExportRow;
+  return rows.map((row) => Object.fromEntries(names.map(([column, name]) => [name, row[column]])) as ExportRow);
+};
 
 /** Columns of imported files that the product has no field for, over the whole scope. */
 const extraColumns = async (tx: Tx, query: RecordListQuery): Promise<string[]> => {
@@ -70,7 +72,7 @@ export const exportRecords = (
     await write(csvLines([[...RECOVERY_FIELDS, ...extra]]));
     for (;;) {
       const { rows } = await tx.execute(sql`fetch ${sql.raw(String(ROWS_A_FETCH))} from export_rows`);
-      if (rows.length) await write(csvLines(rows.map((row) => cellsOf(toExportRow(row), extra))));
+      if (rows.length) await write(csvLines(toExportRows(rows).map((row) => cellsOf(row, extra))));
       if (rows.length < ROWS_A_FETCH) return;
     }
   });
