@@ -23,6 +23,9 @@ type Sums = { jobs: number; weakJobs: number; weight: number; weighted: number; 
 /** Plain mean and weighted effect further apart than this many standard errors are worth a word to the reader. */
 export const DISAGREEMENT = 2;
 
+/** Variance that differences of equal jobs show by rounding alone. */
+const ROUNDING = 1e-18;
+
 /**
  * Effects of technicians in the order of their names: Σ(d/s²)/Σ(1/s²) with standard error 1/√Σ(1/s²), d the difference
  * from the expected yield and s² its variance in the cell. Needs two technicians and one with two jobs.
@@ -37,7 +40,7 @@ export const technicianEffects = (jobs: readonly Job[], priorJobs = PRIOR_JOBS):
   );
   if (!variances.enough) return variances;
   const { pooled, byCell } = variances.value;
-  if (pooled === 0) return tooFew(1, 0, 'differences between jobs');
+  if (pooled < ROUNDING) return tooFew(1, 0, 'differences between jobs');
 
   const sums = new Map<string, Sums>();
   jobs.forEach((job, index) => {
