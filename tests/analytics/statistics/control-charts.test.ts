@@ -94,7 +94,7 @@ test('rules see the same from above and from below', () => {
 });
 
 test('a signal of the sums tells where its run began', () => {
-  // NIST/SEMATECH e-Handbook 6.3.2.3: signal at the 14th mean. C⁺ left zero at the 9th, so the run began there.
+  // NIST/SEMATECH e-Handbook 6.3.2.3: signal at the 14th mean. C⁺ was zero until the 12th, so the run began at the 13th.
   const means = [
     324.925, 324.675, 324.725, 324.35, 325.35, 325.225, 324.125, 324.525, 325.225, 324.6, 324.625, 325.15, 328.325,
     327.25, 327.825, 328.5, 326.675, 327.775, 326.875, 328.35,
@@ -143,6 +143,23 @@ test('charts signal as late, on average, as the equations of their run lengths s
   const exactCusum = averageRunLengthOfCusum({ slack: 0.5, threshold: 5 }, 1);
   expect(Math.abs(ewma.mean - exactEwma)).toBeLessThan(4 * ewma.standardError);
   expect(Math.abs(cusum.mean - exactCusum)).toBeLessThan(4 * cusum.standardError);
+});
+
+test('the two rules that are on cry wolf about every 153 values', () => {
+  const next = normals(1987);
+  const longest = 8;
+  const lengths = Array.from({ length: 1500 }, () => {
+    const window: number[] = [];
+    for (let length = 1; ; length++) {
+      window.push(next());
+      if (window.length > longest) window.shift();
+      const last = window.length - 1;
+      if (DEFAULT_RUN_RULES.some((rule) => signalsOf(rule, window).includes(last))) return length;
+    }
+  });
+  const mean = lengths.reduce((sum, length) => sum + length, 0) / lengths.length;
+  // Champ & Woodall (1987), table 1: 152.73. A run length varies about as much as it is long; four standard errors.
+  expect(Math.abs(mean - 152.73)).toBeLessThan((4 * 152.73) / Math.sqrt(lengths.length));
 });
 
 test('limits of shares stay within 0 and 1 and around the common share', () => {
