@@ -84,7 +84,7 @@ export const StackedMonthsFigure = ({ label, layers, months, wordsOf, recordsOf 
           ))}
         </ul>
       ) : null}
-      <figcaption className="mt-2 flex min-h-[4.25rem] flex-wrap content-start gap-x-4 text-sm text-ink-2 sm:min-h-[2.75rem]">
+      <figcaption className="mt-2 flex min-h-[7.75rem] flex-wrap content-start gap-x-4 text-sm text-ink-2 sm:min-h-16">
         {active ? (
           <>
             <span className="tabular-nums">{wordsOf(active)}</span>

@@ -24,6 +24,6 @@ export const monthInWords = (
   const before = month.yearBefore === null ? '' : `, ${formatMassWithUnit(month.yearBefore, unit)} a year before`;
   const parts = layers
     .filter(({ id }) => (month.layers[id] ?? 0) > 0)
-    .map((layer) => `${layerName(by, layer)} ${formatMass(month.layers[layer.id] ?? 0, unit)}`);
+    .map((layer) => `${layerName(by, layer)}\u00a0${formatMass(month.layers[layer.id] ?? 0, unit)}`);
   return `${head}${before}${parts.length ? `; ${parts.join(', ')}` : ''}.`;
 };
