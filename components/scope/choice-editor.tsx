@@ -48,38 +48,41 @@ export const ChoiceEditor = ({ dimension, choices, selected, onApply, close }: C
   };
 
   return (
-    <Command shouldFilter={false} label={words.many} className="flex min-h-0 flex-col" loop>
-      <p id={labelId} className="sr-only">
-        {words.many}
-      </p>
-      <Command.Input
-        value={typed}
-        onValueChange={setTyped}
-        placeholder={`Find a ${words.one}`}
-        className={
-          choices.length < LEAST_SEARCHED
-            ? 'sr-only'
-            : 'mb-2 h-11 w-full shrink-0 border border-edge bg-sheet px-3 text-base'
-        }
-      />
-      <Command.List aria-labelledby={labelId} className="max-h-72 min-h-0 overflow-y-auto sm:max-h-80">
-        {shown.map((choice) => (
-          <ChoiceItem
-            key={choice.value}
-            value={choice.value}
-            name={choiceName(dimension, choice.value)}
-            recoveries={known.has(choice.value) ? choice.recoveries : null}
-            checked={draft.includes(choice.value)}
-            onToggle={() => toggle(choice.value)}
-          />
-        ))}
-      </Command.List>
-      {found.length === 0 ? <p className="py-3 text-sm text-ink-2">Nothing here has that name.</p> : null}
-      {found.length > MOST_SHOWN ? (
-        <p className="pt-2 text-sm text-ink-2">
-          {formatCount(found.length - MOST_SHOWN)} more: type a part of the name.
+    // The buttons stand outside of the list: inside it Enter ticks a value, wherever the focus is.
+    <div className="flex min-h-0 flex-col">
+      <Command shouldFilter={false} label={words.many} className="flex min-h-0 flex-col" loop>
+        <p id={labelId} className="sr-only">
+          {words.many}
         </p>
-      ) : null}
+        <Command.Input
+          value={typed}
+          onValueChange={setTyped}
+          placeholder={`Find a ${words.one}`}
+          className={
+            choices.length < LEAST_SEARCHED
+              ? 'sr-only'
+              : 'mb-2 h-11 w-full shrink-0 border border-edge bg-sheet px-3 text-base'
+          }
+        />
+        <Command.List aria-labelledby={labelId} className="max-h-72 min-h-0 overflow-y-auto sm:max-h-80">
+          {shown.map((choice) => (
+            <ChoiceItem
+              key={choice.value}
+              value={choice.value}
+              name={choiceName(dimension, choice.value)}
+              recoveries={known.has(choice.value) ? choice.recoveries : null}
+              checked={draft.includes(choice.value)}
+              onToggle={() => toggle(choice.value)}
+            />
+          ))}
+        </Command.List>
+        {found.length === 0 ? <p className="py-3 text-sm text-ink-2">Nothing here has that name.</p> : null}
+        {found.length > MOST_SHOWN ? (
+          <p className="pt-2 text-sm text-ink-2">
+            {formatCount(found.length - MOST_SHOWN)} more: type a part of the name.
+          </p>
+        ) : null}
+      </Command>
       <div className="mt-3 flex gap-3 border-t border-rule pt-3">
         <Button tone="primary" className="flex-1" onClick={() => apply(draft)}>
           Show
@@ -88,6 +91,6 @@ export const ChoiceEditor = ({ dimension, choices, selected, onApply, close }: C
           All
         </Button>
       </div>
-    </Command>
+    </div>
   );
 };
