@@ -55,16 +55,13 @@ const lowInScope = (tx: Tx, { order, limit, cursor, ...scope }: LowRecoveriesQue
     .orderBy(sql`${ORDERED_BY[order].value} desc`, f.id)
     .limit(limit + 1);
 
+/** Records in scope by group of like jobs: a company has some dozens of groups, and they are added up here. */
 const judgedInScope = async (tx: Tx, scope: Scope): Promise<LowRecoveries['judged']> => {
-  const enough = sql`${limits.likeJobs} >= ${LEAST_LIKE_JOBS}`;
-  const [judged] = await tx
+  const groups = await tx
     .select({
-      records: sql<number>`count(*) filter (where ${enough})`.mapWith(Number),
-      groups: sql<number>`count(distinct (${limits.refrigerant}, ${limits.kind})) filter (where ${enough})`.mapWith(
-        Number,
-      ),
-      tooFewLikeJobs: sql<number>`count(*) filter (where not ${enough})`.mapWith(Number),
-      low: sql<number>`count(*) filter (where ${enough} and ${f.recoveryYield} < ${limits.lowerFence})`.mapWith(Number),
+      likeJobs: limits.likeJobs,
+      records: sql<number>`count(*)`.mapWith(Number),
+      low: sql<number>`count(*) filter (where ${f.recoveryYield} < ${limits.lowerFence})`.mapWith(Number),
     })
     .from(f)
     .innerJoin(
@@ -75,8 +72,18 @@ const judgedInScope = async (tx: Tx, scope: Scope): Promise<LowRecoveries['judge
         sql`${limits.kind} = coalesce(${f.category}, '')`,
       ),
     )
-    .where(and(inScope(scope), isNull(f.exclusion)));
-  return judged ?? { records: 0, groups: 0, tooFewLikeJobs: 0, low: 0 };
+    .where(and(inScope(scope), isNull(f.exclusion)))
+    .groupBy(limits.refrigerant, limits.kind, limits.likeJobs);
+  const judged = { records: 0, groups: 0, tooFewLikeJobs: 0, low: 0 };
+  for (const { likeJobs, records, low: lowOnes } of groups) {
+    if (likeJobs < LEAST_LIKE_JOBS) judged.tooFewLikeJobs += records;
+    else {
+      judged.groups += 1;
+      judged.records += records;
+      judged.low += lowOnes;
+    }
+  }
+  return judged;
 };
 
 /** One page of low recoveries in scope and how many records were judged at all. Throws 400 for a cursor it did not give. */
