@@ -9,6 +9,7 @@ export type Bench = { database: OpenDatabase; served: Served };
 
 const BENCHES: Record<string, () => Promise<{ run: (bench: Bench) => Promise<void> }>> = {
   import: () => import('@/tests/bench/import'),
+  analytics: () => import('@/tests/bench/analytics'),
 };
 
 /** `npm run bench` measures everything, `npm run bench -- import` one thing. Figures go to standard output. */

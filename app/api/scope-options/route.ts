@@ -1,7 +1,7 @@
 import { scopeOptions } from '@/analytics/scope-options/contract';
 import { getScopeOptions } from '@/analytics/scope-options/query';
 import { withCompany } from '@/db/client';
-import { getRoute } from '@/lib/api/route';
+import { getKeptRoute } from '@/lib/api/route';
 import { scopeOf } from '@/lib/auth/viewer';
 
-export const GET = getRoute(scopeOptions, (_query, viewer) => withCompany(scopeOf(viewer), getScopeOptions));
+export const GET = getKeptRoute(scopeOptions, (_query, viewer) => withCompany(scopeOf(viewer), getScopeOptions));

@@ -1,10 +1,10 @@
 import { technicianRecoveries } from '@/analytics/technicians/contract';
 import { getTechnicianRecoveries } from '@/analytics/technicians/query';
 import { readCompany } from '@/db/client';
-import { getRoute } from '@/lib/api/route';
+import { getKeptRoute } from '@/lib/api/route';
 import { scopeOf } from '@/lib/auth/viewer';
 
 /** What each technician recovered. */
-export const GET = getRoute(technicianRecoveries, (scope, viewer) =>
+export const GET = getKeptRoute(technicianRecoveries, (scope, viewer) =>
   readCompany(scopeOf(viewer), (tx) => getTechnicianRecoveries(tx, scope)),
 );
