@@ -14,7 +14,8 @@ import {
 } from '@/db/views/monthly-recovered-mass';
 import { recoveryFacts as f } from '@/db/views/recovery-facts';
 
-const VIEWS = {
+/** The view that is summed by month for each dimension. */
+export const MONTHLY_VIEWS = {
   refrigerant: monthlyRecoveredMassByRefrigerant,
   technician: monthlyRecoveredMassByTechnician,
   site: monthlyRecoveredMassBySite,
@@ -41,7 +42,7 @@ const byKeyInC = (key: SQL): SQL => sql`${key} collate "C"`;
 
 /** Rows out of the views that are summed by month; only for scopes that `answeredByMonth` admits. */
 export const rowsByMonth = (tx: Tx, scope: Scope, by: Dimension): Promise<GroupedRow[]> => {
-  const v = VIEWS[by];
+  const v = MONTHLY_VIEWS[by];
   const key = keyOf(v.key);
   return tx
     .select({

@@ -17,6 +17,9 @@ export type TestRecord = {
   category?: ApplianceCategory | null;
   jobType?: JobType | null;
   excluded?: boolean;
+  holdMinutes?: number;
+  /** Final vacuum as decimal kPa absolute. */
+  vacuumKpaAbs?: string;
   ref?: string;
 };
 
@@ -83,6 +86,8 @@ export const writeRecords = (scope: CompanyScope, records: readonly TestRecord[]
           nameplateChargeKg: r.chargeKg,
           recoveredMassKg: r.kg,
           massUnit: 'kg' as const,
+          holdMinutes: r.holdMinutes ?? null,
+          finalVacuumKpaAbs: r.vacuumKpaAbs ?? null,
           exclusion: r.excluded ? ('entry_error' as const) : null,
         })),
       )

@@ -122,6 +122,13 @@ export const ROUTES: Record<string, RouteRule> = {
     status: 200,
     records: (answer: { items: { recoveries: number }[] }) => sumOf(answer.items),
   },
+  // All 24 records are of one half-year; the only other period they have is itself.
+  'GET /api/trends/comparison': {
+    action: 'trends:read',
+    search: '?from=2025-01&to=2025-06&versus=2025-01..2025-06',
+    status: 200,
+    records: (answer: { comparison: { now: { recoveries: number } } }) => answer.comparison.now.recoveries,
+  },
   'GET /api/trends/monthly': {
     action: 'trends:read',
     status: 200,

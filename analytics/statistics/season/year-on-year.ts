@@ -22,12 +22,10 @@ export const sumOfJobs = (masses: readonly number[]): SumOfJobs => {
 };
 
 /**
- * One period's masses against an earlier one's. The ratio's interval is R exp(± 1.96 se), se² = Σm₁²/S₁² + Σm₀²/S₀² by
- * the delta method on the logarithm.
+ * One period's sum against an earlier one's. The ratio's interval is R exp(± 1.96 se), se² = Σm₁²/S₁² + Σm₀²/S₀² by the
+ * delta method on the logarithm.
  */
-export const yearOnYear = (massesNow: readonly number[], massesBefore: readonly number[]): YearOnYear => {
-  const now = sumOfJobs(massesNow);
-  const before = sumOfJobs(massesBefore);
+export const compareSums = (now: SumOfJobs, before: SumOfJobs): YearOnYear => {
   if (now.total === 0 || before.total === 0) {
     return { now, before, ratio: tooFew(2, Number(now.total > 0) + Number(before.total > 0), 'periods with mass') };
   }
@@ -36,3 +34,7 @@ export const yearOnYear = (massesNow: readonly number[], massesBefore: readonly 
   const factor = Math.exp(Z_95 * logStandardError);
   return { now, before, ratio: enough({ ratio, logStandardError, lower: ratio / factor, upper: ratio * factor }) };
 };
+
+/** The same from the masses of the jobs. */
+export const yearOnYear = (massesNow: readonly number[], massesBefore: readonly number[]): YearOnYear =>
+  compareSums(sumOfJobs(massesNow), sumOfJobs(massesBefore));
