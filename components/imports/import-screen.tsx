@@ -1,7 +1,8 @@
 'use client';
 
-import { useQuery } from '@tanstack/react-query';
+import { useQuery, useQueryClient } from '@tanstack/react-query';
 import Link from 'next/link';
+import { useEffect } from 'react';
 import { PageHead } from '@/components/ui/page-head';
 import { Failed, Loading } from '@/components/ui/states';
 import type { ImportView } from '@/lib/imports/contract';
@@ -26,9 +27,19 @@ const Stage = ({ view }: { view: ImportView }) => {
   return <ImportPreview key={view.finishedAt} view={view} verbs={verbs} />;
 };
 
+/** Once a file has been taken in, everything read before it may be out of date. */
+const useFreshFigures = (view: ImportView | undefined) => {
+  const queryClient = useQueryClient();
+  const takenAt = view?.status === 'done' && !view.dryRun ? view.finishedAt : null;
+  useEffect(() => {
+    if (takenAt) void queryClient.invalidateQueries({ predicate: ({ queryKey }) => queryKey[0] !== 'imports' });
+  }, [takenAt, queryClient]);
+};
+
 /** One file on its way into the records. */
 export const ImportScreen = ({ id }: { id: string }) => {
   const { data, error, isPending, refetch } = useQuery(importOptions(id));
+  useFreshFigures(data);
   return (
     <>
       <p className="mb-3 text-sm">
