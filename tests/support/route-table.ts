@@ -134,5 +134,6 @@ export const ROUTES: Record<string, RouteRule> = {
     status: 200,
     records: (answer: { totals: { recoveries: number } }) => answer.totals.recoveries,
   },
+  'GET /api/trends/pattern': { action: 'trends:read', status: 200 },
   'GET /api/work': { action: 'records:read', status: 200 },
 };

@@ -19,6 +19,8 @@ export type MonthlyDecomposition = {
   remainderFactor: number[];
   /** Months that were missing and were filled for the fit only. */
   filled: boolean[];
+  /** What was added to each mass before its logarithm, in the unit of the masses; factors are of mass + offset. */
+  offset: number;
   /** How much of what moves is season, 0 to 1, and whether that is enough to speak of one. */
   seasonStrength: number;
   steady: boolean;
@@ -52,6 +54,7 @@ export const decomposeMonths = (masses: GappySeries): Estimate<MonthlyDecomposit
     seasonFactor: parts.value.season.map(Math.exp),
     remainderFactor: parts.value.remainder.map(Math.exp),
     filled,
+    offset,
     seasonStrength,
     steady: seasonStrength >= STEADY_SEASON,
   });
