@@ -1,5 +1,5 @@
 import 'server-only';
-import { isNotNull, isNull, type SQL, type SQLWrapper, sql } from 'drizzle-orm';
+import { and, isNotNull, isNull, type SQL, type SQLWrapper, sql } from 'drizzle-orm';
 import { recoveryFacts as f } from '@/db/views/recovery-facts';
 
 /** An exact kilogram figure of SQL, rounded to the gram once, as a number. */
@@ -27,4 +27,15 @@ export const factFigures = {
   >`percentile_cont(0.5) within group (order by ${f.recoveryYield}) filter (where ${counted})`.mapWith(yieldOrNull),
   co2e: toGram(whereCounted(sql`sum(${f.co2eKg})`)),
   excluded: sql<number>`count(*) filter (where ${isNotNull(f.exclusion)})`.mapWith(Number),
+};
+
+const countWhere = (condition: SQL | undefined): SQL<number> =>
+  sql<number>`count(*) filter (where ${and(counted, condition)})`.mapWith(Number);
+
+/** How many records of a group state a hold and made one, and state a final vacuum and reached the required level. */
+export const habitFigures = {
+  holdStated: countWhere(isNotNull(f.held)),
+  held: countWhere(sql`${f.held}`),
+  vacuumStated: countWhere(isNotNull(f.downToLevel)),
+  downToLevel: countWhere(sql`${f.downToLevel}`),
 };

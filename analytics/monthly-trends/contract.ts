@@ -18,6 +18,9 @@ const figures = {
   co2e: massKg,
 };
 
+/** Records that state a hold and that made one, that state a final vacuum and that reached the level of 40 CFR 82.156. */
+const habits = { holdStated: count, held: count, vacuumStated: count, downToLevel: count };
+
 /** Recovered mass by month, split by one dimension. Entry errors are left out of everything but `excluded`. */
 export const monthlyTrends = defineContract({
   path: '/api/trends/monthly',
@@ -28,7 +31,7 @@ export const monthlyTrends = defineContract({
     /** Only months and keys with records; ordered by month, then key. */
     rows: z.array(z.object({ month, key: z.string(), ...figures })),
     /** The same figures of each month over all keys, with the mass of the same month a year before (null before the first record). */
-    months: z.array(z.object({ month, ...figures, totalYield: share, yearBefore: massKg.nullable() })),
+    months: z.array(z.object({ month, ...figures, ...habits, totalYield: share, yearBefore: massKg.nullable() })),
     /** Yields are null when nothing was recovered. Total yield is the ratio of the sums. */
     totals: z.object({ ...figures, medianYield: share.nullable(), totalYield: share.nullable() }),
     /** The running month in the company's zone, when the scope reaches it. */

@@ -1,6 +1,6 @@
 import 'server-only';
-import { and, gte, lt, sql } from 'drizzle-orm';
-import { factFigures, toGram } from '@/analytics/figures';
+import { and, gte, lt, type SQLWrapper, sql } from 'drizzle-orm';
+import { factFigures, habitFigures, toGram } from '@/analytics/figures';
 import { dayAfter, firstDay, type Scope } from '@/analytics/scope';
 import { inScope } from '@/analytics/scope-query';
 import type { Tx } from '@/db/client';
@@ -15,9 +15,15 @@ export type MonthSums = {
   medianYield: number | null;
   totalYield: number | null;
   co2e: number;
+  holdStated: number;
+  held: number;
+  vacuumStated: number;
+  downToLevel: number;
   /** Records left out as entry errors; told for the whole scope only. */
   excluded: number;
 };
+
+const counted = (column: SQLWrapper) => sql<number>`coalesce(sum(${column}), 0)`.mapWith(Number);
 
 /** Sums out of the months that stand ready; only for whole months narrowed by nothing. */
 export const sumsByMonth = async (tx: Tx, scope: Scope): Promise<MonthSums[]> => {
@@ -25,11 +31,15 @@ export const sumsByMonth = async (tx: Tx, scope: Scope): Promise<MonthSums[]> =>
     .select({
       month: sql<string | null>`${v.month}`,
       recoveredMass: toGram(sql`coalesce(sum(${v.recoveredMassKg}), 0)`),
-      recoveries: sql<number>`coalesce(sum(${v.recoveries}), 0)`.mapWith(Number),
+      recoveries: counted(v.recoveries),
       // Of one month there is one median; that of the whole scope needs the records.
       medianYield: sql<number | null>`min(${v.medianYield})`,
       totalYield: sql<number | null>`(sum(${v.recoveredMassKg}) / sum(${v.fullChargeKg}))::double precision`,
       co2e: toGram(sql`coalesce(sum(${v.co2eKg}), 0)`),
+      holdStated: counted(v.holdStated),
+      held: counted(v.held),
+      vacuumStated: counted(v.vacuumStated),
+      downToLevel: counted(v.downToLevel),
     })
     .from(v)
     .where(
@@ -53,7 +63,7 @@ export const sumsByMonth = async (tx: Tx, scope: Scope): Promise<MonthSums[]> =>
 export const sumsByRecord = async (tx: Tx, scope: Scope): Promise<MonthSums[]> => {
   const { fullCharge: _, ...figures } = factFigures;
   const rows = await tx
-    .select({ month: sql<string | null>`${f.month}`, ...figures })
+    .select({ month: sql<string | null>`${f.month}`, ...figures, ...habitFigures })
     .from(f)
     .where(inScope(scope))
     .groupBy(sql`rollup(${f.month})`)

@@ -45,7 +45,18 @@ const toLayers = (rows: MonthlyTrends['rows']): StackLayer[] => {
   ];
 };
 
-const NOTHING = { recoveredMass: 0, recoveries: 0, medianYield: null, totalYield: null, flagged: 0, co2e: 0 };
+const NOTHING = {
+  recoveredMass: 0,
+  recoveries: 0,
+  medianYield: null,
+  totalYield: null,
+  flagged: 0,
+  co2e: 0,
+  holdStated: 0,
+  held: 0,
+  vacuumStated: 0,
+  downToLevel: 0,
+};
 
 /**
  * Bars by month out of the route's answer: every month between the first and the last one with records, every layer in

@@ -66,6 +66,25 @@ test('counts CO2-equivalent with the AR4 potentials of the catalogue', async () 
   expect(rows.find((r) => r.key === 'R-410A')?.co2e).toBeCloseTo(8 * 2087.5, 0);
 });
 
+test('counts holds and levels among the records that state them, from months and from records alike', async () => {
+  const company = await newCompany();
+  await writeRecords(company.scope, [
+    // 40 CFR 82.156 Table 1: R-22 below 200 lb must reach 0 inHg, 101.3 kPa absolute.
+    { on: '2026-03-01', kg: '1', refrigerant: 'R-22', holdMinutes: 10, vacuumKpaAbs: '101.3' },
+    { on: '2026-03-02', kg: '1', refrigerant: 'R-22', holdMinutes: 0, vacuumKpaAbs: '120' },
+    { on: '2026-03-03', kg: '1', refrigerant: 'R-22' },
+    { on: '2026-03-04', kg: '1', refrigerant: 'R-22', holdMinutes: 9, vacuumKpaAbs: '50', excluded: true },
+  ]);
+  const token = await company.token('owner');
+  for (const query of ['', '?refrigerant=R-22&site=North%20Yard'])
+    expect((await ask(query, token)).months[0]).toMatchObject({
+      holdStated: 2,
+      held: 1,
+      vacuumStated: 2,
+      downToLevel: 1,
+    });
+});
+
 test('ends are inclusive in the address and half-open inside', async () => {
   const march = await ask('?from=2026-03&to=2026-03');
   expect(march.totals.recoveries).toBe(3);
