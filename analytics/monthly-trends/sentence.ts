@@ -1,4 +1,4 @@
-import { formatMassWithUnit, formatMonth, formatPercent, plural } from '@/lib/format';
+import { formatList, formatMassWithUnit, formatMonth, formatPercent, plural } from '@/lib/format';
 import type { DisplayUnit } from '@/lib/vocabulary';
 import type { MonthlyTrends } from './contract';
 import { lastWholeMonth, monthsAfter, type StackedMonth, type StackLayer, type Stacks } from './series';
@@ -13,13 +13,12 @@ const SAME = 0.005;
 /** From here on "so many times" is plainer than per cent. */
 const TIMES = 3;
 
-const comparison = (mass: number, yearBefore: number | null, month: string): string => {
-  const then = formatMonth(monthsAfter(month, -12));
-  if (yearBefore === null) return '.';
-  if (yearBefore === 0) return mass === 0 ? `, as in ${then}.` : `; nothing was recovered in ${then}.`;
-  const change = mass / yearBefore - 1;
+/** How a mass stands to another one, as the end of a sentence: `, 26% more than in November 2025.`; kg. */
+export const changeWords = (mass: number, before: number, then: string): string => {
+  if (before === 0) return mass === 0 ? `, as in ${then}.` : `; nothing was recovered in ${then}.`;
+  const change = mass / before - 1;
   if (Math.abs(change) < SAME) return `, as much as in ${then}.`;
-  if (change >= TIMES - 1) return `, ${(mass / yearBefore).toFixed(1)} times as much as in ${then}.`;
+  if (change >= TIMES - 1) return `, ${(mass / before).toFixed(1)} times as much as in ${then}.`;
   return `, ${formatPercent(Math.abs(change))} ${change > 0 ? 'more' : 'less'} than in ${then}.`;
 };
 
@@ -48,7 +47,7 @@ export const trendAnswer = ({ months }: Stacks, unit: DisplayUnit): Answer => {
     return {
       before: `${formatMonth(month)} brought in `,
       figure: formatMassWithUnit(recoveredMass, unit, 0),
-      after: comparison(recoveredMass, yearBefore, month),
+      after: yearBefore === null ? '.' : changeWords(recoveredMass, yearBefore, formatMonth(monthsAfter(month, -12))),
       month,
     };
   }
@@ -72,9 +71,24 @@ const mainPart = (layers: readonly StackLayer[], now: StackedMonth, then: Stacke
   return null;
 };
 
+/** A series with more empty months than this is a thin one: gaps are its nature. */
+const MOST_GAPS = 0.25;
+
+/** Whole months inside of the period in which nothing is recorded, the latest one aside: the answer speaks of it. */
+const gapNote = (months: readonly StackedMonth[]): string | null => {
+  const latest = lastWholeMonth(months);
+  const gaps = months.filter((month) => month.state === 'whole' && month.recoveries === 0 && month !== latest);
+  if (!gaps.length || gaps.length > months.length * MOST_GAPS) return null;
+  const names = formatList(
+    gaps.map(({ month }) => formatMonth(month)),
+    3,
+  );
+  return `Nothing is recorded in ${names}.`;
+};
+
 /**
  * What stands behind the answer, each a whole sentence: which part makes most of the change, a month without a year
- * before, records that stopped coming, records left out.
+ * before, gaps, records that stopped coming, records left out.
  */
 export const trendNotes = (
   { layers, months }: Stacks,
@@ -96,6 +110,8 @@ export const trendNotes = (
         `Most of the difference is ${nameOf(part.key)}: ${formatMassWithUnit(Math.abs(part.own), unit, 0)} ${direction}.`,
       );
   }
+  const gaps = gapNote(months);
+  if (gaps) notes.push(gaps);
   const last = months.at(-1)?.month;
   if (partialMonth && last && last < monthsAfter(partialMonth, -1))
     notes.push(`Nothing is recorded after ${formatMonth(last)}.`);

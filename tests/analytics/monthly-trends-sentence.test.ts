@@ -84,3 +84,16 @@ test('says when records stopped coming and what was left out', () => {
     '1 record is left out as an entry error.',
   ]);
 });
+
+test('single months without any record are named, those of a thin series are not', () => {
+  const recorded = (...months: string[]) => trendsOf(months.map((month) => [month, 'R-22', 5]));
+  expect(notes(recorded('2026-08', '2026-10', '2026-11'))).toContain('Nothing is recorded in September 2026.');
+  expect(
+    notes(recorded('2026-05', '2026-06', '2026-07', '2026-09', '2026-11', '2026-12', '2027-01', '2027-02')),
+  ).toContain('Nothing is recorded in August 2026 and October 2026.');
+  expect(notes(recorded('2026-01', '2026-11')).join(' ')).not.toContain('Nothing is recorded in');
+});
+
+test('records of nothing at all are said as they are', () => {
+  expect(answer(years(0, 0))).toBe('November 2026 brought in 0 kg, as in November 2025.');
+});

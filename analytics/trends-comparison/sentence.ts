@@ -1,0 +1,57 @@
+import { type Answer, changeWords } from '@/analytics/monthly-trends/sentence';
+import { endsMonth } from '@/lib/calendar';
+import { formatDay, formatMassWithUnit, formatMonth, formatMonthName, formatPercent } from '@/lib/format';
+import type { DisplayUnit } from '@/lib/vocabulary';
+import type { Comparison } from './contract';
+
+type Days = { from: string; to: string };
+
+/** Days in words: `November 2026`, `January to November 2026`, `Nov 1 to Dec 9, 2026`, `Dec 9, 2026`. */
+export const periodWords = ({ from, to }: Days): string => {
+  const sameYear = from.slice(0, 4) === to.slice(0, 4);
+  if (from.endsWith('-01') && endsMonth(to)) {
+    if (from.slice(0, 7) === to.slice(0, 7)) return formatMonth(from);
+    return `${sameYear ? formatMonthName(from) : formatMonth(from)} to ${formatMonth(to)}`;
+  }
+  if (from === to) return formatDay(from);
+  const beginning = sameYear ? formatDay(from).replace(/, \d{4}$/, '') : formatDay(from);
+  return `${beginning} to ${formatDay(to)}`;
+};
+
+const signed = (ratio: number): string => `${formatPercent(Math.abs(ratio - 1))} ${ratio >= 1 ? 'more' : 'less'}`;
+
+/** How far the change of a comparison can be believed, as a sentence; empty where there is nothing to doubt. */
+export const certaintyWords = ({ ratio, clear, now, before }: Comparison): string => {
+  if (!ratio) return '';
+  const range = `between ${signed(ratio.low)} and ${signed(ratio.high)}`;
+  if (clear) return `Jobs of such sizes would not differ so much by chance: the change lies ${range}.`;
+  const few = Math.min(now.recoveries, before.recoveries) < 30 ? 'So few jobs say little' : 'Jobs differ much in size';
+  return `${few}: it may lie ${range}, which is no clear change.`;
+};
+
+/** The period against the chosen other one, as the answer of the screen. */
+export const comparisonAnswer = ({ now, before }: Comparison, unit: DisplayUnit): Answer => ({
+  before: `${periodWords(now)} brought in `,
+  figure: formatMassWithUnit(now.recoveredMass, unit, 0),
+  after: changeWords(now.recoveredMass, before.recoveredMass, periodWords(before)),
+  month: null,
+});
+
+/** The longer view under an answer about one month: the whole period against a year before, and how sure that is. */
+export const comparisonNote = (comparison: Comparison, unit: DisplayUnit): string => {
+  const { now, before } = comparison;
+  const mass = formatMassWithUnit(now.recoveredMass, unit, 0);
+  const told = `${periodWords(now)} brought in ${mass}${changeWords(now.recoveredMass, before.recoveredMass, periodWords(before))}`;
+  return [told, certaintyWords(comparison)].filter(Boolean).join(' ');
+};
+
+/** What was left out so that like stands against like; empty when nothing was. */
+export const likeForLikeWords = ({ sameDays, shortened, now, before }: Comparison): string => {
+  const days = sameDays ? 'A month that is not whole stands against the same days of its counterpart.' : '';
+  const why = {
+    'to twelve months': 'A longer period would be compared with a part of itself: these are its last twelve months.',
+    'to the shorter one': `The two differ in length: ${periodWords(now)} is laid beside ${periodWords(before)}.`,
+    'to where records begin': 'Months before the first record are left out on both sides.',
+  } as const;
+  return [shortened ? why[shortened] : '', days].filter(Boolean).join(' ');
+};
