@@ -17,7 +17,7 @@ export type ScopeQuery = Partial<Record<Dimension | 'from' | 'to', string | stri
 const SCOPE_KEYS = new Set<string>(['from', 'to', 'unit', ...DIMENSIONS]);
 
 /** What an analytic route is asked for this scope. */
-export const scopeQuery = (scope: ScopeSelection): ScopeQuery => {
+export const scopeQuery = (scope: Omit<ScopeSelection, 'unit'>): ScopeQuery => {
   const query: ScopeQuery = {};
   if (scope.from) query.from = scope.from;
   if (scope.to) query.to = scope.to;

@@ -56,7 +56,7 @@ const lowInScope = (tx: Tx, { order, limit, cursor, ...scope }: LowRecoveriesQue
     .limit(limit + 1);
 
 /** Records in scope by group of like jobs: a company has some dozens of groups, and they are added up here. */
-const judgedInScope = async (tx: Tx, scope: Scope): Promise<LowRecoveries['judged']> => {
+export const getJudged = async (tx: Tx, scope: Scope): Promise<LowRecoveries['judged']> => {
   const groups = await tx
     .select({
       likeJobs: limits.likeJobs,
@@ -95,6 +95,6 @@ export const getLowRecoveries = async (tx: Tx, query: LowRecoveriesQuery): Promi
   return {
     items: page.map(({ place: _place, ...item }) => item),
     nextCursor: rows.length > limit && last ? writeCursor(order, { value: last.place, id: last.recoveryId }) : null,
-    judged: await judgedInScope(tx, scope),
+    judged: await getJudged(tx, scope),
   };
 };

@@ -1,4 +1,5 @@
 import { z } from 'zod';
+import { LIKE_JOBS_STANDINGS } from '@/analytics/figures/measures';
 import { scopeSchema } from '@/analytics/scope';
 import { defineContract } from '@/lib/api/contract';
 import { RECORD_FIELDS } from '@/lib/recoveries/fields';
@@ -80,6 +81,10 @@ export const recordListQuery = scopeSchema.safeExtend({
     .regex(/^[^\0]*$/, 'Expected text')
     .optional(),
   importId: z.uuid().optional(),
+  /** `none`: only records that count in figures; `entry_error`: only those left out. */
+  exclusion: z.enum(['none', 'entry_error']).optional(),
+  /** How the record stands among its like jobs; for who may read flags. */
+  likeJobs: z.enum(LIKE_JOBS_STANDINGS).optional(),
   limit: z.coerce.number().int().min(1).max(MOST_ROWS_A_PAGE).default(50),
   cursor: z.string().max(2000).optional(),
   format: z.enum(['json', 'csv']).default('json'),

@@ -10,8 +10,8 @@ import { FILE_COLUMNS, RECORD_FIELDS } from '@/lib/recoveries/fields';
 import { sameRecord, storedColumns } from '@/lib/recoveries/stored';
 import { type StoredRecord, storedTexts } from '@/lib/recoveries/stored-texts';
 import type { RecordListQuery } from './contract';
+import { recordsInList } from './filters';
 import { keysetOf } from './keyset';
-import { inList } from './query';
 
 const ROWS_A_FETCH = 1000;
 
@@ -26,7 +26,7 @@ const exportQuery = (tx: Tx, query: RecordListQuery, timeZone: string) =>
     .select({ ...storedColumns(timeZone), extra: r.extra })
     .from(f)
     .innerJoin(r, sameRecord)
-    .where(inList(query))
+    .where(recordsInList(query))
     .orderBy(keysetOf(query.sort).orderBy);
 
 type ExportRow = StoredRecord & { extra: Record<string, string> };
@@ -44,7 +44,7 @@ const toExportRows = (rows: Record<string, unknown>[]): ExportRow[] => {
 const extraColumns = async (tx: Tx, query: RecordListQuery): Promise<string[]> => {
   const keys = await tx.execute<{ key: string }>(
     sql`select distinct jsonb_object_keys(${r.extra}) as key from ${f} inner join ${r} on ${sameRecord}
-        where ${and(inList(query), sql`${r.extra} <> '{}'::jsonb`)} order by 1`,
+        where ${and(recordsInList(query), sql`${r.extra} <> '{}'::jsonb`)} order by 1`,
   );
   const known: readonly string[] = RECOVERY_FIELDS;
   return keys.rows.map((row) => row.key).filter((key) => !known.includes(key));

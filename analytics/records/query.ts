@@ -1,40 +1,19 @@
 import 'server-only';
-import { and, eq, ilike, or, type SQL, sql } from 'drizzle-orm';
-import { inScope } from '@/analytics/scope-query';
+import { and, sql } from 'drizzle-orm';
 import type { Tx } from '@/db/client';
 import { recoveryFacts as f } from '@/db/views/recovery-facts';
 import type { RecordList, RecordListQuery } from './contract';
 import { writeCursor } from './cursor';
+import { recordsInList } from './filters';
 import { keysetOf } from './keyset';
 import { rowColumns, toRow } from './row';
-
-/** A search text as a LIKE pattern that means just this text, anywhere. */
-const containing = (text: string): string => `%${text.replace(/[\\%_]/g, '\\$&')}%`;
-
-const found = (text: string): SQL | undefined => {
-  const pattern = containing(text);
-  return or(
-    ilike(f.recordRef, pattern),
-    ilike(f.technician, pattern),
-    ilike(f.site, pattern),
-    ilike(f.appliance, pattern),
-  );
-};
-
-/** The records that a list query means, whatever page of them. */
-export const inList = (query: RecordListQuery): SQL | undefined =>
-  and(
-    inScope(query),
-    query.q ? found(query.q) : undefined,
-    query.importId ? eq(f.importId, query.importId) : undefined,
-  );
 
 /** How many records the query means, pages aside. */
 const countRecords = async (tx: Tx, query: RecordListQuery): Promise<number> => {
   const [row] = await tx
     .select({ total: sql<number>`count(*)`.mapWith(Number) })
     .from(f)
-    .where(inList(query));
+    .where(recordsInList(query));
   return row?.total ?? 0;
 };
 
@@ -45,7 +24,7 @@ export const getRecords = async (tx: Tx, query: RecordListQuery): Promise<Record
   const fetched = await tx
     .select({ ...rowColumns, sortText: keyset.sortText })
     .from(f)
-    .where(and(inList(query), keyset.after))
+    .where(and(recordsInList(query), keyset.after))
     .orderBy(keyset.orderBy)
     .limit(limit + 1);
   const page = fetched.slice(0, limit);

@@ -56,6 +56,12 @@ const sumOf = (items: { recoveries: number }[]) => items.reduce((sum, { recoveri
 export const ROUTES: Record<string, RouteRule> = {
   'GET /api/auth/[...nextauth]': { open: 'signing in is for those who are not signed in' },
   'POST /api/auth/[...nextauth]': { open: 'signing in is for those who are not signed in' },
+  'GET /api/explain': {
+    action: 'records:read',
+    search: '?measure=recoveries',
+    status: 200,
+    records: (answer: { value: number }) => answer.value,
+  },
   'GET /api/health': { open: 'whoever watches the server has no account; it says nothing about a company' },
   'GET /api/imports': { action: 'imports:manage', status: 200 },
   'POST /api/imports': { action: 'imports:manage', send: recoveryFile, status: 202 },

@@ -1,0 +1,87 @@
+import 'server-only';
+import { and, eq, isNull, sql } from 'drizzle-orm';
+import { factFigures, toGram } from '@/analytics/figures';
+import type { Figure } from '@/analytics/figures/figure';
+import { getJudged } from '@/analytics/low-recoveries/query';
+import type { Scope } from '@/analytics/scope';
+import { inScope } from '@/analytics/scope-query';
+import type { Tx } from '@/db/client';
+import { refrigerants } from '@/db/schema/refrigerants';
+import { recoveryFacts as f } from '@/db/views/recovery-facts';
+import type { ExplainParts } from './contract';
+
+type Computed = { value: number | null; parts: ExplainParts };
+type Sums = {
+  recoveredMass: number;
+  fullCharge: number;
+  recoveries: number;
+  totalYield: number | null;
+  medianYield: number | null;
+  co2e: number;
+};
+
+/** The two yields in the middle of those that count; PostgreSQL's percentile_cont is their mean. */
+const getMiddleYields = async (tx: Tx, scope: Scope) => {
+  const [middle] = await tx
+    .select({
+      lower: sql<number | null>`percentile_disc(0.5) within group (order by ${f.recoveryYield})`,
+      upper: sql<number | null>`percentile_disc(0.5) within group (order by ${f.recoveryYield} desc)`,
+    })
+    .from(f)
+    .where(and(inScope(scope), isNull(f.exclusion)));
+  return { lower: middle?.lower ?? null, upper: middle?.upper ?? null };
+};
+
+const getGwpTerms = (tx: Tx, scope: Scope) =>
+  tx
+    .select({
+      refrigerant: f.refrigerant,
+      recoveredMass: factFigures.recoveredMass,
+      gwp: refrigerants.gwpAr4,
+      co2e: toGram(sql`sum(${f.co2eKg})`),
+    })
+    .from(f)
+    .innerJoin(refrigerants, eq(refrigerants.designation, f.refrigerant))
+    .where(and(inScope(scope), isNull(f.exclusion)))
+    .groupBy(f.refrigerant, refrigerants.gwpAr4)
+    .orderBy(sql`sum(${f.co2eKg}) desc, ${f.refrigerant}`);
+
+const getAppliances = async (tx: Tx, scope: Scope): Promise<number> => {
+  const [row] = await tx
+    .select({ appliances: sql<number>`count(distinct ${f.applianceId})`.mapWith(Number) })
+    .from(f)
+    .where(and(inScope(scope), isNull(f.exclusion)));
+  return row?.appliances ?? 0;
+};
+
+/** The value of a measure over a scope, with what its formula is made of. */
+export const computeMeasure = async (
+  tx: Tx,
+  measure: Figure['measure'],
+  scope: Scope,
+  { recoveredMass, fullCharge, recoveries, totalYield, medianYield, co2e }: Sums,
+): Promise<Computed> => {
+  switch (measure) {
+    case 'recoveredMass':
+      return { value: recoveredMass, parts: { kind: 'sum', recoveries } };
+    case 'fullCharge':
+      return { value: fullCharge, parts: { kind: 'sum', recoveries } };
+    case 'recoveries':
+      return { value: recoveries, parts: { kind: 'count' } };
+    case 'appliances':
+      return { value: await getAppliances(tx, scope), parts: { kind: 'count' } };
+    case 'totalYield':
+      return { value: totalYield, parts: { kind: 'ratio', recoveredMass, fullCharge } };
+    case 'medianYield':
+      return { value: medianYield, parts: { kind: 'median', recoveries, ...(await getMiddleYields(tx, scope)) } };
+    case 'co2e':
+      return { value: co2e, parts: { kind: 'gwp', refrigerants: await getGwpTerms(tx, scope) } };
+    case 'flagged':
+    case 'judged':
+    case 'unjudged': {
+      const judged = await getJudged(tx, scope);
+      const counts = { flagged: judged.low, judged: judged.records, unjudged: judged.tooFewLikeJobs };
+      return { value: counts[measure], parts: { kind: 'standing', judged: judged.records, groups: judged.groups } };
+    }
+  }
+};

@@ -1,0 +1,46 @@
+import 'server-only';
+import { and, eq, ilike, isNotNull, isNull, or, type SQL, sql } from 'drizzle-orm';
+import type { LikeJobsStanding } from '@/analytics/figures/measures';
+import { inScope } from '@/analytics/scope-query';
+import { recoveryFacts as f } from '@/db/views/recovery-facts';
+import { yieldLimits as limits, lowRecoveries as low } from '@/db/views/yield-limits';
+import { LEAST_LIKE_JOBS } from '@/lib/like-jobs';
+import type { RecordListQuery } from './contract';
+
+/** A search text as a LIKE pattern that means just this text, anywhere. */
+const containing = (text: string): string => `%${text.replace(/[\\%_]/g, '\\$&')}%`;
+
+const found = (text: string): SQL | undefined => {
+  const pattern = containing(text);
+  return or(
+    ilike(f.recordRef, pattern),
+    ilike(f.technician, pattern),
+    ilike(f.site, pattern),
+    ilike(f.appliance, pattern),
+  );
+};
+
+const enoughLikeJobs = sql`(${f.refrigerant}, coalesce(${f.category}, '')) in (select ${limits.refrigerant}, ${limits.kind} from ${limits} where ${limits.likeJobs} >= ${LEAST_LIKE_JOBS})`;
+
+const STANDS: Record<LikeJobsStanding, SQL> = {
+  below: sql`${f.id} in (select ${low.recoveryId} from ${low})`,
+  enough: enoughLikeJobs,
+  few: sql`not ${enoughLikeJobs}`,
+};
+
+/** What narrows a list of records besides the page and its order. */
+type RecordFilters = Pick<
+  RecordListQuery,
+  'from' | 'to' | 'branch' | 'refrigerant' | 'technician' | 'site' | 'category' | 'jobType' | 'q' | 'importId'
+> &
+  Partial<Pick<RecordListQuery, 'exclusion' | 'likeJobs'>>;
+
+/** The records that a list query means, whatever page of them. */
+export const recordsInList = ({ q, importId, exclusion, likeJobs, ...scope }: RecordFilters): SQL | undefined =>
+  and(
+    inScope(scope),
+    q ? found(q) : undefined,
+    importId ? eq(f.importId, importId) : undefined,
+    exclusion ? (exclusion === 'none' ? isNull(f.exclusion) : isNotNull(f.exclusion)) : undefined,
+    likeJobs ? STANDS[likeJobs] : undefined,
+  );

@@ -1,0 +1,219 @@
+import fc from 'fast-check';
+import { beforeAll, expect, test } from 'vitest';
+import { DIMENSIONS } from '@/analytics/dimensions';
+import type { Explained } from '@/analytics/explain/contract';
+import { type Figure, type FigureScope, figureRecords, monthInScope } from '@/analytics/figures/figure';
+import { MEASURES, type Measure } from '@/analytics/figures/measures';
+import type { RecordList, RecordRow } from '@/analytics/records/contract';
+import { scopeQuery } from '@/analytics/scope-address';
+import { GET as explainRoute } from '@/app/api/explain/route';
+import { GET as lowRoute } from '@/app/api/low-recoveries/route';
+import { GET as recordsRoute } from '@/app/api/recoveries/route';
+import { GET as sitesRoute } from '@/app/api/sites/route';
+import { GET as techniciansRoute } from '@/app/api/technicians/route';
+import { GET as trendsRoute } from '@/app/api/trends/monthly/route';
+import { searchString } from '@/lib/api/client';
+import { apiRequest, newCompany } from '../support/company';
+import { randomRecords } from '../support/random-records';
+import { randomScopes } from '../support/random-scopes';
+import { writeRecords } from '../support/records';
+
+const RUNS = 500;
+const company = await newCompany();
+let owner = '';
+
+type Route = (request: Request, context: never) => Promise<Response>;
+// Each route answers by its contract, which its own test checks.
+const ask = async <Answer>(route: Route, address: string, token = owner): Promise<Answer> => {
+  const response = await route(apiRequest(address, token), undefined as never);
+  expect(response.status, address).toBe(200);
+  return (await response.json()) as Answer;
+};
+const explained = ({ measure, scope }: Figure, token = owner) =>
+  ask<Explained>(explainRoute, `/api/explain${searchString({ ...scopeQuery(scope), measure })}`, token);
+
+beforeAll(async () => {
+  owner = await company.token('owner');
+  await writeRecords(company.scope, randomRecords(360, 20_261_201));
+});
+
+const sumGrams = (rows: RecordRow[], of: 'recoveredMass' | 'fullCharge') =>
+  rows.reduce((sum, row) => sum + Math.round(row[of] * 1000), 0);
+const middleOf = (rows: RecordRow[]): number | null => {
+  const yields = rows.map((row) => row.yield).sort((a, b) => a - b);
+  const half = (yields.length - 1) / 2;
+  const [lower, upper] = [yields[Math.floor(half)], yields[Math.ceil(half)]];
+  return lower === undefined || upper === undefined ? null : (lower + upper) / 2;
+};
+
+/** The value of a measure worked out by hand from the records that the list gave. */
+const byHand = (measure: Measure, rows: RecordRow[], { parts }: Explained): number | null => {
+  switch (measure) {
+    case 'recoveredMass':
+    case 'fullCharge':
+      return sumGrams(rows, measure) / 1000;
+    case 'totalYield':
+      return rows.length ? sumGrams(rows, 'recoveredMass') / sumGrams(rows, 'fullCharge') : null;
+    case 'medianYield':
+      return middleOf(rows);
+    case 'appliances':
+      return new Set(rows.map((row) => `${row.site} ${row.appliance}`)).size;
+    case 'co2e': {
+      const gwps = new Map(parts.kind === 'gwp' ? parts.refrigerants.map((one) => [one.refrigerant, one.gwp]) : []);
+      return rows.reduce((sum, row) => sum + row.recoveredMass * (gwps.get(row.refrigerant) ?? Number.NaN), 0);
+    }
+    default:
+      return rows.length;
+  }
+};
+
+const same = (actual: number | null, expected: number | null, what: string) => {
+  if (actual === null || expected === null) expect(actual, what).toBe(expected);
+  else expect(Math.abs(actual - expected), what).toBeLessThan(Math.max(1e-9, Math.abs(expected) * 1e-9, 0.0005 * Number(what.startsWith('co2e'))) + 1e-12);
+};
+
+/** An address in parts, whatever their order. */
+const partsOf = (address: string): string[] => address.split(/[?&]/).sort();
+
+/** A figure as the screen has it is what the explanation says and what the records behind it come to. */
+const agrees = async (figure: Figure, shown: number | null) => {
+  const answer = await explained(figure);
+  const what = `${figure.measure} of ${JSON.stringify(scopeQuery(figure.scope))}`;
+  same(answer.value, shown, `${what}, explained`);
+  expect(partsOf(answer.records)).toEqual(partsOf(`/api/recoveries${searchString(figureRecords(figure))}`));
+  const list = await ask<RecordList>(recordsRoute, `${answer.records}&limit=500`);
+  expect(list.total, what).toBe(answer.count);
+  expect(list.items.length, what).toBe(answer.count);
+  expect(sumGrams(list.items, 'recoveredMass'), what).toBe(Math.round(answer.sum * 1000));
+  expect(list.items.every((row) => row.exclusion === null)).toBe(true);
+  same(byHand(figure.measure, list.items, answer), shown, `${what}, by hand`);
+};
+
+type Cell = { scope: FigureScope; figures: Partial<Record<Measure, number | null>> };
+
+/** Every figure that the screens of a scope show, with the records it should open. */
+const cellsOf = async (scope: FigureScope, by: (typeof DIMENSIONS)[number]): Promise<Cell[][]> => {
+  const query = searchString(scopeQuery(scope));
+  const and = query ? '&' : '?';
+  type Rows = { rows: { month: string; key: string }[]; months: { month: string }[]; totals: object };
+  const trends = await ask<Rows>(trendsRoute, `/api/trends/monthly${query}${and}by=${by}`);
+  const technicians = await ask<{ items: { technician: string }[] }>(techniciansRoute, `/api/technicians${query}`);
+  const sites = await ask<{ items: { site: string }[] }>(sitesRoute, `/api/sites${query}`);
+  const low = await ask<{ judged: { records: number; low: number; tooFewLikeJobs: number } }>(lowRoute, `/api/low-recoveries${query}`);
+  const { records: judged, low: flagged, tooFewLikeJobs: unjudged } = low.judged;
+  // Figures are read by the names of measures; what is no measure is not looked at.
+  const cell = (own: FigureScope, figures: object): Cell => ({ scope: own, figures });
+  return [
+    trends.rows.map((row) => cell({ ...monthInScope(scope, row.month), [by]: [row.key] }, row)),
+    trends.months.map((row) => cell(monthInScope(scope, row.month), row)),
+    [cell(scope, trends.totals)],
+    technicians.items.map((row) => cell({ ...scope, technician: [row.technician] }, row)),
+    sites.items.map((row) => cell({ ...scope, site: [row.site] }, row)),
+    [cell(scope, { judged, flagged, unjudged })],
+  ];
+};
+
+test('what a screen shows, what is explained and what the records come to are one', { timeout: 600_000 }, async () => {
+  const told = new Map<Measure, number>();
+  const property = fc.asyncProperty(
+    randomScopes,
+    fc.constantFrom(...DIMENSIONS),
+    fc.infiniteStream(fc.nat(1000)),
+    async (scope, by, picks) => {
+      const pick = <Value>(values: Value[]): Value | undefined => values[Number(picks.next().value) % values.length];
+      for (const cells of await cellsOf(scope, by)) {
+        const cell = pick(cells);
+        const measure = cell && pick(MEASURES.filter((one) => cell.figures[one] !== undefined));
+        if (!measure) continue;
+        told.set(measure, (told.get(measure) ?? 0) + 1);
+        await agrees({ measure, scope: cell.scope }, cell.figures[measure] ?? null);
+      }
+    },
+  );
+  await fc.assert(property, { numRuns: RUNS, seed: 1201, endOnFailure: true });
+  // Each measure was met often enough that its agreement says something.
+  expect([...told.keys()].sort()).toEqual([...MEASURES].sort());
+  expect(Math.min(...told.values())).toBeGreaterThan(20);
+});
+
+const NOTHING: FigureScope = {
+  from: null,
+  to: null,
+  refrigerant: [],
+  technician: [],
+  site: [],
+  branch: [],
+  category: [],
+  jobType: [],
+};
+
+test('says how it was computed, what was left out and how fresh it is', async () => {
+  const small = await newCompany();
+  const token = await small.token('owner');
+  await writeRecords(small.scope, [
+    { on: '2026-03-01', kg: '8', chargeKg: '10' },
+    { on: '2026-03-02', kg: '4', chargeKg: '10' },
+    { on: '2026-03-03', kg: '900', excluded: true },
+    { on: '2026-04-30', kg: '1', refrigerant: 'R-22' },
+  ]);
+  const march = { ...NOTHING, from: '2026-03', to: '2026-03' };
+  const total = await explained({ measure: 'totalYield', scope: march }, token);
+  // (8 + 4) / (10 + 10).
+  expect(total).toMatchObject({
+    value: 0.6,
+    unit: 'share',
+    count: 2,
+    sum: 12,
+    parts: { kind: 'ratio', recoveredMass: 12, fullCharge: 20 },
+    leftOut: [{ reason: 'entry_error', count: 1 }],
+    fresh: { recordsUntil: '2026-04-30' },
+    records: '/api/recoveries?from=2026-03&to=2026-03&exclusion=none',
+  });
+  expect(total.formula.filled.replaceAll('\u00a0', ' ')).toBe('12.0 kg ÷ 20.0 kg = 60.0%');
+  expect(total.source).toContain('40 CFR 82.152');
+  expect(Date.parse(total.fresh.lastChangeAt ?? '')).toBeGreaterThan(Date.now() - 3_600_000);
+  const median = await explained({ measure: 'medianYield', scope: march }, token);
+  expect(median.parts).toEqual({ kind: 'median', recoveries: 2, lower: 0.4, upper: 0.8 });
+  expect(median.formula.filled).toBe('Between numbers 1 and 2 of 2 in order: (40.0% + 80.0%) ÷ 2 = 60.0%');
+  // HCFC-22 has a GWP of 1810 in AR4 (40 CFR 98, Table A-1).
+  const co2e = await explained({ measure: 'co2e', scope: { ...NOTHING, refrigerant: ['R-22'] } }, token);
+  expect(co2e).toMatchObject({ value: 1810, parts: { refrigerants: [{ refrigerant: 'R-22', recoveredMass: 1, gwp: 1810 }] } });
+});
+
+test('a company without a record has figures without a value', async () => {
+  const token = await (await newCompany()).token('owner');
+  expect(await explained({ measure: 'medianYield', scope: NOTHING }, token)).toMatchObject({
+    value: null,
+    count: 0,
+    sum: 0,
+    leftOut: [],
+    fresh: { recordsUntil: null, lastChangeAt: null },
+  });
+  expect(await explained({ measure: 'recoveredMass', scope: NOTHING }, token)).toMatchObject({ value: 0, count: 0 });
+});
+
+test('an unknown measure or a scope that is none is refused with its place', async () => {
+  const refused = async (search: string) => {
+    const response = await explainRoute(apiRequest(`/api/explain${search}`, owner), undefined);
+    expect(response.status).toBe(400);
+    return ((await response.json()) as { errors: { path: string }[] }).errors.map(({ path }) => path);
+  };
+  expect(await refused('')).toEqual(['measure']);
+  expect(await refused('?measure=weight')).toEqual(['measure']);
+  expect(await refused('?measure=recoveries&from=2026-13')).toEqual(['from']);
+  expect(await refused('?measure=recoveries&category=chiller')).toEqual(['category']);
+});
+
+test('how recoveries stand among like jobs is for who may read flags', async () => {
+  const statusOf = async (route: Route, address: string, token: string) =>
+    (await route(apiRequest(address, token), undefined as never)).status;
+  const auditor = await company.token('auditor');
+  const trainer = await company.token('trainer');
+  for (const measure of ['flagged', 'judged', 'unjudged'] as const) {
+    expect(await statusOf(explainRoute, `/api/explain?measure=${measure}`, auditor)).toBe(403);
+    expect(await statusOf(explainRoute, `/api/explain?measure=${measure}`, trainer)).toBe(200);
+  }
+  expect(await statusOf(recordsRoute, '/api/recoveries?likeJobs=below', auditor)).toBe(403);
+  expect(await statusOf(recordsRoute, '/api/recoveries?exclusion=none', auditor)).toBe(200);
+  expect(await statusOf(recordsRoute, '/api/recoveries?exclusion=other', auditor)).toBe(400);
+});
