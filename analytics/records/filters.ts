@@ -20,12 +20,14 @@ const found = (text: string): SQL | undefined => {
   );
 };
 
-const enoughLikeJobs = sql`(${f.refrigerant}, coalesce(${f.category}, '')) in (select ${limits.refrigerant}, ${limits.kind} from ${limits} where ${limits.likeJobs} >= ${LEAST_LIKE_JOBS})`;
+// IS TRUE keeps a set from being joined: of a company that was never analysed the planner expects one row, and would
+// work the set out anew for each record.
+const enoughLikeJobs = sql`((${f.refrigerant}, coalesce(${f.category}, '')) in (select ${limits.refrigerant}, ${limits.kind} from ${limits} where ${limits.likeJobs} >= ${LEAST_LIKE_JOBS})) is true`;
 
 const STANDS: Record<LikeJobsStanding, SQL> = {
-  below: sql`${f.id} in (select ${low.recoveryId} from ${low})`,
+  below: sql`(${f.id} in (select ${low.recoveryId} from ${low})) is true`,
   enough: enoughLikeJobs,
-  few: sql`not ${enoughLikeJobs}`,
+  few: sql`not (${enoughLikeJobs})`,
 };
 
 /** What narrows a list of records besides the page and its order. */

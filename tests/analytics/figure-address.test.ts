@@ -1,13 +1,22 @@
 import fc from 'fast-check';
 import { expect, test } from 'vitest';
 import { DIMENSIONS } from '@/analytics/dimensions';
-import { type FigureScope, figureOfAddress, figureParams, figureRecords, isFigureKey } from '@/analytics/figures/figure';
+import {
+  type FigureScope,
+  figureOfAddress,
+  figureParams,
+  figureRecords,
+  isFigureKey,
+} from '@/analytics/figures/figure';
 import { MEASURES } from '@/analytics/figures/measures';
 
 const month = fc.constantFrom('2024-12', '2026-01', '2026-11');
 const moment = fc.option(fc.oneof(month, fc.constantFrom('2025-03-15', '2026-11-30')));
 // Names are any text that a record can hold: commas, ampersands, plus signs, what looks like an address.
-const name = fc.oneof(fc.string({ minLength: 1, maxLength: 12 }), fc.constantFrom('R-22', 'unstated', 'a&b=c', 'A, B', '100 %+'));
+const name = fc.oneof(
+  fc.string({ minLength: 1, maxLength: 12 }),
+  fc.constantFrom('R-22', 'unstated', 'a&b=c', 'A, B', '100 %+'),
+);
 const names = fc.uniqueArray(name, { maxLength: 3 });
 const scopes: fc.Arbitrary<FigureScope> = fc.record({
   from: moment,
@@ -33,14 +42,20 @@ const NOTHING: FigureScope = {
 
 test('any figure comes back out of the address of any screen as it went in', () => {
   fc.assert(
-    fc.property(fc.constantFrom(...MEASURES), scopes, scopes, fc.array(fc.constantFrom(...DIMENSIONS)), (measure, page, own, narrowed) => {
-      const scope = { ...page, from: own.from, to: own.to };
-      for (const dimension of narrowed) scope[dimension] = own[dimension];
-      const params = figureParams({ measure, scope }, page);
-      const address = new URLSearchParams([['from', 'x'], ['by', 'site'], ...params]);
-      expect(figureOfAddress(new URLSearchParams(address.toString()), page)).toEqual({ measure, scope });
-      expect(params.every(([key]) => isFigureKey(key))).toBe(true);
-    }),
+    fc.property(
+      fc.constantFrom(...MEASURES),
+      scopes,
+      scopes,
+      fc.array(fc.constantFrom(...DIMENSIONS)),
+      (measure, page, own, narrowed) => {
+        const scope = { ...page, from: own.from, to: own.to };
+        for (const dimension of narrowed) scope[dimension] = own[dimension];
+        const params = figureParams({ measure, scope }, page);
+        const address = new URLSearchParams([['from', 'x'], ['by', 'site'], ...params]);
+        expect(figureOfAddress(new URLSearchParams(address.toString()), page)).toEqual({ measure, scope });
+        expect(params.every(([key]) => isFigureKey(key))).toBe(true);
+      },
+    ),
     { numRuns: 1000, seed: 7 },
   );
 });
