@@ -5,11 +5,9 @@ import { decode } from 'next-auth/jwt';
 import { cache } from 'react';
 import { env } from '@/lib/env';
 import { type Action, may } from './permissions';
+import { SESSION_COOKIES } from './session-cookie';
 import { viewerOfSession } from './sessions';
 import type { Viewer } from './viewer';
-
-/** Names of next-auth's session cookie, without and with TLS in front. */
-const SESSION_COOKIES = ['next-auth.session-token', '__Secure-next-auth.session-token'];
 
 /** The session token out of next-auth's encrypted cookie, or null. */
 export const sessionTokenOf = async (cookie: (name: string) => string | undefined): Promise<string | null> => {
