@@ -25,9 +25,13 @@ const addressOf = async (page: Page, path: string): Promise<string> => {
 const open = async (page: Page, path: string): Promise<void> => {
   await page.goto(await addressOf(page, path));
   await expect(page.getByRole('heading', { level: 1 })).toBeVisible();
-  await page.waitForLoadState('networkidle');
+  // Places held for what is still being read or drawn, and figures that are about to be replaced.
+  await expect(page.getByRole('status').filter({ hasText: /^(Reading|Drawing)/ })).toHaveCount(0);
   await expect(page.locator('[aria-busy=true]')).toHaveCount(0);
 };
+
+// A long table takes axe-core a while.
+test.describe.configure({ timeout: 120_000 });
 
 const INSIDE = findPages('(app)');
 

@@ -1,4 +1,4 @@
-import { test as base, type ConsoleMessage, expect, type Page } from '@playwright/test';
+import { test as base, type ConsoleMessage, expect, type Locator, type Page } from '@playwright/test';
 import type { Role } from '../../lib/vocabulary';
 import { signInByRequest } from './sign-in';
 
@@ -61,3 +61,7 @@ export const test = base.extend<Options, { stateOf: (role: Who) => Promise<State
     { auto: true },
   ],
 });
+
+/** A table by its name, which stands on the part that scrolls around it. */
+export const tableOf = (page: Page, name: string | RegExp): Locator =>
+  page.getByRole('group', { name }).getByRole('table');
