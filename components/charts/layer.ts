@@ -11,3 +11,6 @@ export type ChartMonth = {
   /** Not over, or cut: drawn hatched. */
   unfinished: boolean;
 };
+
+/** A numbered note over the months that it touches. */
+export type ChartNote = { id: string; no: number; first: string; last: string };

@@ -3,6 +3,7 @@ import { expect, test } from 'vitest';
 import { everyMonth } from '@/analytics/monthly-trends/series';
 import { spreadLabels } from '@/components/charts/end-labels';
 import { tickedMonths, tickName, tickYear } from '@/components/charts/month-ticks';
+import { placeNotes } from '@/components/charts/note-lanes';
 import { layerColours } from '@/components/trends/layer-colours';
 
 const ids = (labels: { id: string }[]) => labels.map(({ id }) => id);
@@ -63,4 +64,26 @@ test('no two layers of a picture share a colour', () => {
   expect(new Set(colours).size).toBe(layers.length);
   expect(colours.slice(0, 2)).toEqual(['var(--refrigerant-r-410a)', 'var(--refrigerant-r-22)']);
   expect(new Set(Object.values(layerColours('site', layers))).size).toBe(layers.length);
+});
+
+test('notes stand over the months that they touch, each in a lane where it meets no other', () => {
+  const months = everyMonth('2026-01', '2026-06');
+  const note = (no: number, first: string, last = first) => ({ id: `n${no}`, no, first, last });
+  const placed = placeNotes(
+    [
+      note(1, '2025-11', '2026-02'),
+      note(2, '2026-02'),
+      note(3, '2026-03', '2026-09'),
+      note(4, '2026-07'),
+      note(5, '2025-12'),
+    ],
+    months,
+  );
+  // The first is cut to the picture, the third too; the fourth and fifth are not in it.
+  expect(placed.map(({ no, first, last, lane }) => [no, first, last, lane])).toEqual([
+    [1, '2026-01', '2026-02', 0],
+    [2, '2026-02', '2026-02', 1],
+    [3, '2026-03', '2026-06', 0],
+  ]);
+  expect(placeNotes([note(1, '2026-01')], [])).toEqual([]);
 });
