@@ -1,11 +1,12 @@
 'use client';
 
-import { useMemo } from 'react';
+import { type ReactNode, useMemo } from 'react';
 import type { Dimension } from '@/analytics/dimensions';
 import type { Stacks } from '@/analytics/monthly-trends/series';
 import type { ScopeSelection } from '@/analytics/scope-address';
 import type { ChartLayer, ChartMonth } from '@/components/charts/layer';
 import { StackedMonthsFigure } from '@/components/charts/stacked-months-figure';
+import { chartNotes, type NumberedNote, notesOfMonth } from '@/components/notes/numbered';
 import { kgToUnit } from '@/lib/units';
 import { recordsHref } from './records-link';
 import { layerName, monthInWords } from './wording';
@@ -17,10 +18,21 @@ const MOST_COMPARED = 37;
 export const comparesYears = ({ months }: Stacks): boolean =>
   months.length <= MOST_COMPARED && months.some(({ yearBefore, state }) => yearBefore !== null && state === 'whole');
 
-type MonthsChartProps = { stacks: Stacks; by: Dimension; scope: ScopeSelection; colours: Record<string, string> };
+const notesInWords = (notes: readonly NumberedNote[], month: string): string[] =>
+  notesOfMonth(notes, month).map(({ no, text }) => `Note ${no}: ${text}`);
+
+type MonthsChartProps = {
+  stacks: Stacks;
+  by: Dimension;
+  scope: ScopeSelection;
+  colours: Record<string, string>;
+  notes: readonly NumberedNote[];
+  /** Verbs for the month being read. */
+  verbsOf: (month: string) => ReactNode;
+};
 
 /** The stacks in the viewer's unit, with the words of their months. */
-export const MonthsChart = ({ stacks, by, scope, colours }: MonthsChartProps) => {
+export const MonthsChart = ({ stacks, by, scope, colours, notes, verbsOf }: MonthsChartProps) => {
   const layers = useMemo<ChartLayer[]>(
     () =>
       stacks.layers.map((layer) => ({
@@ -41,14 +53,19 @@ export const MonthsChart = ({ stacks, by, scope, colours }: MonthsChartProps) =>
       unfinished: month.state !== 'whole',
     }));
   }, [stacks, scope.unit]);
+  const marks = useMemo(() => chartNotes(notes), [notes]);
   return (
     <StackedMonthsFigure
       label="Recovered mass by month"
       layers={layers}
       months={months}
+      notes={marks}
+      verbsOf={verbsOf}
       wordsOf={(name) => {
         const month = stacks.months.find((other) => other.month === name);
-        return month ? monthInWords(month, stacks.layers, by, scope.unit) : '';
+        return month
+          ? [monthInWords(month, stacks.layers, by, scope.unit), ...notesInWords(notes, name)].join(' ')
+          : '';
       }}
       recordsOf={(month) => recordsHref(scope, month) ?? '/records'}
     />

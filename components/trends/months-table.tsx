@@ -3,12 +3,20 @@ import type { ReactNode } from 'react';
 import type { Dimension } from '@/analytics/dimensions';
 import type { StackedMonth, Stacks } from '@/analytics/monthly-trends/series';
 import type { ScopeSelection } from '@/analytics/scope-address';
+import { NoteNumber } from '@/components/notes/note-number';
+import { type NumberedNote, notesOfMonth } from '@/components/notes/numbered';
 import { Table, Td, Th } from '@/components/ui/table';
 import { formatChange, formatCount, formatMass, formatMonth, formatPercent } from '@/lib/format';
 import { recordsHref } from './records-link';
 import { layerName, stateWord } from './wording';
 
-type MonthsTableProps = { stacks: Stacks; by: Dimension; scope: ScopeSelection; colours: Record<string, string> };
+type MonthsTableProps = {
+  stacks: Stacks;
+  by: Dimension;
+  scope: ScopeSelection;
+  colours: Record<string, string>;
+  notes?: readonly NumberedNote[];
+};
 
 const against = ({ recoveredMass, yearBefore, state }: StackedMonth): string =>
   yearBefore === null || yearBefore === 0 || state !== 'whole' ? '—' : formatChange(recoveredMass / yearBefore - 1);
@@ -31,7 +39,7 @@ const UnitHead = ({ unit, children }: { unit: string; children: ReactNode }) => 
 );
 
 /** The chart in figures, newest month first; every figure opens the records behind it. */
-export const MonthsTable = ({ stacks: { layers, months }, by, scope, colours }: MonthsTableProps) => (
+export const MonthsTable = ({ stacks: { layers, months }, by, scope, colours, notes = [] }: MonthsTableProps) => (
   <Table label={`Recovered mass by month and ${by === 'jobType' ? 'job type' : by}`}>
     <thead>
       <tr>
@@ -61,6 +69,11 @@ export const MonthsTable = ({ stacks: { layers, months }, by, scope, colours }: 
           <tr key={month.month} className={month.state === 'whole' ? undefined : 'text-ink-2'}>
             <Th scope="row" className="whitespace-nowrap">
               {formatMonth(month.month, 'short')}
+              {notesOfMonth(notes, month.month).map((note) => (
+                <span key={note.id} className="ml-1.5">
+                  <NoteNumber note={note} />
+                </span>
+              ))}
               {month.state === 'whole' ? null : (
                 <span className="ml-2 bg-sheet-2 px-1.5 py-0.5 text-xs">{stateWord(month)}</span>
               )}
