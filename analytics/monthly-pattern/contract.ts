@@ -8,7 +8,7 @@ const factor = z.number().nonnegative();
 const count = z.int().nonnegative();
 
 /**
- * Season and trend of the whole months up to the scope's end, from the first record on: a season cannot be told from a
+ * Season and trend of routine jobs by the whole months up to the scope's end, from the first record on: a season cannot be told from a
  * part of the history. The running month and a cut one are left out.
  */
 export const monthlyPattern = defineContract({
@@ -16,6 +16,8 @@ export const monthlyPattern = defineContract({
   action: 'trends:read',
   query: scopeSchema,
   response: z.object({
+    /** Large plant is left out of the months below: full charges of so many kg and more. How much of all mass it was. */
+    large: z.object({ fromFullCharge: massKg, recoveries: count, recoveredMass: massKg, allMass: massKg }),
     /** Null where the months do not carry it; `missing` says why. */
     pattern: z
       .object({

@@ -1,4 +1,4 @@
-import { baselineLimits } from '@/analytics/statistics/control-charts/baseline';
+import { BASELINE, baselineLimits } from '@/analytics/statistics/control-charts/baseline';
 import {
   DEFAULT_RUN_RULES,
   type RunRule,
@@ -8,7 +8,7 @@ import {
 import { type Estimate, enough, tooFew } from '@/analytics/statistics/estimate';
 import { DECOMPOSITION_NEEDS, decomposeMonths } from '@/analytics/statistics/season/monthly-decomposition';
 
-/** A whole month: recovered mass in kg, and how many recoveries it comes from. */
+/** A whole month of routine jobs: recovered mass in kg, and how many recoveries it comes from. */
 export type WholeMonth = { month: string; recoveredMass: number; recoveries: number };
 
 /** A month beside what trend and season let expect of it; masses in kg. */
@@ -37,6 +37,15 @@ export type Pattern = {
   baseline: { from: string; to: string; months: number; form: 'mean' | 'median'; lower: number; upper: number };
 };
 
+/**
+ * From this full charge on, 100 lb in kg, a job is large plant: a few of them make most of a year's mass, and when a
+ * chiller comes up is no season. Routine jobs are all others.
+ */
+export const LARGE_PLANT_KG = 45.359237;
+
+/** The latest months are judged by limits that they did not set. */
+const JUDGED_MONTHS = 12;
+
 /** With fewer recoveries a month says more about one job than about the month. */
 export const LEAST_RECOVERIES = 5;
 
@@ -51,20 +60,22 @@ const rulesBroken = (scores: readonly number[]): RunRule[][] => {
 
 /**
  * Season and trend of whole months in a row, and the months that neither explains. Limits are those of single values
- * (XmR) on the logarithm of the remainder, frozen on the first months that count; a month of fewer than five recoveries
- * is neither judged nor a part of the limits. Says what is missing where 24 months that count are not there.
+ * (XmR) on the logarithm of the remainder, from the 24 months before the last twelve: more jobs a month make calmer
+ * months, so that those of long ago say little. A month of fewer than five recoveries is neither judged nor a part of
+ * the limits. Says what is missing where 24 months that count are not there.
  */
 export const monthlyPattern = (months: readonly WholeMonth[]): Estimate<Pattern> => {
   if (months.length < DECOMPOSITION_NEEDS) return tooFew(DECOMPOSITION_NEEDS, months.length, 'full months');
   const counting = months.flatMap(({ recoveries }, index) => (recoveries >= LEAST_RECOVERIES ? [index] : []));
   if (counting.length < DECOMPOSITION_NEEDS)
-    return tooFew(DECOMPOSITION_NEEDS, counting.length, `months of ${LEAST_RECOVERIES} recoveries or more`);
+    return tooFew(DECOMPOSITION_NEEDS, counting.length, `months of ${LEAST_RECOVERIES} routine recoveries or more`);
   const parts = decomposeMonths(months.map(({ recoveredMass }) => recoveredMass));
   if (!parts.enough) return parts;
   const { trend, seasonFactor, remainderFactor, offset, seasonStrength, steady } = parts.value;
 
   const remainders = counting.map((index) => withoutDust(Math.log(remainderFactor[index] ?? 1)));
-  const baseline = baselineLimits(remainders);
+  const begin = Math.max(0, remainders.length - JUDGED_MONTHS - BASELINE.most);
+  const baseline = baselineLimits(remainders.slice(begin));
   if (!baseline.enough) return baseline;
   const { limits, length } = baseline.value;
   const broken = rulesBroken(standardScores(remainders, limits));
@@ -91,8 +102,8 @@ export const monthlyPattern = (months: readonly WholeMonth[]): Estimate<Pattern>
     seasonStrength,
     steady,
     baseline: {
-      from: monthOf(0),
-      to: monthOf(length - 1),
+      from: monthOf(begin),
+      to: monthOf(begin + length - 1),
       months: length,
       form: limits.form,
       lower: Math.exp(limits.lower),

@@ -34,7 +34,7 @@ export const unusualNote = (
   const inUnit = (kg: number) => formatMassWithUnit(kg, unit, 0);
   const causes = notes.filter((note) => touchesMonth(note, latest.month)).map(({ text }) => `“${text}”`);
   const cause = causes.length ? `noted: ${formatList(causes, 2)}` : 'no cause is noted yet';
-  const told = `${formatMonth(latest.month)} was ${unusualWord(latest)}: ${inUnit(latest.recoveredMass)} where ${inUnit(latest.low)} to ${inUnit(latest.high)} is usual (${cause}).`;
+  const told = `In routine jobs ${formatMonth(latest.month)} was ${unusualWord(latest)}: ${inUnit(latest.recoveredMass)} where ${inUnit(latest.low)} to ${inUnit(latest.high)} is usual (${cause}).`;
   const others = unusual.slice(0, -1).map(({ month }) => formatMonth(month));
   return others.length ? `${told} So ${others.length === 1 ? 'was' : 'were'} ${formatList(others)}.` : told;
 };
@@ -54,6 +54,17 @@ export const patternSentences = ({ baseline, steady, seasonStrength, months }: S
     ? ` ${plural(few, 'month', 'months')} of fewer than five recoveries ${few === 1 ? 'is' : 'are'} drawn hollow and not judged.`
     : '';
   return [`${season}${shifted}`, `${band}${uncounted}`];
+};
+
+/** What the figure is about, and how much of all mass is not in it. */
+export const routineSentence = (
+  { fromFullCharge, recoveries, recoveredMass, allMass }: MonthlyPattern['large'],
+  unit: DisplayUnit,
+): string => {
+  const large = `${formatMassWithUnit(fromFullCharge, unit, 0)} full charge and more`;
+  return recoveries > 0
+    ? `Routine jobs only: large plant (${large}) is ${formatPercent(allMass > 0 ? recoveredMass / allMass : 0)} of all mass in ${plural(recoveries, 'job', 'jobs')}, and when a chiller comes up is no season.`
+    : `No large plant (${large}) is among these jobs.`;
 };
 
 /** Why there is no season to show yet. */

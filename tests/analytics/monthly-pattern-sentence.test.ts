@@ -1,6 +1,12 @@
 import { expect, test } from 'vitest';
 import type { ShownPatternMonth } from '@/analytics/monthly-pattern/contract';
-import { missingSentence, patternSentences, touchesMonth, unusualNote } from '@/analytics/monthly-pattern/sentence';
+import {
+  missingSentence,
+  patternSentences,
+  routineSentence,
+  touchesMonth,
+  unusualNote,
+} from '@/analytics/monthly-pattern/sentence';
 import { everyMonth } from '@/analytics/monthly-trends/series';
 
 const plain = (text: string | null) => text?.replaceAll('\u00a0', ' ') ?? null;
@@ -36,10 +42,10 @@ test('what was unusual more than a year ago is no news', () => {
 
 test('the latest unusual month is told with what is usual and its cause', () => {
   expect(plain(unusualNote(months({ '2026-07': LOW }), [strike], 'kg'))).toBe(
-    'July 2026 was unusually low: 40 kg where 80 kg to 120 kg is usual (noted: “Strike at the reclaimer”).',
+    'In routine jobs July 2026 was unusually low: 40 kg where 80 kg to 120 kg is usual (noted: “Strike at the reclaimer”).',
   );
   expect(plain(unusualNote(months({ '2026-08': HIGH }), [strike], 'kg'))).toBe(
-    'August 2026 was unusually high: 160 kg where 80 kg to 120 kg is usual (no cause is noted yet).',
+    'In routine jobs August 2026 was unusually high: 160 kg where 80 kg to 120 kg is usual (no cause is noted yet).',
   );
   expect(plain(unusualNote(months({ '2026-03': LOW, '2026-08': HIGH }), [], 'kg'))).toMatch(/So was March 2026\.$/);
   expect(plain(unusualNote(months({ '2026-03': LOW, '2026-04': LOW, '2026-08': HIGH }), [], 'kg'))).toMatch(
@@ -84,4 +90,14 @@ test('says what is missing for a season', () => {
   );
   expect(missingSentence({ needs: 24, has: 1, of: 'full months' })).toMatch(/there is 1\./);
   expect(missingSentence({ needs: 1, has: 0, of: 'months with mass' })).toMatch(/^Nothing was weighed/);
+});
+
+test('says that large plant is left out, and how much that is', () => {
+  const large = { fromFullCharge: 45.359237, recoveries: 12, recoveredMass: 610, allMass: 1000 };
+  expect(plain(routineSentence(large, 'lb'))).toBe(
+    'Routine jobs only: large plant (100 lb full charge and more) is 61% of all mass in 12 jobs, and when a chiller comes up is no season.',
+  );
+  expect(plain(routineSentence({ ...large, recoveries: 0, recoveredMass: 0 }, 'lb'))).toBe(
+    'No large plant (100 lb full charge and more) is among these jobs.',
+  );
 });

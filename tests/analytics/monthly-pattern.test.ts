@@ -64,8 +64,14 @@ test('a month of few recoveries is neither judged nor a part of the limits', () 
   const few = made(FIVE_YEARS, (m) => (m.month === '2023-03' ? { recoveredMass: 1, recoveries: 4 } : {}));
   expect(outside(few)).toEqual([]);
   expect(patternOf(few).months.find(({ month }) => month === '2023-03')?.counts).toBe(false);
-  const early = made(FIVE_YEARS, (m) => (m.month === '2020-02' ? { recoveries: 4 } : {}));
-  expect(patternOf(early).baseline).toMatchObject({ from: '2020-01', to: '2022-01', months: 24 });
+  const early = made(FIVE_YEARS, (m) => (m.month === '2023-02' ? { recoveries: 4 } : {}));
+  expect(patternOf(early).baseline).toMatchObject({ from: '2021-12', to: '2023-12', months: 24 });
+});
+
+test('the limits are those of the 24 months before the last twelve, or of the first where there are not so many', () => {
+  expect(patternOf(made(FIVE_YEARS)).baseline).toMatchObject({ from: '2022-01', to: '2023-12', months: 24 });
+  const short = made(everyMonth('2022-06', '2024-12'));
+  expect(patternOf(short).baseline).toMatchObject({ from: '2022-06', to: '2024-05', months: 24 });
 });
 
 test('a season that was none is called none', () => {
@@ -82,7 +88,7 @@ describe('says what is missing', () => {
     [
       '30 months of which half have four recoveries',
       made(everyMonth('2022-01', '2024-06'), (m) => ({ recoveries: Number(m.month.slice(5)) % 2 ? 4 : 9 })),
-      { needs: 24, has: 15, of: 'months of 5 recoveries or more' },
+      { needs: 24, has: 15, of: 'months of 5 routine recoveries or more' },
     ],
     ['nothing but zeros', made(FIVE_YEARS, () => ({ recoveredMass: 0 })), { needs: 1, has: 0, of: 'months with mass' }],
   ])('%s', (_what, months, missing) => {
