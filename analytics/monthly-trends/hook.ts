@@ -14,5 +14,6 @@ export const monthlyTrendsOptions = (scope: ScopeQuery, by: Dimension) =>
     placeholderData: keepPreviousData,
   });
 
-/** Recovered mass by month; the figures of the scope before stay until the new ones are here. */
-export const useMonthlyTrends = (scope: ScopeQuery, by: Dimension) => useQuery(monthlyTrendsOptions(scope, by));
+/** Recovered mass by month; the figures of the scope before stay until the new ones are here. Asks once `enabled`. */
+export const useMonthlyTrends = (scope: ScopeQuery, by: Dimension, { enabled = true } = {}) =>
+  useQuery({ ...monthlyTrendsOptions(scope, by), enabled });
