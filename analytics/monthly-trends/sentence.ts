@@ -13,13 +13,16 @@ const SAME = 0.005;
 /** From here on "so many times" is plainer than per cent. */
 const TIMES = 3;
 
-/** How a mass stands to another one, as the end of a sentence: `, 26% more than in November 2025.`; kg. */
+/**
+ * How a mass stands to another one, as the end of a sentence: `, 26% more than in November 2025.` Masses in kg; `then`
+ * says when the other one was, with its preposition.
+ */
 export const changeWords = (mass: number, before: number, then: string): string => {
-  if (before === 0) return mass === 0 ? `, as in ${then}.` : `; nothing was recovered in ${then}.`;
+  if (before === 0) return mass === 0 ? `, as ${then}.` : `; nothing was recovered ${then}.`;
   const change = mass / before - 1;
-  if (Math.abs(change) < SAME) return `, as much as in ${then}.`;
-  if (change >= TIMES - 1) return `, ${(mass / before).toFixed(1)} times as much as in ${then}.`;
-  return `, ${formatPercent(Math.abs(change))} ${change > 0 ? 'more' : 'less'} than in ${then}.`;
+  if (Math.abs(change) < SAME) return `, as much as ${then}.`;
+  if (change >= TIMES - 1) return `, ${(mass / before).toFixed(1)} times as much as ${then}.`;
+  return `, ${formatPercent(Math.abs(change))} ${change > 0 ? 'more' : 'less'} than ${then}.`;
 };
 
 /** What all months of a scope without a whole month come to. */
@@ -47,7 +50,10 @@ export const trendAnswer = ({ months }: Stacks, unit: DisplayUnit): Answer => {
     return {
       before: `${formatMonth(month)} brought in `,
       figure: formatMassWithUnit(recoveredMass, unit, 0),
-      after: yearBefore === null ? '.' : changeWords(recoveredMass, yearBefore, formatMonth(monthsAfter(month, -12))),
+      after:
+        yearBefore === null
+          ? '.'
+          : changeWords(recoveredMass, yearBefore, `in ${formatMonth(monthsAfter(month, -12))}`),
       month,
     };
   }

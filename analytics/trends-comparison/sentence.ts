@@ -18,6 +18,13 @@ export const periodWords = ({ from, to }: Days): string => {
   return `${beginning} to ${formatDay(to)}`;
 };
 
+/** The same with its preposition: `in November 2026`, `from January to November 2026`, `on Dec 9, 2026`. */
+const whenWords = (days: Days): string => {
+  const words = periodWords(days);
+  if (words.includes(' to ')) return `from ${words}`;
+  return days.from === days.to ? `on ${words}` : `in ${words}`;
+};
+
 const signed = (ratio: number): string => `${formatPercent(Math.abs(ratio - 1))} ${ratio >= 1 ? 'more' : 'less'}`;
 
 /** How far the change of a comparison can be believed, as a sentence; empty where there is nothing to doubt. */
@@ -33,7 +40,7 @@ export const certaintyWords = ({ ratio, clear, now, before }: Comparison): strin
 export const comparisonAnswer = ({ now, before }: Comparison, unit: DisplayUnit): Answer => ({
   before: `${periodWords(now)} brought in `,
   figure: formatMassWithUnit(now.recoveredMass, unit, 0),
-  after: changeWords(now.recoveredMass, before.recoveredMass, periodWords(before)),
+  after: changeWords(now.recoveredMass, before.recoveredMass, whenWords(before)),
   month: null,
 });
 
@@ -41,7 +48,7 @@ export const comparisonAnswer = ({ now, before }: Comparison, unit: DisplayUnit)
 export const comparisonNote = (comparison: Comparison, unit: DisplayUnit): string => {
   const { now, before } = comparison;
   const mass = formatMassWithUnit(now.recoveredMass, unit, 0);
-  const told = `${periodWords(now)} brought in ${mass}${changeWords(now.recoveredMass, before.recoveredMass, periodWords(before))}`;
+  const told = `${periodWords(now)} brought in ${mass}${changeWords(now.recoveredMass, before.recoveredMass, whenWords(before))}`;
   return [told, certaintyWords(comparison)].filter(Boolean).join(' ');
 };
 

@@ -10,6 +10,20 @@ import { stateWord } from './wording';
 
 const share = (value: number | null, digits: number): string => (value === null ? '—' : formatPercent(value, digits));
 
+/** Part of those that state it, and the same of the year before where that month is whole. */
+const habit = (
+  month: StackedMonth,
+  then: StackedMonth | undefined,
+  part: 'held' | 'downToLevel',
+  stated: 'holdStated' | 'vacuumStated',
+): Pick<TicketRow, 'value' | 'small'> => {
+  const of = (one: StackedMonth) => share(one[stated] > 0 ? one[part] / one[stated] : null, 0);
+  return {
+    value: of(month),
+    small: then?.state === 'whole' && then[stated] > 0 ? `a year before ${of(then)}` : undefined,
+  };
+};
+
 const KG_PER_TONNE = 1000;
 
 type MonthTicketProps = {
@@ -39,6 +53,8 @@ export const MonthTicket = ({ month, months, scope, className }: MonthTicketProp
       small: then?.state === 'whole' ? `a year before ${share(then.totalYield, 1)}` : undefined,
     },
     { label: 'Median yield', value: share(month.medianYield, 0) },
+    { label: 'Held', ...habit(month, then, 'held', 'holdStated') },
+    { label: 'Down to level', ...habit(month, then, 'downToLevel', 'vacuumStated') },
     {
       label: 'Kept from the air',
       value: `${formatNumber(month.co2e / KG_PER_TONNE, month.co2e < 100 * KG_PER_TONNE ? 1 : 0)} t`,

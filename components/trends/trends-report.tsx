@@ -1,83 +1,89 @@
 'use client';
 
 import { clsx } from 'clsx';
-import Link from 'next/link';
 import { useMemo } from 'react';
 import type { Dimension } from '@/analytics/dimensions';
 import type { MonthlyTrends } from '@/analytics/monthly-trends/contract';
-import { trendAnswer, trendNotes } from '@/analytics/monthly-trends/sentence';
 import { lastWholeMonth, toStacks } from '@/analytics/monthly-trends/series';
-import { type ScopeSelection, scopeSearch } from '@/analytics/scope-address';
+import type { ScopeSelection } from '@/analytics/scope-address';
+import { numbered } from '@/components/notes/numbered';
 import { NothingInScope } from '@/components/scope/nothing-in-scope';
-import { choiceName, DIMENSION_WORDS } from '@/components/scope/wording';
-import { PageHead } from '@/components/ui/page-head';
 import { Sheet } from '@/components/ui/sheet';
+import { BranchesSheet } from './branches-sheet';
+import { ComparisonSheet } from './comparison-sheet';
 import { layerColours } from './layer-colours';
 import { MonthTicket } from './month-ticket';
-import { comparesYears, MonthsChart } from './months-chart';
+import { MonthsSheet } from './months-sheet';
 import { MonthsTable } from './months-table';
-import { recordsHref } from './records-link';
-import { SplitSelector } from './split-selector';
+import { SeasonSheet } from './season-sheet';
+import { TrendsHead } from './trends-head';
+import type { TrendsFigures } from './use-trends-figures';
 
 type TrendsReportProps = {
   trends: MonthlyTrends;
+  figures: TrendsFigures;
   scope: ScopeSelection;
   by: Dimension;
   onSplit: (by: Dimension) => void;
-  /** Whether newer figures are on their way. */
-  stale: boolean;
 };
 
-/** The answer, the ticket, the chart and the table of one scope. */
-export const TrendsReport = ({ trends, scope, by, onSplit, stale }: TrendsReportProps) => {
+/** The answer, the ticket, the chart with its notes, the comparison, season and trend, the branches and the table. */
+export const TrendsReport = ({ trends, figures, scope, by, onSplit }: TrendsReportProps) => {
+  const { query, address, comparison, pattern } = figures;
+  const notes = useMemo(() => numbered(figures.notes ?? []), [figures.notes]);
+  const stale = figures.months.isPlaceholderData;
   const stacks = useMemo(() => toStacks(trends), [trends]);
   // While new figures come, keys are still those of the split before.
   const shownBy = trends.by;
   const colours = useMemo(() => layerColours(shownBy, stacks.layers), [shownBy, stacks.layers]);
-  const answer = trendAnswer(stacks, scope.unit);
-  const notes = trendNotes(stacks, trends, scope.unit, (key) => choiceName(shownBy, key));
   const ticketMonth = lastWholeMonth(stacks.months) ?? stacks.months.at(-1);
-  const href = (answer.month && recordsHref(scope, answer.month)) || `/records${scopeSearch(scope)}`;
   if (!ticketMonth)
     return (
       <div aria-busy={stale} className={clsx(stale && 'opacity-50')}>
         <NothingInScope />
       </div>
     );
+  const wide = 'lg:col-span-2';
   return (
     <div
       aria-busy={stale}
       className={clsx(
-        'grid gap-x-10 gap-y-6 transition-opacity lg:grid-cols-[minmax(0,1fr)_300px]',
+        'grid gap-x-10 gap-y-6 transition-opacity lg:grid-cols-[minmax(0,1fr)_300px] lg:grid-rows-[auto_1fr]',
         stale && 'opacity-50',
       )}
     >
-      <PageHead
-        title={
-          <>
-            {answer.before}
-            {answer.figure ? (
-              <Link href={href} className="figure-link">
-                {answer.figure}
-              </Link>
-            ) : null}
-            {answer.after}
-          </>
-        }
-        sub={notes.join(' ')}
+      <TrendsHead
+        trends={trends}
+        stacks={stacks}
+        scope={scope}
+        comparison={comparison.data?.comparison ?? null}
+        chosen={address.versus !== null}
+        pattern={pattern.data?.pattern ?? null}
+        notes={notes}
         className="lg:min-h-28 lg:content-start"
       />
       <MonthTicket month={ticketMonth} months={stacks.months} scope={scope} className="lg:row-span-2 lg:self-start" />
-      <Sheet
-        title="Recovered mass by month"
-        aside={`${scope.unit}, by ${DIMENSION_WORDS[shownBy].one}${comparesYears(stacks) ? '; the line is the year before' : ''}`}
+      <MonthsSheet
+        stacks={stacks}
+        shownBy={shownBy}
+        by={by}
+        onSplit={onSplit}
+        scope={scope}
+        colours={colours}
+        notes={notes}
         className="lg:col-start-1"
-      >
-        <SplitSelector by={by} onChange={onSplit} />
-        <MonthsChart stacks={stacks} by={shownBy} scope={scope} colours={colours} />
-      </Sheet>
-      <Sheet title="Month by month" aside="newest first; every figure opens its records" className="lg:col-span-2">
-        <MonthsTable stacks={stacks} by={shownBy} scope={scope} colours={colours} />
+      />
+      <ComparisonSheet
+        data={comparison.data}
+        error={comparison.error}
+        scope={scope}
+        address={address}
+        className={wide}
+      />
+      <SeasonSheet data={pattern.data} error={pattern.error} scope={scope} className={wide} />
+      <BranchesSheet query={query} scope={scope} className={wide} />
+      <Sheet title="Month by month" aside="newest first; every figure opens its records" className={wide}>
+        <MonthsTable stacks={stacks} by={shownBy} scope={scope} colours={colours} notes={notes} />
       </Sheet>
     </div>
   );

@@ -1,7 +1,7 @@
 import type { Dimension } from '@/analytics/dimensions';
 import type { StackedMonth, StackLayer } from '@/analytics/monthly-trends/series';
 import { choiceName } from '@/components/scope/wording';
-import { formatMass, formatMassWithUnit, formatMonth, plural } from '@/lib/format';
+import { formatMass, formatMassWithUnit, formatMonth, formatNumber, plural } from '@/lib/format';
 import type { DisplayUnit } from '@/lib/vocabulary';
 
 /** How a layer is called: the key in words, or how many smaller ones it holds. */
@@ -26,4 +26,10 @@ export const monthInWords = (
     .filter(({ id }) => (month.layers[id] ?? 0) > 0)
     .map((layer) => `${layerName(by, layer)}\u00a0${formatMass(month.layers[layer.id] ?? 0, unit)}`);
   return `${head}${before}${parts.length ? `; ${parts.join(', ')}` : ''}.`;
+};
+
+/** A difference of two shares in points of a hundred, its sign always said: `+3.1 points`. */
+export const pointsWords = (difference: number): string => {
+  const text = formatNumber(difference * 100, 1);
+  return `${difference > 0 && /[1-9]/.test(text) ? '+' : ''}${text}\u00a0points`;
 };

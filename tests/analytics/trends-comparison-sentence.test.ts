@@ -58,16 +58,25 @@ test.each([
 });
 
 test.each([
-  [112, 100, 'Jan 1 to Dec 9, 2026 brought in 112 kg, 12% more than in Jan 1 to Dec 9, 2025.'],
-  [88, 100, 'Jan 1 to Dec 9, 2026 brought in 88 kg, 12% less than in Jan 1 to Dec 9, 2025.'],
-  [100, 100, 'Jan 1 to Dec 9, 2026 brought in 100 kg, as much as in Jan 1 to Dec 9, 2025.'],
-  [300, 100, 'Jan 1 to Dec 9, 2026 brought in 300 kg, 3.0 times as much as in Jan 1 to Dec 9, 2025.'],
-  [5, 0, 'Jan 1 to Dec 9, 2026 brought in 5 kg; nothing was recovered in Jan 1 to Dec 9, 2025.'],
-  [0, 100, 'Jan 1 to Dec 9, 2026 brought in 0 kg, 100% less than in Jan 1 to Dec 9, 2025.'],
-  [0, 0, 'Jan 1 to Dec 9, 2026 brought in 0 kg, as in Jan 1 to Dec 9, 2025.'],
+  [112, 100, 'Jan 1 to Dec 9, 2026 brought in 112 kg, 12% more than from Jan 1 to Dec 9, 2025.'],
+  [88, 100, 'Jan 1 to Dec 9, 2026 brought in 88 kg, 12% less than from Jan 1 to Dec 9, 2025.'],
+  [100, 100, 'Jan 1 to Dec 9, 2026 brought in 100 kg, as much as from Jan 1 to Dec 9, 2025.'],
+  [300, 100, 'Jan 1 to Dec 9, 2026 brought in 300 kg, 3.0 times as much as from Jan 1 to Dec 9, 2025.'],
+  [5, 0, 'Jan 1 to Dec 9, 2026 brought in 5 kg; nothing was recovered from Jan 1 to Dec 9, 2025.'],
+  [0, 100, 'Jan 1 to Dec 9, 2026 brought in 0 kg, 100% less than from Jan 1 to Dec 9, 2025.'],
+  [0, 0, 'Jan 1 to Dec 9, 2026 brought in 0 kg, as from Jan 1 to Dec 9, 2025.'],
 ])('%d kg against %d kg', (now, before, words) => {
   const { before: begins, figure, after } = comparisonAnswer(comparison(now, before), 'kg');
   expect(plain(`${begins}${figure ?? ''}${after}`)).toBe(words);
+});
+
+test.each([
+  ['2025-11-01', '2025-11-30', 'than in November 2025.'],
+  ['2025-01-01', '2025-11-30', 'than from January to November 2025.'],
+  ['2025-12-09', '2025-12-09', 'than on Dec 9, 2025.'],
+])('the other period %s to %s is spoken of as: %s', (from, to, words) => {
+  const { after } = comparisonAnswer({ ...comparison(112, 100), before: side(from, to, 100) }, 'kg');
+  expect(after).toBe(`, 12% more ${words}`);
 });
 
 describe('says how far a change can be believed', () => {
@@ -84,12 +93,12 @@ describe('says how far a change can be believed', () => {
     expect(certaintyWords(clear)).toBe(
       'Jobs of such sizes would not differ so much by chance: the change lies between 20% more and 90% more.',
     );
-    expect(plain(comparisonNote(clear, 'kg'))).toContain('150 kg, 50% more than in');
+    expect(plain(comparisonNote(clear, 'kg'))).toContain('150 kg, 50% more than from');
   });
 
   test('nothing to doubt where there is no ratio', () => {
     expect(certaintyWords(comparison(5, 0))).toBe('');
-    expect(comparisonNote(comparison(5, 0), 'kg')).toMatch(/2025\.$/);
+    expect(comparisonNote(comparison(5, 0), 'kg')).toMatch(/nothing was recovered from .* 2025\.$/);
   });
 });
 

@@ -1,0 +1,61 @@
+import Link from 'next/link';
+import type { ReactNode } from 'react';
+import { type ScopeSelection, scopeSearch } from '@/analytics/scope-address';
+import type { Comparison, PeriodFigures } from '@/analytics/trends-comparison/contract';
+import { periodWords } from '@/analytics/trends-comparison/sentence';
+import { Table, Td, Th } from '@/components/ui/table';
+import { comparisonRows } from './comparison-rows';
+
+type ComparisonTableProps = { comparison: Comparison; scope: ScopeSelection; co2eLabel: ReactNode };
+
+/** Both periods side by side; every figure opens the records of its days. */
+export const ComparisonTable = ({ comparison, scope, co2eLabel }: ComparisonTableProps) => {
+  const { now, before } = comparison;
+  const recordsOf = ({ from, to }: PeriodFigures) => `/records${scopeSearch({ ...scope, from, to })}`;
+  const side = (one: PeriodFigures, text: string, small = '') => (
+    <Td numeric className="align-baseline">
+      <Link href={recordsOf(one)} className="figure-link decoration-transparent hover:decoration-current">
+        {text}
+      </Link>
+      {small ? <span className="block text-xs whitespace-normal text-ink-2">{small}</span> : null}
+    </Td>
+  );
+  return (
+    <Table label={`${periodWords(now)} against ${periodWords(before)}`}>
+      <thead>
+        <tr>
+          <Th>
+            <span className="sr-only">Figure</span>
+          </Th>
+          {[now, before].map((one, index) => (
+            <Th key={index === 0 ? 'now' : 'before'} numeric className="min-w-28 whitespace-normal!">
+              {periodWords(one)}
+            </Th>
+          ))}
+          <Th numeric>Change</Th>
+        </tr>
+      </thead>
+      <tbody>
+        {comparisonRows(comparison, scope.unit, co2eLabel).map(
+          ({ label, figure, small, change, changeSmall }, index) => (
+            // Rows are told in a fixed order.
+            // biome-ignore lint/suspicious/noArrayIndexKey: labels are nodes, and the order never changes.
+            <tr key={index}>
+              <Th scope="row" className="align-baseline">
+                {label}
+              </Th>
+              {side(now, figure(now), small?.(now))}
+              {side(before, figure(before), small?.(before))}
+              <Td numeric className="align-baseline font-semibold">
+                {change}
+                {changeSmall ? (
+                  <span className="block text-xs font-normal whitespace-normal text-ink-2">{changeSmall}</span>
+                ) : null}
+              </Td>
+            </tr>
+          ),
+        )}
+      </tbody>
+    </Table>
+  );
+};

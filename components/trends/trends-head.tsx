@@ -1,0 +1,63 @@
+import Link from 'next/link';
+import type { MonthlyPattern } from '@/analytics/monthly-pattern/contract';
+import { unusualNote } from '@/analytics/monthly-pattern/sentence';
+import type { MonthlyTrends } from '@/analytics/monthly-trends/contract';
+import { trendAnswer, trendNotes } from '@/analytics/monthly-trends/sentence';
+import type { Stacks } from '@/analytics/monthly-trends/series';
+import type { Note } from '@/analytics/notes/contract';
+import { type ScopeSelection, scopeSearch } from '@/analytics/scope-address';
+import type { Comparison } from '@/analytics/trends-comparison/contract';
+import { certaintyWords, comparisonAnswer, comparisonNote } from '@/analytics/trends-comparison/sentence';
+import { choiceName } from '@/components/scope/wording';
+import { PageHead } from '@/components/ui/page-head';
+import { recordsHref } from './records-link';
+
+type TrendsHeadProps = {
+  trends: MonthlyTrends;
+  stacks: Stacks;
+  scope: ScopeSelection;
+  comparison: Comparison | null;
+  /** Whether somebody chose with what to compare: then the answer is about that. */
+  chosen: boolean;
+  pattern: MonthlyPattern['pattern'];
+  notes: readonly Note[];
+  className?: string;
+};
+
+/** What came in, against what, what explains it, how sure that is, and what was unusual: in plain words. */
+export const TrendsHead = (props: TrendsHeadProps) => {
+  const { trends, stacks, scope, comparison, chosen, pattern, notes, className } = props;
+  const about = chosen ? comparison : null;
+  const answer = about ? comparisonAnswer(about, scope.unit) : trendAnswer(stacks, scope.unit);
+  const days = about ? { from: about.now.from, to: about.now.to } : {};
+  const href = (answer.month && recordsHref(scope, answer.month)) || `/records${scopeSearch({ ...scope, ...days })}`;
+  const nameOf = (key: string) => choiceName(trends.by, key);
+  // Only months that the chart shows are spoken of.
+  const first = stacks.months[0]?.month ?? '';
+  const unusual = pattern
+    ? unusualNote(
+        pattern.months.filter(({ month }) => month >= first),
+        notes,
+        scope.unit,
+      )
+    : null;
+  const longer = about ? certaintyWords(about) : comparison && comparisonNote(comparison, scope.unit);
+  const sub = [...(about ? [] : trendNotes(stacks, trends, scope.unit, nameOf)), longer, unusual];
+  return (
+    <PageHead
+      title={
+        <>
+          {answer.before}
+          {answer.figure ? (
+            <Link href={href} className="figure-link">
+              {answer.figure}
+            </Link>
+          ) : null}
+          {answer.after}
+        </>
+      }
+      sub={sub.filter(Boolean).join(' ')}
+      {...(className ? { className } : {})}
+    />
+  );
+};
