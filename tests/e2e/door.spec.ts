@@ -79,15 +79,13 @@ test('pages come with a content policy that runs no foreign and no inline script
   expect(headers).toMatchObject({ 'x-content-type-options': 'nosniff', 'x-frame-options': 'DENY' });
 });
 
-test('what the form says on a wrong password loses nothing typed', async ({ page, faults }) => {
+test('what the form says on a wrong password loses nothing typed', async ({ page }) => {
   await page.goto('/sign-in');
   await page.getByLabel('E-mail').fill(operations().email);
   await page.getByLabel('Password', { exact: true }).fill('wrong');
   await page.getByRole('button', { name: 'Sign in' }).click();
   await expect(page.getByRole('alert').filter({ hasText: /password/i })).toBeVisible();
   await expect(page.getByLabel('E-mail')).toHaveValue(operations().email);
-  // The browser itself writes the refused request to its console.
-  expect(faults.splice(0).join()).toContain('401');
 });
 
 test('the form leads to where one wanted to go, and signing out leads back to the door', async ({ page }) => {

@@ -9,8 +9,8 @@ import { AppError } from '@/lib/errors';
 import { plural } from '@/lib/format';
 import { log } from '@/lib/log';
 
-/** What the form shows after a refusal: the sentence, and the address as it was typed. */
-export type SignInState = { failure: string | null; email: string };
+/** What the form shows after a refusal: the sentence, and the address as it was typed. `leadTo` once all was right. */
+export type SignInState = { failure: string | null; email: string; leadTo: string | null };
 
 const text = (form: FormData, name: string): string => {
   const value = form.get(name);
@@ -31,10 +31,14 @@ export const signIn = async (_state: SignInState, form: FormData): Promise<SignI
   const email = text(form, 'email').trim();
   try {
     const opened = await checkPassword(email, text(form, 'password'), Object.fromEntries(await headers()));
-    if (!opened) return { failure: 'This e-mail address and password do not belong together.', email };
+    if (!opened) return { failure: 'This e-mail address and password do not belong together.', email, leadTo: null };
     (await cookies()).set(await sessionCookie(opened.sessionToken));
   } catch (error) {
-    return { failure: refusal(error), email };
+    return { failure: refusal(error), email, leadTo: null };
   }
-  redirect(safeNextPath(text(form, 'next')));
+  const leadTo = safeNextPath(text(form, 'next'));
+  // With its script at work the page loads the next one whole: nothing of an earlier session stays in it, and the
+  // keyboard begins at its top.
+  if (form.get('scripted')) return { failure: null, email, leadTo };
+  redirect(leadTo);
 };
