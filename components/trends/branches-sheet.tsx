@@ -46,7 +46,7 @@ const Panel = ({ layer, months, highest, scope }: PanelProps) => {
             width={width}
             height={HEIGHT}
             highest={highest}
-            colour="var(--body-2)"
+            colour="var(--ink-2)"
             months={months.map((month) => ({
               month: month.month,
               value: month.layers[layer.id] ?? 0,

@@ -30,7 +30,7 @@ export const MoversList = ({ comparison: { movers, otherKeys, now }, by, scope }
               <span aria-hidden="true" className="relative h-3">
                 <span className="absolute inset-y-[-0.5rem] left-1/2 w-px bg-rule" />
                 <span
-                  className="absolute inset-y-0 bg-body-2 dark:bg-ink-3"
+                  className="absolute inset-y-0 bg-ink-2"
                   style={difference < 0 ? { right: '50%', width } : { left: '50%', width }}
                 />
               </span>
