@@ -1,3 +1,4 @@
+import type { Dimension } from '@/analytics/dimensions';
 import { type Answer, changeWords } from '@/analytics/monthly-trends/sentence';
 import { endsMonth } from '@/lib/calendar';
 import { formatDay, formatMassWithUnit, formatMonth, formatMonthName, formatPercent } from '@/lib/format';
@@ -34,6 +35,21 @@ export const certaintyWords = ({ ratio, clear, now, before }: Comparison): strin
   if (clear) return `Jobs of such sizes would not differ so much by chance: the change lies ${range}.`;
   const few = Math.min(now.recoveries, before.recoveries) < 30 ? 'So few jobs say little' : 'Jobs differ much in size';
   return `${few}: it may lie ${range}, which is no clear change.`;
+};
+
+/** Which key makes more than half of the difference, as a sentence; empty when none does, or when it is of people. */
+export const moverNote = (
+  { movers, difference }: Comparison,
+  by: Dimension,
+  unit: DisplayUnit,
+  nameOf: (key: string) => string,
+): string => {
+  const [most] = movers;
+  // A person is not the reason for a period: jobs are handed out, and holidays taken.
+  if (!most || movers.length < 2 || by === 'technician' || difference.mass === 0) return '';
+  if (most.difference * Math.sign(difference.mass) <= Math.abs(difference.mass) / 2) return '';
+  const much = formatMassWithUnit(Math.abs(most.difference), unit, 0);
+  return `Most of the difference is ${nameOf(most.key)}: ${much} ${most.difference > 0 ? 'more' : 'less'}.`;
 };
 
 /** The period against the chosen other one, as the answer of the screen. */

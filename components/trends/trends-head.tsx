@@ -7,7 +7,7 @@ import type { Stacks } from '@/analytics/monthly-trends/series';
 import type { Note } from '@/analytics/notes/contract';
 import { type ScopeSelection, scopeSearch } from '@/analytics/scope-address';
 import type { Comparison } from '@/analytics/trends-comparison/contract';
-import { certaintyWords, comparisonAnswer, comparisonNote } from '@/analytics/trends-comparison/sentence';
+import { certaintyWords, comparisonAnswer, comparisonNote, moverNote } from '@/analytics/trends-comparison/sentence';
 import { choiceName } from '@/components/scope/wording';
 import { PageHead } from '@/components/ui/page-head';
 import { recordsHref } from './records-link';
@@ -23,6 +23,10 @@ type TrendsHeadProps = {
   notes: readonly Note[];
   className?: string;
 };
+
+/** Whether the longer view is of no more than the month that the answer is about. */
+const isOfMonth = ({ now }: Comparison, month: string | null): boolean =>
+  month !== null && now.from.startsWith(month) && now.to.startsWith(month);
 
 /** What came in, against what, what explains it, how sure that is, and what was unusual: in plain words. */
 export const TrendsHead = (props: TrendsHeadProps) => {
@@ -41,8 +45,14 @@ export const TrendsHead = (props: TrendsHeadProps) => {
         scope.unit,
       )
     : null;
-  const longer = about ? certaintyWords(about) : comparison && comparisonNote(comparison, scope.unit);
-  const sub = [...(about ? [] : trendNotes(stacks, trends, scope.unit, nameOf)), longer, unusual];
+  const sub = [
+    about ? moverNote(about, trends.by, scope.unit, nameOf) : null,
+    ...(about ? [] : trendNotes(stacks, trends, scope.unit, nameOf)),
+    comparison && (about || isOfMonth(comparison, answer.month))
+      ? certaintyWords(comparison)
+      : comparison && comparisonNote(comparison, scope.unit),
+    unusual,
+  ];
   return (
     <PageHead
       title={

@@ -5,6 +5,7 @@ import {
   comparisonAnswer,
   comparisonNote,
   likeForLikeWords,
+  moverNote,
   periodWords,
 } from '@/analytics/trends-comparison/sentence';
 
@@ -114,4 +115,20 @@ test('says what was left out so that like stands against like', () => {
   expect(likeForLikeWords(comparison(1, 1, { shortened: 'to the shorter one', sameDays: false }))).toBe(
     'The two differ in length: Jan 1 to Dec 9, 2026 is laid beside Jan 1 to Dec 9, 2025.',
   );
+});
+
+test('names the key that makes more than half of the difference, and only then', () => {
+  const mover = (key: string, now: number, before: number) => ({ key, now, before, difference: now - before });
+  const said = (movers: Comparison['movers'], by: 'refrigerant' | 'technician' = 'refrigerant') => {
+    const sum = (of: 'now' | 'before') => movers.reduce((total, one) => total + one[of], 0);
+    return plain(moverNote(comparison(sum('now'), sum('before'), { movers }), by, 'kg', (key) => key));
+  };
+  expect(said([mover('R-22', 10, 60), mover('R-32', 30, 20)])).toBe('Most of the difference is R-22: 50 kg less.');
+  expect(said([mover('R-22', 60, 10), mover('R-32', 30, 20)])).toBe('Most of the difference is R-22: 50 kg more.');
+  expect(said([mover('R-22', 60, 10), mover('R-32', 10, 90)])).toBe('');
+  expect(said([mover('R-22', 20, 10), mover('R-32', 30, 20)])).toBe('');
+  expect(said([mover('R-22', 60, 10), mover('R-32', 10, 60)])).toBe('');
+  expect(said([mover('R-22', 60, 10)])).toBe('');
+  expect(said([mover('Ada', 60, 10), mover('Ben', 20, 20)], 'technician')).toBe('');
+  expect(said([])).toBe('');
 });
