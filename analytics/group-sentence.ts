@@ -1,3 +1,4 @@
+import type { Piece } from '@/analytics/figures/pieces';
 import { formatCount, formatMassWithUnit, plural } from '@/lib/format';
 import type { DisplayUnit } from '@/lib/vocabulary';
 
@@ -20,10 +21,16 @@ export const groupAnswer = (
   groups: readonly Group[],
   { one, many, verb }: { one: string; many: string; verb: string },
   unit: DisplayUnit,
-): string => {
+): Piece[] => {
   const mass = groups.reduce((sum, group) => sum + group.recoveredMass, 0);
   const recoveries = groups.reduce((sum, group) => sum + group.recoveries, 0);
-  return `${plural(groups.length, one, many)} ${verb} ${formatMassWithUnit(mass, unit, 0)} in ${plural(recoveries, 'recovery', 'recoveries')}.`;
+  return [
+    `${plural(groups.length, one, many)} ${verb} `,
+    { measure: 'recoveredMass', figure: formatMassWithUnit(mass, unit, 0) },
+    ' in ',
+    { measure: 'recoveries', figure: plural(recoveries, 'recovery', 'recoveries') },
+    '.',
+  ];
 };
 
 /** How the mass is spread over the groups; empty where half of them hold half. */

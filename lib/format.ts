@@ -84,6 +84,10 @@ export const plural = (count: number, one: string, many: string): string =>
 /** A refrigerant's designation that never breaks at its hyphen: `R‑22`. For reading only, never for keys. */
 export const formatDesignation = (designation: string): string => designation.replaceAll('-', NON_BREAKING_HYPHEN);
 
+/** The text with plain hyphens, spaces and minus signs: for files and for comparing, where what keeps lines whole is in the way. */
+export const plainCharacters = (text: string): string =>
+  text.replaceAll(NON_BREAKING_HYPHEN, '-').replaceAll(NON_BREAKING_SPACE, ' ').replaceAll(MINUS, '-');
+
 /** Names in a sentence: `A`, `A and B`, `A, B and C`; more than `most` are counted. */
 export const formatList = (names: readonly string[], most = 3): string => {
   const shown = names.length > most ? [...names.slice(0, most - 1), `${names.length - most + 1} more`] : names;

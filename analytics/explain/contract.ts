@@ -3,6 +3,14 @@ import { MEASURES } from '@/analytics/figures/measures';
 import { scopeSchema } from '@/analytics/scope';
 import { defineContract } from '@/lib/api/contract';
 
+const LEFT_OUT_REASONS = [
+  'entry_error',
+  'too_few_like_jobs',
+  'no_hold_stated',
+  'no_vacuum_stated',
+  'large_plant',
+] as const;
+
 const massKg = z.number().nonnegative();
 const share = z.number().nonnegative();
 const count = z.int().nonnegative();
@@ -20,6 +28,8 @@ const parts = z.discriminatedUnion('kind', [
     kind: z.literal('gwp'),
     refrigerants: z.array(z.object({ refrigerant: z.string(), recoveredMass: massKg, gwp: massKg, co2e: massKg })),
   }),
+  /** A part of the records that state a reading. */
+  z.object({ kind: z.literal('part'), part: count, of: count }),
   /** Standing among like jobs: how many were judged, in how many groups of like jobs. */
   z.object({ kind: z.literal('standing'), judged: count, groups: count }),
 ]);
@@ -44,7 +54,7 @@ export const explain = defineContract({
     /** Where the formula or its constants come from; null for plain sums and counts. */
     source: z.string().nullable(),
     /** Records in scope that do not count, by reason. */
-    leftOut: z.array(z.object({ reason: z.enum(['entry_error', 'too_few_like_jobs']), count: z.int().positive() })),
+    leftOut: z.array(z.object({ reason: z.enum(LEFT_OUT_REASONS), count: z.int().positive() })),
     fresh: z.object({
       /** The last day that has a record, of whatever scope; null without any. */
       recordsUntil: z.iso.date().nullable(),

@@ -25,6 +25,9 @@ const WORDS: Record<Measure, string> = {
     'Recoveries whose yield lies below Q1 − 1.5 × (Q3 − Q1) of their like jobs, counted. Q1 and Q3 are the lower and the upper quartile.',
   judged: `Recoveries with at least ${LEAST_LIKE_JOBS} like jobs (same refrigerant and appliance category), counted.`,
   unjudged: `Recoveries with fewer than ${LEAST_LIKE_JOBS} like jobs (same refrigerant and appliance category), counted.`,
+  routineMass: 'The recovered masses of routine jobs (full charge below 100 lb), added up.',
+  heldShare: 'Recoveries with a hold after the pull-down, out of those that state whether one was made.',
+  downToLevelShare: 'Recoveries whose final vacuum reached the required level, out of those that state a vacuum.',
 };
 
 const SOURCES: Partial<Record<Measure, string>> = {
@@ -33,6 +36,8 @@ const SOURCES: Partial<Record<Measure, string>> = {
     '“Full charge” in 40 CFR 82.152; the ratio of the sums, so that a large system weighs more than a small one.',
   medianYield: '“Full charge” in 40 CFR 82.152.',
   co2e: 'Global warming potentials over 100 years of the IPCC’s Fourth Assessment Report (AR4), as in 40 CFR 98, Table A‑1.',
+  downToLevelShare:
+    '40 CFR 82.156, Table 1 (machines made since November 15, 1993); small appliances by paragraph (b).',
   flagged: 'J. W. Tukey, Exploratory Data Analysis, Addison-Wesley 1977, chapter 2 (the lower fence).',
 };
 
@@ -75,6 +80,9 @@ export const formulaFilled = (
     case 'ratio':
       if (value === null) return 'No recovery in this scope.';
       return `${formatMassWithUnit(parts.recoveredMass, unit)} ÷ ${formatMassWithUnit(parts.fullCharge, unit)} = ${formatPercent(value, YIELD_DIGITS)}`;
+    case 'part':
+      if (value === null) return 'No recovery in this scope states it.';
+      return `${formatCount(parts.part)} ÷ ${plural(parts.of, 'recovery that states it', 'recoveries that state it')} = ${formatPercent(value, YIELD_DIGITS)}`;
     case 'median':
       return median(parts, value);
     case 'gwp':
@@ -97,6 +105,9 @@ const REASONS = {
     `record is not judged: fewer than ${LEAST_LIKE_JOBS} jobs are like it`,
     `records are not judged: fewer than ${LEAST_LIKE_JOBS} jobs are like them`,
   ],
+  no_hold_stated: ['record says nothing of a hold', 'records say nothing of a hold'],
+  no_vacuum_stated: ['record states no final vacuum', 'records state no final vacuum'],
+  large_plant: ['record is of large plant', 'records are of large plant'],
 } as const;
 
 /** What was left out and why, as a sentence; empty when nothing was. */

@@ -1,8 +1,9 @@
 import 'server-only';
-import { and, eq, isNull, sql } from 'drizzle-orm';
+import { and, eq, isNull, lt, sql } from 'drizzle-orm';
 import { factFigures, toGram } from '@/analytics/figures';
 import type { Figure } from '@/analytics/figures/figure';
 import { getJudged } from '@/analytics/low-recoveries/query';
+import { LARGE_PLANT_KG } from '@/analytics/monthly-pattern/pattern';
 import type { Scope } from '@/analytics/scope';
 import { inScope } from '@/analytics/scope-query';
 import type { Tx } from '@/db/client';
@@ -54,6 +55,28 @@ const getAppliances = async (tx: Tx, scope: Scope): Promise<number> => {
   return row?.appliances ?? 0;
 };
 
+/** How many of the records that state a reading say yes to it. */
+const getPart = async (tx: Tx, scope: Scope, reading: 'held' | 'downToLevel') => {
+  const [row] = await tx
+    .select({
+      part: sql<number>`count(*) filter (where ${f[reading]})`.mapWith(Number),
+      of: sql<number>`count(${f[reading]})`.mapWith(Number),
+    })
+    .from(f)
+    .where(and(inScope(scope), isNull(f.exclusion)));
+  const { part, of } = row ?? { part: 0, of: 0 };
+  return { value: of > 0 ? part / of : null, parts: { kind: 'part' as const, part, of } };
+};
+
+const getRoutine = async (tx: Tx, scope: Scope): Promise<Computed> => {
+  const { recoveredMass, recoveries } = factFigures;
+  const [row] = await tx
+    .select({ recoveredMass, recoveries })
+    .from(f)
+    .where(and(inScope(scope), lt(f.fullChargeKg, LARGE_PLANT_KG)));
+  return { value: row?.recoveredMass ?? 0, parts: { kind: 'sum', recoveries: row?.recoveries ?? 0 } };
+};
+
 /** The value of a measure over a scope, with what its formula is made of. */
 export const computeMeasure = async (
   tx: Tx,
@@ -76,6 +99,12 @@ export const computeMeasure = async (
       return { value: medianYield, parts: { kind: 'median', recoveries, ...(await getMiddleYields(tx, scope)) } };
     case 'co2e':
       return { value: co2e, parts: { kind: 'gwp', refrigerants: await getGwpTerms(tx, scope) } };
+    case 'routineMass':
+      return getRoutine(tx, scope);
+    case 'heldShare':
+      return getPart(tx, scope, 'held');
+    case 'downToLevelShare':
+      return getPart(tx, scope, 'downToLevel');
     case 'flagged':
     case 'judged':
     case 'unjudged': {

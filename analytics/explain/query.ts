@@ -1,7 +1,7 @@
 import 'server-only';
 import { desc, eq, sql } from 'drizzle-orm';
 import { factFigures, toGram } from '@/analytics/figures';
-import { MEASURE_UNITS, STANDING_OF } from '@/analytics/figures/measures';
+import { MEASURE_UNITS, RECORDS_OF } from '@/analytics/figures/measures';
 import { recordsInList } from '@/analytics/records/filters';
 import type { Scope } from '@/analytics/scope';
 import { inScope } from '@/analytics/scope-query';
@@ -43,7 +43,7 @@ const getRecordSums = async (tx: Tx, scope: Scope, measure: ExplainQuery['measur
       sum: toGram(sql`coalesce(sum(${f.recoveredMassKg}), 0)`),
     })
     .from(f)
-    .where(recordsInList({ ...scope, exclusion: 'none', likeJobs: STANDING_OF[measure] }));
+    .where(recordsInList({ ...scope, exclusion: 'none', ...RECORDS_OF[measure] }));
   return sums ?? { count: 0, sum: 0 };
 };
 
@@ -54,11 +54,14 @@ export const getExplained = async (tx: Tx, { measure, ...scope }: ExplainQuery):
   const { value, parts } = await computeMeasure(tx, measure, scope, sums);
   const { count, sum } = await getRecordSums(tx, scope, measure);
   const unjudged = parts.kind === 'standing' && measure !== 'unjudged' ? sums.recoveries - parts.judged : 0;
+  const outside = (reading: string) => (RECORDS_OF[measure]?.states === reading ? sums.recoveries - count : 0);
   const leftOut: Explained['leftOut'] = [
     { reason: 'entry_error' as const, count: excluded },
     { reason: 'too_few_like_jobs' as const, count: unjudged },
+    { reason: 'no_hold_stated' as const, count: outside('hold') },
+    { reason: 'no_vacuum_stated' as const, count: outside('vacuum') },
+    { reason: 'large_plant' as const, count: measure === 'routineMass' ? sums.recoveries - count : 0 },
   ].filter((reason) => reason.count > 0);
-  const likeJobs = STANDING_OF[measure];
   return {
     measure,
     value,
@@ -70,6 +73,6 @@ export const getExplained = async (tx: Tx, { measure, ...scope }: ExplainQuery):
     source: formulaSource(measure),
     leftOut,
     fresh: await getFresh(tx),
-    records: `/api/recoveries${searchString({ ...scope, exclusion: 'none', likeJobs })}`,
+    records: `/api/recoveries${searchString({ ...scope, exclusion: 'none', ...RECORDS_OF[measure] })}`,
   };
 };

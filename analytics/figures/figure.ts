@@ -1,6 +1,6 @@
 import { DIMENSIONS } from '@/analytics/dimensions';
 import { type ScopeQuery, type ScopeSelection, scopeQuery } from '@/analytics/scope-address';
-import { type LikeJobsStanding, MEASURES, type Measure, STANDING_OF } from './measures';
+import { MEASURES, type Measure, type MeasureRecords, RECORDS_OF } from './measures';
 
 /** The records that a figure is about. */
 export type FigureScope = Omit<ScopeSelection, 'unit'>;
@@ -65,13 +65,14 @@ export const figureOfAddress = (search: URLSearchParams, page: FigureScope): Fig
 };
 
 /** Which of the records in scope make a figure, as /api/recoveries and the records screen are asked. */
-export type FigureRecords = ScopeQuery & { exclusion: 'none'; likeJobs?: LikeJobsStanding };
+export type FigureRecords = ScopeQuery & { exclusion: 'none' } & MeasureRecords;
 
 /** The records that make a figure: those of its scope that count, and that stand as its measure says. */
-export const figureRecords = ({ measure, scope }: Figure): FigureRecords => {
-  const likeJobs = STANDING_OF[measure];
-  return { ...scopeQuery(scope), exclusion: 'none', ...(likeJobs ? { likeJobs } : {}) };
-};
+export const figureRecords = ({ measure, scope }: Figure): FigureRecords => ({
+  ...scopeQuery(scope),
+  exclusion: 'none',
+  ...RECORDS_OF[measure],
+});
 
 /** A month's part of a scope: the month itself, or what the scope's own days leave of it. */
 export const monthInScope = <Scope extends FigureScope>(scope: Scope, month: string): Scope => ({

@@ -29,6 +29,10 @@ export const readSort = (sort: Sort): { key: SortKey; descending: boolean } => {
   return { key, descending: sort.startsWith('-') };
 };
 
+/** Whether a list holds only the records that count in figures, or only the entry errors left out of them. */
+export const EXCLUSIONS = ['none', 'entry_error'] as const;
+export type Exclusion = (typeof EXCLUSIONS)[number];
+
 export const PAGE_SIZES = [50, 100] as const;
 export type PageSize = (typeof PAGE_SIZES)[number];
 export const MOST_ROWS_A_PAGE = 500;

@@ -1,5 +1,5 @@
 import { z } from 'zod';
-import { LIKE_JOBS_STANDINGS } from '@/analytics/figures/measures';
+import { LIKE_JOBS_STANDINGS, PLANT_SIZES, STATED_READINGS } from '@/analytics/figures/measures';
 import { scopeSchema } from '@/analytics/scope';
 import { defineContract } from '@/lib/api/contract';
 import { RECORD_FIELDS } from '@/lib/recoveries/fields';
@@ -11,7 +11,7 @@ import {
   MASS_UNITS,
   VACUUM_UNITS,
 } from '@/lib/vocabulary';
-import { DEFAULT_SORT, MOST_ROWS_A_PAGE, SORTS } from './constants';
+import { DEFAULT_SORT, EXCLUSIONS, MOST_ROWS_A_PAGE, SORTS } from './constants';
 
 const nullable = <Value extends z.ZodType>(value: Value) => value.nullable();
 
@@ -82,9 +82,13 @@ export const recordListQuery = scopeSchema.safeExtend({
     .optional(),
   importId: z.uuid().optional(),
   /** `none`: only records that count in figures; `entry_error`: only those left out. */
-  exclusion: z.enum(['none', 'entry_error']).optional(),
+  exclusion: z.enum(EXCLUSIONS).optional(),
   /** How the record stands among its like jobs; for who may read flags. */
   likeJobs: z.enum(LIKE_JOBS_STANDINGS).optional(),
+  /** Only records that state a hold, or a final vacuum. */
+  states: z.enum(STATED_READINGS).optional(),
+  /** Only routine jobs, or only those at large plant (full charge of 100 lb and more). */
+  plant: z.enum(PLANT_SIZES).optional(),
   limit: z.coerce.number().int().min(1).max(MOST_ROWS_A_PAGE).default(50),
   cursor: z.string().max(2000).optional(),
   format: z.enum(['json', 'csv']).default('json'),

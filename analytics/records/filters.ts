@@ -1,6 +1,7 @@
 import 'server-only';
-import { and, eq, ilike, isNotNull, isNull, or, type SQL, sql } from 'drizzle-orm';
-import type { LikeJobsStanding } from '@/analytics/figures/measures';
+import { and, eq, gte, ilike, isNotNull, isNull, lt, or, type SQL, sql } from 'drizzle-orm';
+import type { LikeJobsStanding, PlantSize, StatedReading } from '@/analytics/figures/measures';
+import { LARGE_PLANT_KG } from '@/analytics/monthly-pattern/pattern';
 import { inScope } from '@/analytics/scope-query';
 import { recoveryFacts as f } from '@/db/views/recovery-facts';
 import { yieldLimits as limits, lowRecoveries as low } from '@/db/views/yield-limits';
@@ -30,19 +31,36 @@ const STANDS: Record<LikeJobsStanding, SQL> = {
   few: sql`not (${enoughLikeJobs})`,
 };
 
+const STATES: Record<StatedReading, SQL> = { hold: isNotNull(f.held), vacuum: isNotNull(f.downToLevel) };
+
+const PLANT: Record<PlantSize, SQL> = {
+  routine: lt(f.fullChargeKg, LARGE_PLANT_KG),
+  large: gte(f.fullChargeKg, LARGE_PLANT_KG),
+};
+
 /** What narrows a list of records besides the page and its order. */
 type RecordFilters = Pick<
   RecordListQuery,
   'from' | 'to' | 'branch' | 'refrigerant' | 'technician' | 'site' | 'category' | 'jobType' | 'q' | 'importId'
 > &
-  Partial<Pick<RecordListQuery, 'exclusion' | 'likeJobs'>>;
+  Partial<Pick<RecordListQuery, 'exclusion' | 'likeJobs' | 'states' | 'plant'>>;
 
 /** The records that a list query means, whatever page of them. */
-export const recordsInList = ({ q, importId, exclusion, likeJobs, ...scope }: RecordFilters): SQL | undefined =>
+export const recordsInList = ({
+  q,
+  importId,
+  exclusion,
+  likeJobs,
+  states,
+  plant,
+  ...scope
+}: RecordFilters): SQL | undefined =>
   and(
     inScope(scope),
     q ? found(q) : undefined,
     importId ? eq(f.importId, importId) : undefined,
     exclusion ? (exclusion === 'none' ? isNull(f.exclusion) : isNotNull(f.exclusion)) : undefined,
     likeJobs ? STANDS[likeJobs] : undefined,
+    states ? STATES[states] : undefined,
+    plant ? PLANT[plant] : undefined,
   );

@@ -1,7 +1,8 @@
 import { keepPreviousData, queryOptions, useQuery } from '@tanstack/react-query';
+import type { MeasureRecords } from '@/analytics/figures/measures';
 import type { ScopeQuery } from '@/analytics/scope-address';
 import { apiFetch, searchString } from '@/lib/api/client';
-import type { Sort } from './constants';
+import type { Exclusion, Sort } from './constants';
 import type { RecordList } from './contract';
 import type { KnownNames } from './known-names-contract';
 
@@ -9,7 +10,12 @@ import type { KnownNames } from './known-names-contract';
 const PATH = '/api/recoveries';
 
 /** What the table of records asks for, besides the page. */
-export type RecordFilters = ScopeQuery & { sort: Sort; q?: string; importId?: string };
+export type RecordFilters = ScopeQuery & {
+  sort: Sort;
+  q?: string;
+  importId?: string;
+  exclusion?: Exclusion;
+} & MeasureRecords;
 
 /** One page: its size and the cursor of the list; without a cursor it is the first. */
 export type RecordPage = { limit: number; cursor: string | null };

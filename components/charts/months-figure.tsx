@@ -1,8 +1,9 @@
 'use client';
 
-import Link from 'next/link';
-import { useRouter } from 'next/navigation';
 import { type ReactNode, useState } from 'react';
+import type { Figure } from '@/analytics/figures/figure';
+import { FigureLink } from '@/components/figures/figure-link';
+import { useFigurePage } from '@/components/figures/figure-page';
 import { useNarrow } from '@/components/scope/use-narrow';
 import { formatMonth } from '@/lib/format';
 import { useMonthCursor } from './use-month-cursor';
@@ -26,8 +27,8 @@ type MonthsFigureProps = {
   height: { wide: number; narrow: number };
   /** A month's figures in words: shown when pointed at, read out when reached by keyboard. */
   wordsOf: (month: string) => string;
-  /** Where the records of a month are. */
-  recordsOf: (month: string) => string;
+  /** The figure that a month stands for; null opens nothing. */
+  figureOf: (month: string) => Figure | null;
   /** Further verbs for the month being read. */
   verbsOf?: (month: string) => ReactNode;
   /** Names beside their colours, where the picture has no room for them. */
@@ -37,20 +38,31 @@ type MonthsFigureProps = {
 
 /**
  * A picture of months with what a picture alone lacks: one tab stop in which arrows move from month to month, the month
- * in words, and a way to its records. A click holds the month, so that its verbs can be reached. The table beside it is
+ * in words, and a way to its records. The table beside it is
  * its equal for who does not see it.
  */
 export const MonthsFigure = (props: MonthsFigureProps) => {
-  const { label, months, narrowMonths, height: heights, wordsOf, recordsOf, verbsOf, legend, draw } = props;
+  const { label, months, narrowMonths, height: heights, wordsOf, figureOf, verbsOf, legend, draw } = props;
   const narrow = useNarrow();
-  const router = useRouter();
+  const page = useFigurePage();
   const [pointed, setPointed] = useState<string | null>(null);
   const [measured, width] = useWidth();
   const shown = narrow ? months.slice(-narrowMonths) : months;
-  const cursor = useMonthCursor(shown, (month) => router.push(recordsOf(month)));
+  const open = (month: string) => {
+    const figure = figureOf(month);
+    if (figure) page.open(figure);
+  };
+  const cursor = useMonthCursor(shown, open);
   const active = pointed !== null && shown.includes(pointed) ? pointed : cursor.active;
   const height = narrow ? heights.narrow : heights.wide;
   const first = shown[0];
+  const activeFigure = active === null ? null : figureOf(active);
+  /** The first click holds a month, so that its verbs can be reached; the next opens it. */
+  const click = () => {
+    if (pointed === null) return;
+    if (pointed === cursor.active) open(pointed);
+    else cursor.setActive(pointed);
+  };
   return (
     <figure className="m-0">
       {/* A slider is what a row of months is to a keyboard: arrows move along it and the value says what stands there. */}
@@ -66,7 +78,7 @@ export const MonthsFigure = (props: MonthsFigureProps) => {
           setPointed(null);
           cursor.onKeyDown(event);
         }}
-        onClick={() => pointed && cursor.setActive(pointed)}
+        onClick={click}
         onPointerLeave={(event) => event.pointerType === 'mouse' && setPointed(null)}
         style={{ height }}
         className="[&_.visx-bar]:stroke-sheet [&_.visx-bar]:[stroke-width:0.75px] [&_svg]:block [&_svg]:overflow-visible"
@@ -80,14 +92,16 @@ export const MonthsFigure = (props: MonthsFigureProps) => {
         {active ? (
           <>
             <span className="tabular-nums">{wordsOf(active)}</span>
-            <Link href={recordsOf(active)} className="link whitespace-nowrap print:hidden">
-              Open the records
-            </Link>
+            {activeFigure ? (
+              <FigureLink {...activeFigure} className="link whitespace-nowrap print:hidden">
+                Open the records
+              </FigureLink>
+            ) : null}
             {verbsOf?.(active)}
           </>
         ) : (
           <span className="print:hidden">
-            Point at a month to read it and click to hold it, or use the arrow keys.
+            Point at a month to read it, click to hold it and again to open it, or use the arrow keys and Enter.
             {narrow && first && months.length > shown.length
               ? ` The chart begins with ${formatMonth(first)}; the table below has every month.`
               : ''}

@@ -4,7 +4,8 @@ import dynamic from 'next/dynamic';
 import { type ReactNode, useMemo } from 'react';
 import { Loading } from '@/components/ui/states';
 import { formatDesignation } from '@/lib/format';
-import type { ChartLayer, ChartMonth, ChartNote } from './layer';
+import type { ChartModel } from './model';
+import { modelPicture } from './model-picture';
 import { MonthsFigure } from './months-figure';
 
 const HEIGHT = { wide: 400, narrow: 320 } as const;
@@ -17,25 +18,22 @@ const StackedMonths = dynamic(() => import('./stacked-months').then((module) => 
 });
 
 type StackedMonthsFigureProps = {
-  label: string;
-  layers: readonly ChartLayer[];
-  months: readonly ChartMonth[];
-  notes?: readonly ChartNote[];
-  wordsOf: (month: string) => string;
-  recordsOf: (month: string) => string;
+  model: ChartModel;
   verbsOf?: (month: string) => ReactNode;
 };
 
-const NO_NOTES: readonly ChartNote[] = [];
-
 /** Bars stacked by month, read by pointer and by keyboard. */
-export const StackedMonthsFigure = ({ layers, months, notes = NO_NOTES, ...figure }: StackedMonthsFigureProps) => {
+export const StackedMonthsFigure = ({ model, ...figure }: StackedMonthsFigureProps) => {
+  const { layers, months } = useMemo(() => modelPicture(model), [model]);
   const names = useMemo(() => months.map(({ month }) => month), [months]);
   // A phone's part of the months must be the same list as long as the months are: the series register themselves anew.
   const last = useMemo(() => months.slice(-NARROW_MONTHS), [months]);
   return (
     <MonthsFigure
       {...figure}
+      label={model.title}
+      wordsOf={(month) => model.months.find((other) => other.month === month)?.words ?? ''}
+      figureOf={(month) => model.open(month, model.total.key)}
       months={names}
       narrowMonths={NARROW_MONTHS}
       height={HEIGHT}
@@ -50,7 +48,7 @@ export const StackedMonthsFigure = ({ layers, months, notes = NO_NOTES, ...figur
         </ul>
       }
       draw={({ months: _, ...canvas }) => (
-        <StackedMonths {...canvas} layers={layers} months={canvas.narrow ? last : months} notes={notes} />
+        <StackedMonths {...canvas} layers={layers} months={canvas.narrow ? last : months} notes={model.marks} />
       )}
     />
   );

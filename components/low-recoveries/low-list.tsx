@@ -1,9 +1,23 @@
 import Link from 'next/link';
+import type { FigureScope } from '@/analytics/figures/figure';
 import type { LowRecovery } from '@/analytics/low-recoveries/contract';
+import { FigureLink } from '@/components/figures/figure-link';
 import { choiceName } from '@/components/scope/wording';
 import { formatCount, formatDay, formatDesignation, formatMass, formatMassWithUnit, formatPercent } from '@/lib/format';
 import type { DisplayUnit } from '@/lib/vocabulary';
 import { YieldStrip } from './yield-strip';
+
+/** Like jobs are those of the company's whole record, whatever the scope. */
+const likeJobsOf = ({ refrigerant, category }: LowRecovery): FigureScope => ({
+  from: null,
+  to: null,
+  refrigerant: [refrigerant],
+  category: [category],
+  technician: [],
+  site: [],
+  branch: [],
+  jobType: [],
+});
 
 const LowItem = ({ item, unit }: { item: LowRecovery; unit: DisplayUnit }) => (
   <li className="grid gap-x-8 gap-y-1.5 border-b border-rule-2 py-3.5 last:border-b-0 md:grid-cols-[minmax(0,1.2fr)_minmax(0,1fr)_minmax(0,1fr)] md:items-center">
@@ -22,12 +36,20 @@ const LowItem = ({ item, unit }: { item: LowRecovery; unit: DisplayUnit }) => (
       </p>
     </div>
     <p className="min-w-0">
-      <span className="font-mono text-lg font-medium">{formatPercent(item.yield)}</span>{' '}
+      <Link href={`/records/${item.recoveryId}`} className="figure-link font-mono text-lg font-medium">
+        {formatPercent(item.yield)}
+      </Link>{' '}
       <span className="text-ink-2">
         yield: {formatMass(item.recoveredMass, unit)} of {formatMassWithUnit(item.fullCharge, unit)}
       </span>
       <span className="block text-sm text-ink-2">
-        median of {formatCount(item.likeJobs)} like jobs {formatPercent(item.medianYield)}
+        median of{' '}
+        <FigureLink measure="recoveries" scope={likeJobsOf(item)}>
+          {formatCount(item.likeJobs)} like jobs
+        </FigureLink>{' '}
+        <FigureLink measure="medianYield" scope={likeJobsOf(item)}>
+          {formatPercent(item.medianYield)}
+        </FigureLink>
       </span>
     </p>
     <YieldStrip {...item} />

@@ -6,6 +6,7 @@ import { useLowRecoveries } from '@/analytics/low-recoveries/hook';
 import { LOW_ORDERS } from '@/analytics/low-recoveries/orders';
 import { lowAnswer, unjudgedNote } from '@/analytics/low-recoveries/sentence';
 import { scopeQuery } from '@/analytics/scope-address';
+import { FigureSentence } from '@/components/figures/figure-sentence';
 import { ScopedReport } from '@/components/scope/scoped-report';
 import { useScope } from '@/components/scope/use-scope';
 import { Button } from '@/components/ui/button';
@@ -38,8 +39,12 @@ export const LowRecoveriesScreen = () => {
         return (
           <>
             <PageHead
-              title={lowAnswer(judged)}
-              sub={`A reason to look, not a finding. ${unjudgedNote(judged)}`.trim()}
+              title={<FigureSentence pieces={lowAnswer(judged)} scope={scope} />}
+              sub={
+                <>
+                  A reason to look, not a finding. <FigureSentence pieces={unjudgedNote(judged)} scope={scope} />
+                </>
+              }
             />
             {items.length ? (
               <Sheet title="To look at" aside={<OrderChoice order={order} onChange={setOrder} />}>

@@ -2,17 +2,23 @@
 
 import Link from 'next/link';
 import { useSearchParams } from 'next/navigation';
-import type { ReactNode } from 'react';
+import { type ReactNode, useContext } from 'react';
+import { ListAddress } from './list-address';
 
 type RecordLinkProps = { id: string; className?: string; children: ReactNode };
 
 const behind = (search: string): string => (search ? `?${search}` : '');
 
+const useListSearch = (): string => {
+  const own = behind(useSearchParams().toString());
+  return useContext(ListAddress) ?? own;
+};
+
 /** Leads to a record and takes the address of the list along, so that the way back leads to the same rows. */
 export const RecordLink = ({ id, className, children }: RecordLinkProps) => {
-  const search = useSearchParams().toString();
+  const search = useListSearch();
   return (
-    <Link href={`/records/${id}${behind(search)}`} {...(className ? { className } : {})}>
+    <Link href={`/records/${id}${search}`} {...(className ? { className } : {})}>
       {children}
     </Link>
   );

@@ -14,18 +14,20 @@ import { RecordsCards } from './records-cards';
 import { RecordsTable } from './records-table';
 import { SearchBox } from './search-box';
 import type { RecordListState } from './use-record-list';
+import { onlyPhrase } from './wording';
 
 const NothingFound = ({ list }: { list: RecordListState }) => {
-  const { q, importId } = list.filters;
-  if (!q && !importId) return <NothingInScope />;
+  const { q } = list.filters;
+  const only = onlyPhrase(list.filters);
+  if (!q && !only) return <NothingInScope />;
   return (
     <Empty
       title="No record fits"
-      action={<Button onClick={() => (q ? list.setSearch('') : list.showAllImports())}>Show all in this scope</Button>}
+      action={<Button onClick={() => (q ? list.setSearch('') : list.showAll())}>Show all in this scope</Button>}
     >
       {q
         ? `“${q}” stands in no ref, technician, site or appliance of this scope.`
-        : 'No record of this import lies in the scope.'}
+        : `In this scope there are no records ${only}.`}
     </Empty>
   );
 };
@@ -35,15 +37,16 @@ type RecordsSheetProps = { list: RecordListState; data: RecordList; stale: boole
 /** The rows with what finds, sorts and pages them. */
 export const RecordsSheet = ({ list, data, stale }: RecordsSheetProps) => {
   const narrow = useNarrow();
+  const only = onlyPhrase(list.filters);
   const columns = list.columns ? (['recordRef', ...list.columns] as const) : USUAL_COLUMNS;
   const limit = PAGE_SIZES.find((size) => size === list.page.limit) ?? PAGE_SIZES[0];
   return (
     <section aria-label="Records" aria-busy={stale} className="bg-sheet px-4 pt-4 pb-4 sm:px-6">
       <div className="mb-3 flex flex-wrap items-center justify-between gap-3 print:hidden">
         <SearchBox value={list.filters.q ?? ''} onSearch={list.setSearch} />
-        {list.filters.importId ? (
+        {only ? (
           <p className="text-sm text-ink-2">
-            Only records that one import brought. <TextButton onClick={list.showAllImports}>Show all</TextButton>
+            Only records {only}. <TextButton onClick={list.showAll}>Show all</TextButton>
           </p>
         ) : null}
         {narrow ? null : <ColumnChooser columns={columns} onChange={list.setColumns} />}

@@ -2,7 +2,8 @@
 
 import { parseAsArrayOf, parseAsNumberLiteral, parseAsString, parseAsStringLiteral, useQueryStates } from 'nuqs';
 import { useMemo } from 'react';
-import { DEFAULT_SORT, PAGE_SIZES, type PageSize, SORTS, type Sort } from '@/analytics/records/constants';
+import { LIKE_JOBS_STANDINGS, PLANT_SIZES, STATED_READINGS } from '@/analytics/figures/measures';
+import { DEFAULT_SORT, EXCLUSIONS, PAGE_SIZES, type PageSize, SORTS, type Sort } from '@/analytics/records/constants';
 import type { RecordFilters, RecordPage } from '@/analytics/records/hook';
 import { scopeQuery } from '@/analytics/scope-address';
 import { useScope } from '@/components/scope/use-scope';
@@ -13,6 +14,10 @@ const PARSERS = {
   sort: parseAsStringLiteral(SORTS).withDefault(DEFAULT_SORT),
   q: parseAsString.withDefault(''),
   importId: parseAsString,
+  exclusion: parseAsStringLiteral(EXCLUSIONS),
+  likeJobs: parseAsStringLiteral(LIKE_JOBS_STANDINGS),
+  states: parseAsStringLiteral(STATED_READINGS),
+  plant: parseAsStringLiteral(PLANT_SIZES),
   limit: parseAsNumberLiteral(PAGE_SIZES).withDefault(PAGE_SIZES[0]),
   columns: parseAsArrayOf(parseAsStringLiteral(COLUMN_IDS)),
   /** Cursor of the page behind the mark of the list it belongs to. */
@@ -30,10 +35,19 @@ const markOf = (text: string): string => {
 export const useRecordList = () => {
   const { scope } = useScope();
   const [address, setAddress] = useQueryStates(PARSERS, { history: 'push' });
-  const { sort, q, importId, limit, columns, page } = address;
+  const { sort, q, importId, exclusion, likeJobs, states, plant, limit, columns, page } = address;
   const filters = useMemo<RecordFilters>(
-    () => ({ ...scopeQuery(scope), sort, ...(q ? { q } : {}), ...(importId ? { importId } : {}) }),
-    [scope, sort, q, importId],
+    () => ({
+      ...scopeQuery(scope),
+      sort,
+      ...(q ? { q } : {}),
+      ...(importId ? { importId } : {}),
+      ...(exclusion ? { exclusion } : {}),
+      ...(likeJobs ? { likeJobs } : {}),
+      ...(states ? { states } : {}),
+      ...(plant ? { plant } : {}),
+    }),
+    [scope, sort, q, importId, exclusion, likeJobs, states, plant],
   );
   const mark = `${markOf(searchString({ ...filters, limit }))}.`;
   const cursor = page?.startsWith(mark) ? page.slice(mark.length) : null;
@@ -47,7 +61,9 @@ export const useRecordList = () => {
     setLimit: (next: PageSize) => setAddress({ limit: next, page: null }),
     setColumns: (next: readonly ColumnId[] | null) => setAddress({ columns: next ? [...next] : null }),
     setCursor: (next: string | null) => setAddress({ page: next === null ? null : `${mark}${next}` }),
-    showAllImports: () => setAddress({ importId: null, page: null }),
+    /** Takes back what narrows the list besides scope and search. */
+    showAll: () =>
+      setAddress({ importId: null, exclusion: null, likeJobs: null, states: null, plant: null, page: null }),
   };
 };
 export type RecordListState = ReturnType<typeof useRecordList>;

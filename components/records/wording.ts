@@ -1,4 +1,6 @@
+import type { LikeJobsStanding } from '@/analytics/figures/measures';
 import type { SortKey } from '@/analytics/records/constants';
+import type { RecordFilters } from '@/analytics/records/hook';
 import { formatDesignation } from '@/lib/format';
 import type { Disposition, VacuumUnit } from '@/lib/vocabulary';
 import { CATEGORY_NAMES, JOB_TYPE_NAMES } from '@/lib/wording';
@@ -57,3 +59,30 @@ export const fieldValue = (field: string, value: string): string => {
   if (field === 'exclusion') return 'left out of the figures as an entry error';
   return CLOSED_LISTS[field]?.[value] ?? value;
 };
+
+const STANDING_PHRASES: Record<LikeJobsStanding, string> = {
+  below: 'far below their like jobs',
+  enough: 'with enough like jobs to be judged',
+  few: 'with too few like jobs to be judged',
+};
+
+/** What narrows a list besides scope and search, to stand behind "records"; empty when nothing does. */
+export const onlyPhrase = ({
+  importId,
+  exclusion,
+  likeJobs,
+  states,
+  plant,
+}: Pick<RecordFilters, 'importId' | 'exclusion' | 'likeJobs' | 'states' | 'plant'>): string =>
+  [
+    importId ? 'that one import brought' : '',
+    likeJobs ? STANDING_PHRASES[likeJobs] : '',
+    states === 'hold' ? 'that state a hold' : '',
+    states === 'vacuum' ? 'that state a final vacuum' : '',
+    plant === 'routine' ? 'of routine jobs' : '',
+    plant === 'large' ? 'of large plant' : '',
+    exclusion === 'none' ? 'that count in figures' : '',
+    exclusion === 'entry_error' ? 'left out of figures as entry errors' : '',
+  ]
+    .filter(Boolean)
+    .join(' and ');

@@ -2,6 +2,7 @@
 
 import { clsx } from 'clsx';
 import type { ReactNode } from 'react';
+import { FigurePage } from '@/components/figures/figure-page';
 import { Failed, Loading } from '@/components/ui/states';
 import { NothingInScope } from './nothing-in-scope';
 import { ScopeSentence } from './scope-sentence';
@@ -28,7 +29,7 @@ export const ScopedReport = <Answer,>({
   isEmpty,
   children,
 }: ScopedReportProps<Answer>) => (
-  <>
+  <FigurePage>
     <ScopeSentence />
     {data ? null : <h1 className="sr-only">{screen}</h1>}
     {data ? (
@@ -42,5 +43,5 @@ export const ScopedReport = <Answer,>({
         <Loading minHeight={480} />
       </div>
     )}
-  </>
+  </FigurePage>
 );

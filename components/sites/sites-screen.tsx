@@ -4,6 +4,7 @@ import { useMemo } from 'react';
 import { groupAnswer, spreadNote } from '@/analytics/group-sentence';
 import { scopeQuery } from '@/analytics/scope-address';
 import { useSiteRecoveries } from '@/analytics/sites/hook';
+import { FigureSentence } from '@/components/figures/figure-sentence';
 import { ScopedReport } from '@/components/scope/scoped-report';
 import { useScope } from '@/components/scope/use-scope';
 import { PageHead } from '@/components/ui/page-head';
@@ -29,7 +30,7 @@ export const SitesScreen = () => {
       {({ items }) => (
         <>
           <PageHead
-            title={groupAnswer(items, WORDS, scope.unit)}
+            title={<FigureSentence pieces={groupAnswer(items, WORDS, scope.unit)} scope={scope} />}
             sub={`${spreadNote(items, WORDS.many)} A low yield at a site may mean that its equipment leaks; its records show which unit.`.trim()}
           />
           <Sheet title="The sites" aside="by name; choose a heading to put them in another order">

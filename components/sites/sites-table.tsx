@@ -2,8 +2,10 @@
 
 import Link from 'next/link';
 import { useMemo } from 'react';
+import type { Measure } from '@/analytics/figures/measures';
 import { type ScopeSelection, scopeSearch } from '@/analytics/scope-address';
 import type { SiteRow } from '@/analytics/sites/contract';
+import { FigureLink } from '@/components/figures/figure-link';
 import { columnsFor, SortableTable } from '@/components/ui/sortable-table';
 import { formatCount, formatDay, formatMass, formatPercent } from '@/lib/format';
 
@@ -11,14 +13,24 @@ const column = columnsFor<SiteRow>();
 const rowId = (row: SiteRow) => row.siteId;
 
 const columnsOf = (scope: ScopeSelection) => {
-  const records = (site: string) => `/records${scopeSearch({ ...scope, site: [site] })}`;
+  const opens = (row: SiteRow, measure: Measure, figure: string) => (
+    <FigureLink measure={measure} scope={{ ...scope, site: [row.site] }}>
+      {figure}
+    </FigureLink>
+  );
+  /** A day opens what was recovered on it. */
+  const opensDay = (row: SiteRow, day: string) => (
+    <FigureLink measure="recoveries" scope={{ ...scope, from: day, to: day, site: [row.site] }}>
+      {formatDay(day)}
+    </FigureLink>
+  );
   return column.columns([
     column.accessor('site', {
       header: 'Site',
       sortFn: 'alphanumeric',
       meta: { rowHeader: true },
       cell: ({ row }) => (
-        <Link href={records(row.original.site)} className="link">
+        <Link href={`/records${scopeSearch({ ...scope, site: [row.original.site] })}`} className="link">
           {row.original.site}
         </Link>
       ),
@@ -26,41 +38,37 @@ const columnsOf = (scope: ScopeSelection) => {
     column.accessor('recoveries', {
       header: 'Recoveries',
       meta: { numeric: true },
-      cell: ({ row }) => (
-        <Link href={records(row.original.site)} className="figure-link">
-          {formatCount(row.original.recoveries)}
-        </Link>
-      ),
+      cell: ({ row, getValue }) => opens(row.original, 'recoveries', formatCount(getValue())),
     }),
     column.accessor('appliances', {
       header: 'Appliances',
       meta: { numeric: true },
-      cell: ({ getValue }) => formatCount(getValue()),
+      cell: ({ row, getValue }) => opens(row.original, 'appliances', formatCount(getValue())),
     }),
     column.accessor('recoveredMass', {
       header: `Recovered, ${scope.unit}`,
       meta: { numeric: true },
-      cell: ({ getValue }) => formatMass(getValue(), scope.unit),
+      cell: ({ row, getValue }) => opens(row.original, 'recoveredMass', formatMass(getValue(), scope.unit)),
     }),
     column.accessor('fullCharge', {
       header: `Full charge, ${scope.unit}`,
       meta: { numeric: true },
-      cell: ({ getValue }) => formatMass(getValue(), scope.unit),
+      cell: ({ row, getValue }) => opens(row.original, 'fullCharge', formatMass(getValue(), scope.unit)),
     }),
     column.accessor('totalYield', {
       header: 'Total yield',
       meta: { numeric: true },
-      cell: ({ getValue }) => formatPercent(getValue(), 1),
+      cell: ({ row, getValue }) => opens(row.original, 'totalYield', formatPercent(getValue(), 1)),
     }),
     column.accessor('medianYield', {
       header: 'Median yield',
       meta: { numeric: true },
-      cell: ({ getValue }) => formatPercent(getValue(), 1),
+      cell: ({ row, getValue }) => opens(row.original, 'medianYield', formatPercent(getValue(), 1)),
     }),
     column.accessor('lastRecoveredOn', {
       header: 'Last',
       meta: { numeric: true },
-      cell: ({ getValue }) => formatDay(getValue()),
+      cell: ({ row, getValue }) => opensDay(row.original, getValue()),
     }),
   ]);
 };

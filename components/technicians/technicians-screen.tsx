@@ -4,6 +4,7 @@ import { useMemo } from 'react';
 import { groupAnswer } from '@/analytics/group-sentence';
 import { scopeQuery } from '@/analytics/scope-address';
 import { useTechnicianRecoveries } from '@/analytics/technicians/hook';
+import { FigureSentence } from '@/components/figures/figure-sentence';
 import { ScopedReport } from '@/components/scope/scoped-report';
 import { useScope } from '@/components/scope/use-scope';
 import { PageHead } from '@/components/ui/page-head';
@@ -29,7 +30,7 @@ export const TechniciansScreen = () => {
       {({ items }) => (
         <>
           <PageHead
-            title={groupAnswer(items, WORDS, scope.unit)}
+            title={<FigureSentence pieces={groupAnswer(items, WORDS, scope.unit)} scope={scope} />}
             sub="A yield alone does not judge a person. A system that had leaked before anyone came gives little to the best technician, and large chillers give more than window units to anyone. Read the records before you speak to somebody."
           />
           <Sheet title="The crew" aside="by name; choose a heading to put it in another order">

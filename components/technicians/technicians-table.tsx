@@ -2,8 +2,10 @@
 
 import Link from 'next/link';
 import { useMemo } from 'react';
+import type { Measure } from '@/analytics/figures/measures';
 import { type ScopeSelection, scopeSearch } from '@/analytics/scope-address';
 import type { TechnicianRow } from '@/analytics/technicians/contract';
+import { FigureLink } from '@/components/figures/figure-link';
 import { columnsFor, SortableTable } from '@/components/ui/sortable-table';
 import { formatCount, formatDay, formatMass, formatPercent } from '@/lib/format';
 
@@ -11,14 +13,24 @@ const column = columnsFor<TechnicianRow>();
 const rowId = (row: TechnicianRow) => row.technicianId;
 
 const columnsOf = (scope: ScopeSelection) => {
-  const records = (technician: string) => `/records${scopeSearch({ ...scope, technician: [technician] })}`;
+  const opens = (row: TechnicianRow, measure: Measure, figure: string) => (
+    <FigureLink measure={measure} scope={{ ...scope, technician: [row.technician] }}>
+      {figure}
+    </FigureLink>
+  );
+  /** A day opens what was recovered on it. */
+  const opensDay = (row: TechnicianRow, day: string) => (
+    <FigureLink measure="recoveries" scope={{ ...scope, from: day, to: day, technician: [row.technician] }}>
+      {formatDay(day)}
+    </FigureLink>
+  );
   return column.columns([
     column.accessor('technician', {
       header: 'Technician',
       sortFn: 'alphanumeric',
       meta: { rowHeader: true },
       cell: ({ row }) => (
-        <Link href={records(row.original.technician)} className="link">
+        <Link href={`/records${scopeSearch({ ...scope, technician: [row.original.technician] })}`} className="link">
           {row.original.technician}
         </Link>
       ),
@@ -26,41 +38,37 @@ const columnsOf = (scope: ScopeSelection) => {
     column.accessor('recoveries', {
       header: 'Recoveries',
       meta: { numeric: true },
-      cell: ({ row }) => (
-        <Link href={records(row.original.technician)} className="figure-link">
-          {formatCount(row.original.recoveries)}
-        </Link>
-      ),
+      cell: ({ row, getValue }) => opens(row.original, 'recoveries', formatCount(getValue())),
     }),
     column.accessor('recoveredMass', {
       header: `Recovered, ${scope.unit}`,
       meta: { numeric: true },
-      cell: ({ getValue }) => formatMass(getValue(), scope.unit),
+      cell: ({ row, getValue }) => opens(row.original, 'recoveredMass', formatMass(getValue(), scope.unit)),
     }),
     column.accessor('fullCharge', {
       header: `Full charge, ${scope.unit}`,
       meta: { numeric: true },
-      cell: ({ getValue }) => formatMass(getValue(), scope.unit),
+      cell: ({ row, getValue }) => opens(row.original, 'fullCharge', formatMass(getValue(), scope.unit)),
     }),
     column.accessor('totalYield', {
       header: 'Total yield',
       meta: { numeric: true },
-      cell: ({ getValue }) => formatPercent(getValue(), 1),
+      cell: ({ row, getValue }) => opens(row.original, 'totalYield', formatPercent(getValue(), 1)),
     }),
     column.accessor('medianYield', {
       header: 'Median yield',
       meta: { numeric: true },
-      cell: ({ getValue }) => formatPercent(getValue(), 1),
+      cell: ({ row, getValue }) => opens(row.original, 'medianYield', formatPercent(getValue(), 1)),
     }),
     column.accessor('firstRecoveredOn', {
       header: 'First',
       meta: { numeric: true },
-      cell: ({ getValue }) => formatDay(getValue()),
+      cell: ({ row, getValue }) => opensDay(row.original, getValue()),
     }),
     column.accessor('lastRecoveredOn', {
       header: 'Last',
       meta: { numeric: true },
-      cell: ({ getValue }) => formatDay(getValue()),
+      cell: ({ row, getValue }) => opensDay(row.original, getValue()),
     }),
   ]);
 };

@@ -1,13 +1,13 @@
 'use client';
 
 import dynamic from 'next/dynamic';
-import Link from 'next/link';
 import { useMemo } from 'react';
 import { useMonthlyTrends } from '@/analytics/monthly-trends/hook';
 import { lastWholeMonth, type StackedMonth, type StackLayer, toStacks } from '@/analytics/monthly-trends/series';
-import { type ScopeQuery, type ScopeSelection, scopeSearch } from '@/analytics/scope-address';
+import type { ScopeQuery, ScopeSelection } from '@/analytics/scope-address';
 import { useSeen } from '@/components/charts/use-seen';
 import { useWidth } from '@/components/charts/use-width';
+import { FigureLink } from '@/components/figures/figure-link';
 import { Sheet } from '@/components/ui/sheet';
 import { formatMassWithUnit, formatMonth } from '@/lib/format';
 import { layerName } from './wording';
@@ -34,9 +34,9 @@ const Panel = ({ layer, months, highest, scope }: PanelProps) => {
       <figcaption className="mb-1">
         <span className="block truncate font-semibold">{name}</span>
         <span className="block text-sm text-ink-2">
-          <Link href={`/records${scopeSearch({ ...scope, branch: layer.members })}`} className="figure-link">
+          <FigureLink measure="recoveredMass" scope={{ ...scope, branch: layer.members }}>
             {formatMassWithUnit(total, scope.unit, 0)}
-          </Link>
+          </FigureLink>
           {inLatest}
         </span>
       </figcaption>

@@ -1,4 +1,5 @@
 import type { ReactNode } from 'react';
+import type { Measure } from '@/analytics/figures/measures';
 import type { Comparison, PeriodFigures } from '@/analytics/trends-comparison/contract';
 import { formatChange, formatCount, formatMass, formatNumber, formatPercent, plural } from '@/lib/format';
 import type { DisplayUnit } from '@/lib/vocabulary';
@@ -7,6 +8,8 @@ import { pointsWords } from './wording';
 /** One line of the comparison: the figure of each side, how it changed, and what is said in small. */
 export type ComparisonRow = {
   label: ReactNode;
+  /** What a side's figure measures, where it opens. */
+  measure?: Measure;
   figure: (side: PeriodFigures) => string;
   /** What the figure is a part of, or what it lacks. */
   small?: (side: PeriodFigures) => string;
@@ -30,33 +33,39 @@ export const comparisonRows = (
 ): ComparisonRow[] => [
   {
     label: `Recovered mass, ${unit}`,
+    measure: 'recoveredMass',
     figure: ({ recoveredMass }) => formatMass(recoveredMass, unit, 0),
     change: ratioChange(now.recoveredMass, before.recoveredMass),
     ...(ratio ? { changeSmall: `likely ${formatChange(ratio.low - 1)} to ${formatChange(ratio.high - 1)}` } : {}),
   },
   {
     label: 'Recoveries',
+    measure: 'recoveries',
     figure: ({ recoveries }) => formatCount(recoveries),
     change: ratioChange(now.recoveries, before.recoveries),
   },
   {
     label: 'Total yield',
+    measure: 'totalYield',
     figure: ({ totalYield }) => share(totalYield, 1),
     change: pointsChange(now.totalYield, before.totalYield),
   },
   {
     label: 'Median yield',
+    measure: 'medianYield',
     figure: ({ medianYield }) => share(medianYield, 1),
     change: pointsChange(now.medianYield, before.medianYield),
   },
   {
     label: 'Held',
+    measure: 'heldShare',
     figure: ({ heldShare }) => share(heldShare),
     small: ({ holdStated }) => `of ${formatCount(holdStated)} that state it`,
     change: pointsChange(now.heldShare, before.heldShare),
   },
   {
     label: 'Down to level',
+    measure: 'downToLevelShare',
     figure: ({ downToLevelShare }) => share(downToLevelShare),
     small: ({ vacuumStated }) => `of ${formatCount(vacuumStated)} that state a vacuum`,
     change: pointsChange(now.downToLevelShare, before.downToLevelShare),

@@ -1,8 +1,9 @@
-import Link from 'next/link';
 import type { ReactNode } from 'react';
-import { type ScopeSelection, scopeSearch } from '@/analytics/scope-address';
+import type { Measure } from '@/analytics/figures/measures';
+import type { ScopeSelection } from '@/analytics/scope-address';
 import type { Comparison, PeriodFigures } from '@/analytics/trends-comparison/contract';
 import { periodWords } from '@/analytics/trends-comparison/sentence';
+import { FigureLink } from '@/components/figures/figure-link';
 import { Table, Td, Th } from '@/components/ui/table';
 import { comparisonRows } from './comparison-rows';
 
@@ -11,12 +12,19 @@ type ComparisonTableProps = { comparison: Comparison; scope: ScopeSelection; co2
 /** Both periods side by side; every figure opens the records of its days. */
 export const ComparisonTable = ({ comparison, scope, co2eLabel }: ComparisonTableProps) => {
   const { now, before } = comparison;
-  const recordsOf = ({ from, to }: PeriodFigures) => `/records${scopeSearch({ ...scope, from, to })}`;
-  const side = (one: PeriodFigures, text: string, small = '') => (
+  const side = (one: PeriodFigures, measure: Measure | undefined, text: string, small = '') => (
     <Td numeric className="align-baseline">
-      <Link href={recordsOf(one)} className="figure-link decoration-transparent hover:decoration-current">
-        {text}
-      </Link>
+      {measure ? (
+        <FigureLink
+          measure={measure}
+          scope={{ ...scope, from: one.from, to: one.to }}
+          className="figure-link decoration-transparent hover:decoration-current"
+        >
+          {text}
+        </FigureLink>
+      ) : (
+        text
+      )}
       {small ? <span className="block text-xs whitespace-normal text-ink-2">{small}</span> : null}
     </Td>
   );
@@ -37,15 +45,15 @@ export const ComparisonTable = ({ comparison, scope, co2eLabel }: ComparisonTabl
       </thead>
       <tbody>
         {comparisonRows(comparison, scope.unit, co2eLabel).map(
-          ({ label, figure, small, change, changeSmall }, index) => (
+          ({ label, measure, figure, small, change, changeSmall }, index) => (
             // Rows are told in a fixed order.
             // biome-ignore lint/suspicious/noArrayIndexKey: labels are nodes, and the order never changes.
             <tr key={index}>
               <Th scope="row" className="align-baseline">
                 {label}
               </Th>
-              {side(now, figure(now), small?.(now))}
-              {side(before, figure(before), small?.(before))}
+              {side(now, measure, figure(now), small?.(now))}
+              {side(before, measure, figure(before), small?.(before))}
               <Td numeric className="align-baseline font-semibold">
                 {change}
                 {changeSmall ? (

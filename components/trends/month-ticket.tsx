@@ -1,11 +1,13 @@
-import Link from 'next/link';
 import type { ReactNode } from 'react';
+import { monthInScope } from '@/analytics/figures/figure';
+import type { Measure } from '@/analytics/figures/measures';
 import { monthsAfter, type StackedMonth } from '@/analytics/monthly-trends/series';
 import type { ScopeSelection } from '@/analytics/scope-address';
+import { FigureLink } from '@/components/figures/figure-link';
+import { formatCo2e } from '@/components/figures/wording';
 import { Ticket, type TicketRow } from '@/components/ui/ticket';
 import { useMay } from '@/components/viewer-context';
-import { formatCount, formatMass, formatMonth, formatNumber, formatPercent } from '@/lib/format';
-import { recordsHref, screenHref } from './records-link';
+import { formatCount, formatMass, formatMonth, formatPercent } from '@/lib/format';
 import { stateWord } from './wording';
 
 const share = (value: number | null, digits: number): string => (value === null ? '—' : formatPercent(value, digits));
@@ -16,15 +18,14 @@ const habit = (
   then: StackedMonth | undefined,
   part: 'held' | 'downToLevel',
   stated: 'holdStated' | 'vacuumStated',
+  opens: (text: string) => ReactNode,
 ): Pick<TicketRow, 'value' | 'small'> => {
   const of = (one: StackedMonth) => share(one[stated] > 0 ? one[part] / one[stated] : null, 0);
   return {
-    value: of(month),
+    value: opens(of(month)),
     small: then?.state === 'whole' && then[stated] > 0 ? `a year before ${of(then)}` : undefined,
   };
 };
-
-const KG_PER_TONNE = 1000;
 
 type MonthTicketProps = {
   month: StackedMonth;
@@ -36,40 +37,43 @@ type MonthTicketProps = {
 /** One month as a weigh ticket: net mass, recoveries, yields, CO2-equivalent, what to look at. */
 export const MonthTicket = ({ month, months, scope, className }: MonthTicketProps) => {
   const mayLook = useMay('flags:read');
-  const records = recordsHref(scope, month.month) ?? '/records';
-  const opens = (figure: ReactNode, href = records) => (
-    <Link href={href} className="figure-link">
+  const own = monthInScope(scope, month.month);
+  const opens = (measure: Measure, figure: ReactNode) => (
+    <FigureLink measure={measure} scope={own}>
       {figure}
-    </Link>
+    </FigureLink>
   );
   const then = months.find((other) => other.month === monthsAfter(month.month, -12));
   const flagged =
     month.flagged > 0 ? <span className="marked">{formatCount(month.flagged)}</span> : formatCount(month.flagged);
   const rows: TicketRow[] = [
-    { label: 'Recoveries', value: opens(formatCount(month.recoveries)) },
+    { label: 'Recoveries', value: opens('recoveries', formatCount(month.recoveries)) },
     {
       label: 'Total yield',
-      value: share(month.totalYield, 1),
+      value: opens('totalYield', share(month.totalYield, 1)),
       small: then?.state === 'whole' ? `a year before ${share(then.totalYield, 1)}` : undefined,
     },
-    { label: 'Median yield', value: share(month.medianYield, 0) },
-    { label: 'Held', ...habit(month, then, 'held', 'holdStated') },
-    { label: 'Down to level', ...habit(month, then, 'downToLevel', 'vacuumStated') },
+    { label: 'Median yield', value: opens('medianYield', share(month.medianYield, 0)) },
+    { label: 'Held', ...habit(month, then, 'held', 'holdStated', (text) => opens('heldShare', text)) },
+    {
+      label: 'Down to level',
+      ...habit(month, then, 'downToLevel', 'vacuumStated', (text) => opens('downToLevelShare', text)),
+    },
     {
       label: 'Kept from the air',
-      value: `${formatNumber(month.co2e / KG_PER_TONNE, month.co2e < 100 * KG_PER_TONNE ? 1 : 0)} t`,
+      value: opens('co2e', formatCo2e(month.co2e)),
       small: 'CO₂e, AR4',
     },
     {
       label: 'Far below like jobs',
-      value: mayLook ? opens(flagged, screenHref('/low-recoveries', scope, month.month)) : flagged,
+      value: mayLook ? opens('flagged', flagged) : flagged,
     },
   ];
   return (
     <Ticket
       heading={formatMonth(month.month)}
       of={stateWord(month) || 'the whole month'}
-      net={{ figure: opens(formatMass(month.recoveredMass, scope.unit)), unit: `${scope.unit} net` }}
+      net={{ figure: opens('recoveredMass', formatMass(month.recoveredMass, scope.unit)), unit: `${scope.unit} net` }}
       rows={rows}
       {...(className ? { className } : {})}
     />

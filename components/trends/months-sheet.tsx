@@ -4,14 +4,16 @@ import { useState } from 'react';
 import type { Dimension } from '@/analytics/dimensions';
 import { lastWholeMonth, type Stacks } from '@/analytics/monthly-trends/series';
 import type { NoteDraft } from '@/analytics/notes/hook';
-import type { ScopeSelection } from '@/analytics/scope-address';
+import type { ChartModel } from '@/components/charts/model';
+import { modelFile } from '@/components/charts/model-file';
+import { StackedMonthsFigure } from '@/components/charts/stacked-months-figure';
+import { FileButtons } from '@/components/files/file-buttons';
 import { NotesList } from '@/components/notes/notes-list';
 import { type NumberedNote, wholeMonth } from '@/components/notes/numbered';
 import { DIMENSION_WORDS } from '@/components/scope/wording';
 import { TextButton } from '@/components/ui/button';
 import { Sheet } from '@/components/ui/sheet';
 import { useMay } from '@/components/viewer-context';
-import { comparesYears, MonthsChart } from './months-chart';
 import { SplitSelector } from './split-selector';
 
 type MonthsSheetProps = {
@@ -20,14 +22,13 @@ type MonthsSheetProps = {
   shownBy: Dimension;
   by: Dimension;
   onSplit: (by: Dimension) => void;
-  scope: ScopeSelection;
-  colours: Record<string, string>;
+  model: ChartModel;
   notes: readonly NumberedNote[];
   className?: string;
 };
 
 /** The months as a chart, with the notes that explain them. */
-export const MonthsSheet = ({ stacks, shownBy, by, onSplit, scope, colours, notes, className }: MonthsSheetProps) => {
+export const MonthsSheet = ({ stacks, shownBy, by, onSplit, model, notes, className }: MonthsSheetProps) => {
   const mayWrite = useMay('notes:write');
   const [draft, setDraft] = useState<NoteDraft | null>(null);
   const write = (month: string) => setDraft({ ...wholeMonth(month), text: '' });
@@ -35,16 +36,13 @@ export const MonthsSheet = ({ stacks, shownBy, by, onSplit, scope, colours, note
   return (
     <Sheet
       title="Recovered mass by month"
-      aside={`${scope.unit}, by ${DIMENSION_WORDS[shownBy].one}${comparesYears(stacks) ? '; the line is the year before' : ''}`}
+      aside={`${model.unit}, by ${DIMENSION_WORDS[shownBy].one}${model.overlays.length ? '; the line is the year before' : ''}`}
+      tools={<FileButtons makeTable={() => modelFile(model)} />}
       {...(className ? { className } : {})}
     >
       <SplitSelector by={by} onChange={onSplit} />
-      <MonthsChart
-        stacks={stacks}
-        by={shownBy}
-        scope={scope}
-        colours={colours}
-        notes={notes}
+      <StackedMonthsFigure
+        model={model}
         verbsOf={(month) =>
           mayWrite ? (
             <TextButton className="print:hidden" onClick={() => write(month)}>

@@ -1,7 +1,7 @@
-import Link from 'next/link';
 import type { Dimension } from '@/analytics/dimensions';
-import { type ScopeSelection, scopeSearch } from '@/analytics/scope-address';
+import type { ScopeSelection } from '@/analytics/scope-address';
 import type { Comparison } from '@/analytics/trends-comparison/contract';
+import { FigureLink } from '@/components/figures/figure-link';
 import { choiceName } from '@/components/scope/wording';
 import { formatMass, plural } from '@/lib/format';
 import type { DisplayUnit } from '@/lib/vocabulary';
@@ -34,12 +34,13 @@ export const MoversList = ({ comparison: { movers, otherKeys, now }, by, scope }
                   style={difference < 0 ? { right: '50%', width } : { left: '50%', width }}
                 />
               </span>
-              <Link
-                href={`/records${scopeSearch({ ...scope, from: now.from, to: now.to, [by]: [key] })}`}
+              <FigureLink
+                measure="recoveredMass"
+                scope={{ ...scope, from: now.from, to: now.to, [by]: [key] }}
                 className="figure-link text-right decoration-transparent hover:decoration-current"
               >
                 {signed(difference, scope.unit)}
-              </Link>
+              </FigureLink>
             </li>
           );
         })}

@@ -18,7 +18,6 @@ import { Loading } from '@/components/ui/states';
 import { formatMass, formatMassWithUnit, formatMonth } from '@/lib/format';
 import { kgToUnit } from '@/lib/units';
 import type { DisplayUnit } from '@/lib/vocabulary';
-import { recordsHref } from './records-link';
 import { SeasonTable } from './season-table';
 
 /** A season shows itself over three years, whatever part of them the scope asks for. */
@@ -71,7 +70,7 @@ const SeasonFigure = ({ pattern, scope }: { pattern: ShownPattern; scope: ScopeS
           const month = months.find((other) => other.month === name);
           return month ? inWords(month, scope.unit) : '';
         }}
-        recordsOf={(month) => recordsHref({ ...scope, from: null, to: null }, month) ?? '/records'}
+        figureOf={(month) => ({ measure: 'routineMass', scope: { ...scope, from: month, to: month } })}
         legend={<p className="mt-2 text-sm text-ink-2">Points: recovered. Line: trend. Band: usual.</p>}
         draw={({ months: shown, ...canvas }) =>
           seen ? <SeasonMonths {...canvas} months={drawn.slice(-shown.length)} /> : null

@@ -1,10 +1,9 @@
-import Link from 'next/link';
 import type { ShownPatternMonth } from '@/analytics/monthly-pattern/contract';
 import { isUnusual, unusualWord } from '@/analytics/monthly-pattern/sentence';
 import type { ScopeSelection } from '@/analytics/scope-address';
+import { FigureLink } from '@/components/figures/figure-link';
 import { Table, Td, Th } from '@/components/ui/table';
 import { formatMass, formatMonth } from '@/lib/format';
-import { recordsHref } from './records-link';
 
 const verdict = (month: ShownPatternMonth): string => {
   if (!month.counts) return 'too few to judge';
@@ -36,12 +35,13 @@ export const SeasonTable = ({ months, scope }: SeasonTableProps) => (
                 {formatMonth(month.month, 'short')}
               </Th>
               <Td numeric>
-                <Link
-                  href={recordsHref({ ...scope, from: null, to: null }, month.month) ?? '/records'}
+                <FigureLink
+                  measure="routineMass"
+                  scope={{ ...scope, from: month.month, to: month.month }}
                   className="figure-link decoration-transparent hover:decoration-current"
                 >
                   {formatMass(month.recoveredMass, scope.unit)}
-                </Link>
+                </FigureLink>
               </Td>
               <Td numeric>{formatMass(month.trend, scope.unit)}</Td>
               <Td numeric>{month.seasonFactor.toFixed(2)}</Td>

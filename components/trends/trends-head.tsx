@@ -1,16 +1,16 @@
-import Link from 'next/link';
+import { monthInScope } from '@/analytics/figures/figure';
 import type { MonthlyPattern } from '@/analytics/monthly-pattern/contract';
 import { unusualNote } from '@/analytics/monthly-pattern/sentence';
 import type { MonthlyTrends } from '@/analytics/monthly-trends/contract';
 import { trendAnswer, trendNotes } from '@/analytics/monthly-trends/sentence';
 import type { Stacks } from '@/analytics/monthly-trends/series';
 import type { Note } from '@/analytics/notes/contract';
-import { type ScopeSelection, scopeSearch } from '@/analytics/scope-address';
+import type { ScopeSelection } from '@/analytics/scope-address';
 import type { Comparison } from '@/analytics/trends-comparison/contract';
 import { certaintyWords, comparisonAnswer, comparisonNote, moverNote } from '@/analytics/trends-comparison/sentence';
+import { FigureLink } from '@/components/figures/figure-link';
 import { choiceName } from '@/components/scope/wording';
 import { PageHead } from '@/components/ui/page-head';
-import { recordsHref } from './records-link';
 
 type TrendsHeadProps = {
   trends: MonthlyTrends;
@@ -34,7 +34,6 @@ export const TrendsHead = (props: TrendsHeadProps) => {
   const about = chosen ? comparison : null;
   const answer = about ? comparisonAnswer(about, scope.unit) : trendAnswer(stacks, scope.unit);
   const days = about ? { from: about.now.from, to: about.now.to } : {};
-  const href = (answer.month && recordsHref(scope, answer.month)) || `/records${scopeSearch({ ...scope, ...days })}`;
   const nameOf = (key: string) => choiceName(trends.by, key);
   // Only months that the chart shows are spoken of.
   const first = stacks.months[0]?.month ?? '';
@@ -59,9 +58,12 @@ export const TrendsHead = (props: TrendsHeadProps) => {
         <>
           {answer.before}
           {answer.figure ? (
-            <Link href={href} className="figure-link">
+            <FigureLink
+              measure="recoveredMass"
+              scope={answer.month ? monthInScope(scope, answer.month) : { ...scope, ...days }}
+            >
               {answer.figure}
-            </Link>
+            </FigureLink>
           ) : null}
           {answer.after}
         </>

@@ -6,6 +6,9 @@ import type { Dimension } from '@/analytics/dimensions';
 import type { MonthlyTrends } from '@/analytics/monthly-trends/contract';
 import { lastWholeMonth, toStacks } from '@/analytics/monthly-trends/series';
 import type { ScopeSelection } from '@/analytics/scope-address';
+import { modelFile } from '@/components/charts/model-file';
+import { ModelTable } from '@/components/charts/model-table';
+import { FileButtons } from '@/components/files/file-buttons';
 import { numbered } from '@/components/notes/numbered';
 import { NothingInScope } from '@/components/scope/nothing-in-scope';
 import { Sheet } from '@/components/ui/sheet';
@@ -13,8 +16,8 @@ import { BranchesSheet } from './branches-sheet';
 import { ComparisonSheet } from './comparison-sheet';
 import { layerColours } from './layer-colours';
 import { MonthTicket } from './month-ticket';
+import { monthsModel } from './months-model';
 import { MonthsSheet } from './months-sheet';
-import { MonthsTable } from './months-table';
 import { SeasonSheet } from './season-sheet';
 import { TrendsHead } from './trends-head';
 import type { TrendsFigures } from './use-trends-figures';
@@ -36,6 +39,10 @@ export const TrendsReport = ({ trends, figures, scope, by, onSplit }: TrendsRepo
   // While new figures come, keys are still those of the split before.
   const shownBy = trends.by;
   const colours = useMemo(() => layerColours(shownBy, stacks.layers), [shownBy, stacks.layers]);
+  const model = useMemo(
+    () => monthsModel(stacks, shownBy, scope, colours, notes),
+    [stacks, shownBy, scope, colours, notes],
+  );
   const ticketMonth = lastWholeMonth(stacks.months) ?? stacks.months.at(-1);
   if (!ticketMonth)
     return (
@@ -68,8 +75,7 @@ export const TrendsReport = ({ trends, figures, scope, by, onSplit }: TrendsRepo
         shownBy={shownBy}
         by={by}
         onSplit={onSplit}
-        scope={scope}
-        colours={colours}
+        model={model}
         notes={notes}
         className="lg:col-start-1"
       />
@@ -82,8 +88,16 @@ export const TrendsReport = ({ trends, figures, scope, by, onSplit }: TrendsRepo
       />
       <SeasonSheet data={pattern.data} error={pattern.error} scope={scope} className={wide} />
       <BranchesSheet query={query} scope={scope} className={wide} />
-      <Sheet title="Month by month" aside="newest first; every figure opens its records" className={wide}>
-        <MonthsTable stacks={stacks} by={shownBy} scope={scope} colours={colours} notes={notes} />
+      <Sheet
+        title="Month by month"
+        aside="newest first; every figure opens its records"
+        tools={<FileButtons makeTable={() => modelFile(model)} />}
+        className={wide}
+      >
+        <ModelTable
+          model={model}
+          label={`Recovered mass by month and ${shownBy === 'jobType' ? 'job type' : shownBy}`}
+        />
       </Sheet>
     </div>
   );

@@ -2,6 +2,7 @@
 
 import { parseAsStringLiteral, useQueryState } from 'nuqs';
 import { DIMENSIONS } from '@/analytics/dimensions';
+import { FigurePage } from '@/components/figures/figure-page';
 import { ScopeSentence } from '@/components/scope/scope-sentence';
 import { useScope } from '@/components/scope/use-scope';
 import { Failed } from '@/components/ui/states';
@@ -20,7 +21,7 @@ export const TrendsScreen = () => {
   // The answer is said once and whole: it does not grow while it is being read.
   const settled = !figures.comparison.isPending && !figures.pattern.isPending;
   return (
-    <>
+    <FigurePage>
       <ScopeSentence />
       {data && settled ? null : <h1 className="sr-only">Trends</h1>}
       {data && settled ? (
@@ -30,6 +31,6 @@ export const TrendsScreen = () => {
       ) : (
         <TrendsLoading />
       )}
-    </>
+    </FigurePage>
   );
 };

@@ -1,4 +1,5 @@
 import { expect, test } from 'vitest';
+import { piecesText } from '@/analytics/figures/pieces';
 import { groupAnswer, groupsOfHalf, spreadNote } from '@/analytics/group-sentence';
 import { lowAnswer, unjudgedNote } from '@/analytics/low-recoveries/sentence';
 
@@ -7,10 +8,12 @@ const group = (recoveredMass: number, recoveries = 1) => ({ recoveredMass, recov
 const words = { one: 'site', many: 'sites', verb: 'gave' };
 
 test('groups come to a sum in words', () => {
-  expect(plainSpaces(groupAnswer([group(10, 2), group(5, 1)], words, 'kg'))).toBe(
+  expect(plainSpaces(piecesText(groupAnswer([group(10, 2), group(5, 1)], words, 'kg')))).toBe(
     '2 sites gave 15 kg in 3 recoveries.',
   );
-  expect(plainSpaces(groupAnswer([group(0.45359237)], words, 'lb'))).toBe('1 site gave 1 lb in 1 recovery.');
+  expect(plainSpaces(piecesText(groupAnswer([group(0.45359237)], words, 'lb')))).toBe(
+    '1 site gave 1 lb in 1 recovery.',
+  );
 });
 
 test('half of the mass is counted from the largest down', () => {
@@ -32,10 +35,16 @@ test('a spread is only told where few hold half', () => {
 
 test('low recoveries in words', () => {
   const judged = { records: 1204, groups: 9, tooFewLikeJobs: 34, low: 12 };
-  expect(plainSpaces(lowAnswer(judged))).toBe('12 of 1,204 recoveries lie far below like jobs.');
-  expect(plainSpaces(lowAnswer({ ...judged, low: 1 }))).toBe('1 of 1,204 recoveries lies far below like jobs.');
-  expect(plainSpaces(lowAnswer({ ...judged, low: 0 }))).toBe('None of 1,204 recoveries lies far below like jobs.');
-  expect(lowAnswer({ ...judged, records: 0, low: 0 })).toBe('Too few like jobs to say anything.');
-  expect(plainSpaces(unjudgedNote(judged))).toBe('About 34 others nothing is said: fewer than 20 jobs are like them.');
-  expect(unjudgedNote({ ...judged, tooFewLikeJobs: 0 })).toBe('');
+  expect(plainSpaces(piecesText(lowAnswer(judged)))).toBe('12 of 1,204 recoveries lie far below like jobs.');
+  expect(plainSpaces(piecesText(lowAnswer({ ...judged, low: 1 })))).toBe(
+    '1 of 1,204 recoveries lies far below like jobs.',
+  );
+  expect(plainSpaces(piecesText(lowAnswer({ ...judged, low: 0 })))).toBe(
+    'None of 1,204 recoveries lies far below like jobs.',
+  );
+  expect(piecesText(lowAnswer({ ...judged, records: 0, low: 0 }))).toBe('Too few like jobs to say anything.');
+  expect(plainSpaces(piecesText(unjudgedNote(judged)))).toBe(
+    'About 34 others nothing is said: fewer than 20 jobs are like them.',
+  );
+  expect(piecesText(unjudgedNote({ ...judged, tooFewLikeJobs: 0 }))).toBe('');
 });

@@ -54,6 +54,8 @@ const byHand = (measure: Measure, rows: RecordRow[], { parts }: Explained): numb
     case 'recoveredMass':
     case 'fullCharge':
       return sumGrams(rows, measure) / 1000;
+    case 'routineMass':
+      return sumGrams(rows, 'recoveredMass') / 1000;
     case 'totalYield':
       return rows.length ? sumGrams(rows, 'recoveredMass') / sumGrams(rows, 'fullCharge') : null;
     case 'medianYield':
@@ -64,6 +66,10 @@ const byHand = (measure: Measure, rows: RecordRow[], { parts }: Explained): numb
       const gwps = new Map(parts.kind === 'gwp' ? parts.refrigerants.map((one) => [one.refrigerant, one.gwp]) : []);
       return rows.reduce((sum, row) => sum + row.recoveredMass * (gwps.get(row.refrigerant) ?? Number.NaN), 0);
     }
+    case 'heldShare':
+    case 'downToLevelShare':
+      // The list does not say what the records state; that it has as many of them is checked by count.
+      return parts.kind === 'part' && parts.of > 0 ? parts.part / rows.length : null;
     default:
       return rows.length;
   }
@@ -100,7 +106,8 @@ type Cell = { scope: FigureScope; figures: Partial<Record<Measure, number | null
 
 type Dimension = (typeof DIMENSIONS)[number];
 type Screen = (scope: FigureScope, by: Dimension) => Promise<Cell[]>;
-type Trends = { rows: { month: string; key: string }[]; months: { month: string }[]; totals: object };
+type Habits = { held: number; holdStated: number; downToLevel: number; vacuumStated: number };
+type Trends = { rows: { month: string; key: string }[]; months: ({ month: string } & Habits)[]; totals: object };
 
 const trendsOf = (scope: FigureScope, by: Dimension) =>
   ask<Trends>(trendsRoute, `/api/trends/monthly${searchString({ ...scopeQuery(scope), by })}`);
@@ -114,7 +121,13 @@ const SCREENS: Record<string, Screen> = {
   'trends, cells': async (scope, by) =>
     (await trendsOf(scope, by)).rows.map((row) => cell({ ...monthInScope(scope, row.month), [by]: [row.key] }, row)),
   'trends, months': async (scope, by) =>
-    (await trendsOf(scope, by)).months.map((row) => cell(monthInScope(scope, row.month), row)),
+    (await trendsOf(scope, by)).months.map((row) =>
+      cell(monthInScope(scope, row.month), {
+        ...row,
+        heldShare: row.holdStated ? row.held / row.holdStated : null,
+        downToLevelShare: row.vacuumStated ? row.downToLevel / row.vacuumStated : null,
+      }),
+    ),
   'trends, totals': async (scope, by) => [cell(scope, (await trendsOf(scope, by)).totals)],
   technicians: async (scope) =>
     (await itemsOf<{ technician: string }>(techniciansRoute, '/api/technicians', scope)).map((row) =>
@@ -124,6 +137,15 @@ const SCREENS: Record<string, Screen> = {
     (await itemsOf<{ site: string }>(sitesRoute, '/api/sites', scope)).map((row) =>
       cell({ ...scope, site: [row.site] }, row),
     ),
+  season: async (scope) => {
+    const list = await ask<RecordList>(
+      recordsRoute,
+      `/api/recoveries${searchString({ ...scopeQuery(scope), limit: 500 })}`,
+    );
+    // Routine jobs have a full charge below 100 lb: 45.359 kg.
+    const routine = list.items.filter((row) => row.exclusion === null && row.fullCharge < 45.3592);
+    return [cell(scope, { routineMass: sumGrams(routine, 'recoveredMass') / 1000 })];
+  },
   'low recoveries': async (scope) => {
     type Low = { judged: { records: number; low: number; tooFewLikeJobs: number } };
     const { judged } = await ask<Low>(lowRoute, `/api/low-recoveries${searchString(scopeQuery(scope))}`);

@@ -2,7 +2,8 @@
 import { cleanup, render, screen, within } from '@testing-library/react';
 import { afterEach, expect, test } from 'vitest';
 import { toStacks } from '@/analytics/monthly-trends/series';
-import { MonthsTable } from '@/components/trends/months-table';
+import { ModelTable } from '@/components/charts/model-table';
+import { monthsModel } from '@/components/trends/months-model';
 import { trendsOf } from '../support/trends';
 
 afterEach(cleanup);
@@ -32,7 +33,7 @@ const stacks = toStacks(
 );
 
 const rows = () => {
-  render(<MonthsTable stacks={stacks} by="refrigerant" scope={scope} colours={{}} />);
+  render(<ModelTable model={monthsModel(stacks, 'refrigerant', scope, {})} label="Recovered mass by month" />);
   return within(screen.getByRole('table'))
     .getAllByRole('row')
     .map((row) => [...row.children].map((cell) => cell.textContent?.replaceAll('\u2011', '-')));
@@ -63,12 +64,10 @@ test('a figure leads to its own records and to no others', () => {
   rows();
   const link = screen.getByRole('link', { name: '10.0' });
   const address = new URL(link.getAttribute('href') ?? '', 'http://tarebook.test');
-  expect(address.pathname).toBe('/records');
   expect(Object.fromEntries(address.searchParams)).toEqual({
-    from: '2026-11',
-    to: '2026-11',
-    branch: 'East',
-    refrigerant: 'R-22',
-    unit: 'lb',
+    open: 'recoveredMass',
+    'open.month': '2026-11',
+    'open.branch': 'East',
+    'open.refrigerant': 'R-22',
   });
 });

@@ -53,6 +53,9 @@ test('the main job needs no mouse', async ({ page }) => {
   await page.keyboard.press('ArrowLeft');
   await expect(chart).not.toHaveAttribute('aria-valuetext', before ?? '');
   await page.keyboard.press('Enter');
-  await expect(page).toHaveURL(/\/records\?.*refrigerant=/);
+  await expect(page).toHaveURL(/refrigerant=.*open=recoveredMass&open\.month=/);
   await expect(tableOf(page, 'Records')).toBeVisible();
+  await page.keyboard.press('Escape');
+  await expect(page).not.toHaveURL(/open=/);
+  await expect(chart).toBeFocused();
 });

@@ -110,6 +110,13 @@ test('an operations manager brings a file in and finds it in every screen', asyn
     await rowOf(page, ...FEBRUARY)
       .getByRole('link', { name: String(recoveries), exact: true })
       .click();
+    await expect(page).toHaveURL(/open=recoveries&open\.month=2015-02/);
+    const panel = page.getByRole('dialog');
+    const told = (await panel.getByText(/, together/).textContent()) ?? '';
+    expect(told.replace(/\s/g, ' ')).toContain(`${recoveries} recoveries, together `);
+    const sum = Number(told.match(/together ([\d,.]+)/)?.[1]?.replace(',', ''));
+    expect(Math.abs(sum - sumOf(inFebruary).massLb)).toBeLessThanOrEqual(0.0501);
+    await panel.getByRole('link', { name: 'Show as a list' }).click();
     await expect(page).toHaveURL(/\/records\?/);
     await expect(page.getByRole('heading', { level: 1 })).toContainText(`${recoveries} records`);
   });

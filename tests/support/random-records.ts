@@ -31,7 +31,7 @@ export const randomRecords = (count: number, seed: number): TestRecord[] => {
   const one = <Value>(values: readonly Value[]): Value => values[Math.floor(random() * values.length)] as Value;
   return Array.from({ length: count }, (_, index) => {
     const day = new Date(Date.UTC(2025, 9, 1 + Math.floor(random() * 425)));
-    const chargeGrams = 500 + Math.floor(random() * 40_000);
+    const chargeGrams = 500 + Math.floor(random() * 60_000);
     const share = random() < 0.11 ? random() * 0.2 : 0.75 + random() * 0.25;
     return {
       ref: `random-${seed}-${index}`,
@@ -45,6 +45,8 @@ export const randomRecords = (count: number, seed: number): TestRecord[] => {
       branch: one(RANDOM_NAMES.branch),
       category: one(RANDOM_NAMES.category),
       jobType: one(RANDOM_NAMES.jobType),
+      ...one([{}, { holdMinutes: 0 }, { holdMinutes: 10 }]),
+      ...one([{}, { vacuumKpaAbs: '60' }, { vacuumKpaAbs: '95' }, { vacuumKpaAbs: '110' }]),
       excluded: random() < 1 / 12,
     };
   });

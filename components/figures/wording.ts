@@ -1,0 +1,56 @@
+import { DIMENSIONS } from '@/analytics/dimensions';
+import type { FigureScope } from '@/analytics/figures/figure';
+import type { Measure } from '@/analytics/figures/measures';
+import { choicePhrase, periodPhrase } from '@/components/scope/wording';
+import { formatCount, formatMassWithUnit, formatNumber, formatPercent } from '@/lib/format';
+import type { DisplayUnit } from '@/lib/vocabulary';
+
+/** What each measure is called at the head of its panel. */
+export const MEASURE_NAMES: Record<Measure, string> = {
+  recoveredMass: 'Recovered mass',
+  recoveries: 'Recoveries',
+  fullCharge: 'Full charge',
+  totalYield: 'Total yield',
+  medianYield: 'Median yield',
+  co2e: 'CO₂-equivalent kept from the air',
+  appliances: 'Appliances',
+  flagged: 'Far below like jobs',
+  judged: 'Judged by like jobs',
+  unjudged: 'Too few like jobs to judge',
+  routineMass: 'Recovered mass of routine jobs',
+  heldShare: 'Held',
+  downToLevelShare: 'Down to level',
+};
+
+const KG_PER_TONNE = 1000;
+
+/** CO2-equivalent is spoken of in tonnes, whatever masses are read in. */
+export const formatCo2e = (kg: number): string =>
+  `${formatNumber(kg / KG_PER_TONNE, kg < 100 * KG_PER_TONNE ? 1 : 0)}\u00a0t`;
+
+/** The value of a measure with its unit; a dash where there is none. */
+export const formatMeasure = (measure: Measure, value: number | null, unit: DisplayUnit): string => {
+  if (value === null) return '—';
+  switch (measure) {
+    case 'recoveredMass':
+    case 'fullCharge':
+    case 'routineMass':
+      return formatMassWithUnit(value, unit);
+    case 'co2e':
+      return formatCo2e(value);
+    case 'totalYield':
+    case 'medianYield':
+    case 'heldShare':
+    case 'downToLevelShare':
+      return formatPercent(value, 1);
+    default:
+      return formatCount(value);
+  }
+};
+
+/** The scope of a figure in words, parts that narrow nothing left out: `November 2026, R‑22, East`. */
+export const figureScopePhrase = (scope: FigureScope): string =>
+  [
+    periodPhrase(scope),
+    ...DIMENSIONS.flatMap((dimension) => (scope[dimension].length ? [choicePhrase(dimension, scope[dimension])] : [])),
+  ].join(', ');
