@@ -28,7 +28,7 @@ process.on('exit', endChildren);
  */
 export const runNode = (
   args: string[],
-  { environment = process.env, show = false, limitMinutes = 10 }: Options = {},
+  { environment = process.env, show = false, limitMinutes = 20 }: Options = {},
 ): Promise<Ended> =>
   new Promise((resolve, reject) => {
     const output = show ? process.stderr : 'pipe';

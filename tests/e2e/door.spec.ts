@@ -95,6 +95,8 @@ test('the form leads to where one wanted to go, and signing out leads back to th
   await page.getByLabel('Password', { exact: true }).fill(operations().password);
   await page.getByRole('button', { name: 'Sign in' }).click();
   await expect(page).toHaveURL(/\/trends\?from=2025-01/);
+  const session = (await page.context().cookies()).find(({ name }) => name === 'next-auth.session-token');
+  expect(session).toMatchObject({ httpOnly: true, sameSite: 'Lax', path: '/' });
   await page.getByRole('button', { name: /Desmond Achterberg/ }).click();
   await page.getByRole('button', { name: 'Sign out' }).click();
   await expect(page).toHaveURL(/\/sign-in/);
