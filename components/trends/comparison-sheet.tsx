@@ -61,10 +61,13 @@ export const ComparisonSheet = ({ data, error, scope, address, className }: Comp
                 <>
                   Kept from the air, t CO₂e
                   <span className="block text-xs text-ink-2">
-                    GWP of {GWP_NAMES[data.gwp]}, 100 years;{' '}
-                    <TextButton onClick={() => setGwp(other)} className="text-xs print:hidden">
-                      use {GWP_NAMES[other]}
-                    </TextButton>
+                    GWP of {GWP_NAMES[data.gwp]}, 100 years
+                    <span className="print:hidden">
+                      ;{' '}
+                      <TextButton onClick={() => setGwp(other)} className="text-xs">
+                        use {GWP_NAMES[other]}
+                      </TextButton>
+                    </span>
                   </span>
                 </>
               }
