@@ -72,7 +72,11 @@ export const BranchesSheet = ({ query, scope, className }: BranchesSheetProps) =
     <div ref={seenRef} {...(className ? { className } : {})}>
       <Sheet
         title="Branch by branch"
-        aside={`bars of one scale, the highest ${formatMassWithUnit(highest, scope.unit, 0)} a month`}
+        aside={
+          stacks
+            ? `bars of one scale, the highest ${formatMassWithUnit(highest, scope.unit, 0)} a month`
+            : 'bars of one scale'
+        }
       >
         <div className="grid min-h-44 gap-x-8 gap-y-6 pb-2 sm:grid-cols-2 lg:grid-cols-3">
           {stacks?.layers.map((layer) => (
