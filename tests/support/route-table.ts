@@ -90,6 +90,7 @@ export const ROUTES: Record<string, RouteRule> = {
     status: 409,
   },
   'DELETE /api/notes/[id]': { action: 'notes:write', id: noteId, search: '?version=999', status: 409 },
+  'GET /api/openapi.json': { open: 'it says what the API looks like, the same to everybody, and holds no data' },
   'GET /api/recoveries': {
     action: 'records:read',
     status: 200,

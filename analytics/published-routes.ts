@@ -1,0 +1,70 @@
+import { z } from 'zod';
+import type { Contract } from '@/lib/api/contract';
+import type { PublishedRoute } from '@/lib/api/openapi';
+import { importListSchema, importSchema } from '@/lib/imports/contract';
+import { explain } from './explain/contract';
+import { lowRecoveriesList } from './low-recoveries/contract';
+import { monthlyPattern } from './monthly-pattern/contract';
+import { monthlyTrends } from './monthly-trends/contract';
+import { notesList } from './notes/contract';
+import { recordHistorySchema, recordListContract, recordSchema } from './records/contract';
+import { knownNamesContract } from './records/known-names-contract';
+import { scopeOptions } from './scope-options/contract';
+import { siteRecoveries } from './sites/contract';
+import { technicianRecoveries } from './technicians/contract';
+import { trendsComparison } from './trends-comparison/contract';
+
+const published = (
+  { path, action, query, response }: Contract<z.ZodType, z.ZodType>,
+  summary: string,
+): PublishedRoute => ({ path, action, query, answer: response, summary });
+
+const health = z.object({ status: z.enum(['ok', 'failing']), database: z.string(), version: z.string() });
+
+/** Every route that reads, for programs: a test holds this list against the handlers that there are. */
+export const PUBLISHED_ROUTES: readonly PublishedRoute[] = [
+  published(explain, 'How a figure was computed, and the query of its records'),
+  published(monthlyTrends, 'Recovered mass by month, split by one dimension'),
+  published(trendsComparison, 'A period against another one, like for like'),
+  published(monthlyPattern, 'Season, trend and unusual months'),
+  published(technicianRecoveries, 'What each technician recovered'),
+  published(siteRecoveries, 'What was recovered at each site'),
+  published(lowRecoveriesList, 'Recoveries far below like jobs'),
+  published(recordListContract, 'Records, page by page; with format=csv all of them as a recovery file'),
+  published(knownNamesContract, 'Names that a new record can use'),
+  published(scopeOptions, 'What a scope can be narrowed to'),
+  published(notesList, 'Notes pinned to days'),
+  {
+    path: '/api/recoveries/{id}',
+    summary: 'One record',
+    action: 'records:read',
+    answer: recordSchema,
+  },
+  {
+    path: '/api/recoveries/{id}/history',
+    summary: 'Every change of a record, newest first',
+    action: 'records:read',
+    answer: recordHistorySchema,
+  },
+  { path: '/api/imports', summary: 'Imports, newest first', action: 'imports:manage', answer: importListSchema },
+  {
+    path: '/api/imports/{id}',
+    summary: 'How far an import is and what came of it',
+    action: 'imports:manage',
+    answer: importSchema,
+  },
+  {
+    path: '/api/imports/{id}/rejected.csv',
+    summary: 'The refused rows as they came, with their reasons',
+    action: 'imports:manage',
+    answer: 'text/csv',
+  },
+  {
+    path: '/api/work',
+    summary: 'How much background work is waiting or under way',
+    action: 'records:read',
+    answer: z.object({ pending: z.int().nonnegative() }),
+  },
+  { path: '/api/health', summary: 'Whether the database answers', action: null, answer: health },
+  { path: '/api/openapi.json', summary: 'This document', action: null, answer: z.record(z.string(), z.unknown()) },
+];
