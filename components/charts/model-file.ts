@@ -1,10 +1,6 @@
-import type { FileColumn, FileTable } from '@/components/files/file-table';
+import { type FileColumn, type FileTable, massCell } from '@/components/files/file-table';
 import { plainCharacters } from '@/lib/format';
-import { type ChartColumn, type ChartModel, fileColumns, shownValue } from './model';
-
-/** Masses to the thousandth of the unit, finer than any scale of the trade; shares are left as they are. */
-const rounded = (value: number, kind: ChartColumn['kind']): number =>
-  kind === 'mass' ? Math.round(value * 1000) / 1000 : value;
+import { type ChartModel, fileColumns } from './model';
 
 /** The model as rows for a file, the oldest month first. */
 export const modelFile = (model: ChartModel): FileTable => {
@@ -29,8 +25,8 @@ export const modelFile = (model: ChartModel): FileTable => {
       month,
       stateWord || 'whole',
       ...columns.map(({ kind, values }) => {
-        const value = shownValue(values[index] ?? null, kind, unit);
-        return value === null ? null : rounded(value, kind);
+        const value = values[index] ?? null;
+        return value === null || kind !== 'mass' ? value : massCell(value, unit);
       }),
       ...notes.map(() => pinned.map(({ text }) => text).join(' | ')),
     ]),

@@ -1,3 +1,4 @@
+import { kgToUnit } from '@/lib/units';
 import type { DisplayUnit } from '@/lib/vocabulary';
 
 /** What the cells of a column are: text, `YYYY-MM`, `YYYY-MM-DD`, masses in the table's unit, counts, shares, changes. */
@@ -13,6 +14,9 @@ export type FileTable = {
   columns: readonly FileColumn[];
   rows: readonly (readonly FileCell[])[];
 };
+
+/** A mass of the API for a file: in the unit, to its thousandth, finer than any scale of the trade. */
+export const massCell = (kg: number, unit: DisplayUnit): number => Math.round(kgToUnit(kg, unit) * 1000) / 1000;
 
 /** When and where a file was made. */
 export type FileOrigin = { madeAt: Date; address: string };

@@ -5,10 +5,12 @@ import { groupAnswer, spreadNote } from '@/analytics/group-sentence';
 import { scopeQuery } from '@/analytics/scope-address';
 import { useSiteRecoveries } from '@/analytics/sites/hook';
 import { FigureSentence } from '@/components/figures/figure-sentence';
+import { FileButtons } from '@/components/files/file-buttons';
 import { ScopedReport } from '@/components/scope/scoped-report';
 import { useScope } from '@/components/scope/use-scope';
 import { PageHead } from '@/components/ui/page-head';
 import { Sheet } from '@/components/ui/sheet';
+import { sitesFile } from './sites-file';
 import { SitesTable } from './sites-table';
 
 const WORDS = { one: 'site', many: 'sites', verb: 'gave' };
@@ -33,7 +35,11 @@ export const SitesScreen = () => {
             title={<FigureSentence pieces={groupAnswer(items, WORDS, scope.unit)} scope={scope} />}
             sub={`${spreadNote(items, WORDS.many)} A low yield at a site may mean that its equipment leaks; its records show which unit.`.trim()}
           />
-          <Sheet title="The sites" aside="by name; choose a heading to put them in another order">
+          <Sheet
+            title="The sites"
+            aside="by name; choose a heading to put them in another order"
+            tools={<FileButtons makeTable={() => sitesFile(items, scope)} />}
+          >
             <SitesTable items={items} scope={scope} />
           </Sheet>
           <p className="max-w-prose text-sm text-ink-2">
