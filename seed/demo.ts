@@ -37,9 +37,13 @@ const makeOne = async (
   return companyId;
 };
 
-const makeDemo = async (): Promise<void> => {
+/** Until the server has counted what came in it plans for next to nothing, and the first screens would wait for it. */
+const countRows = (urls: DatabaseUrls) => withConnection(urls.owner, (owner) => owner.query('analyze'));
+
+const makeDemo = async (urls: DatabaseUrls): Promise<void> => {
   const endMonth = monthBefore(Temporal.Now.instant(), TIME_ZONE);
   const made = [await makeOne(demoPlan(endMonth), addCrewSignIns), await makeOne(smallPlan(endMonth), addSmallOwner)];
+  await countRows(urls);
   for (const companyId of made) await markDemo(companyId, 'whole');
 };
 
@@ -68,11 +72,11 @@ export const seedDemoIfEmpty = async (urls: DatabaseUrls, say: (line: string) =>
   if (!broken && !(await isUntouched(urls))) return;
   say('filling the demo company');
   for (const { id } of found) await removeCompany(urls.owner, id);
-  await makeDemo();
+  await makeDemo(urls);
 };
 
 /** Removes the demo companies and makes them anew; other companies stay as they are. */
 export const resetDemo = async (urls: DatabaseUrls): Promise<void> => {
   for (const { id } of await demoCompanies()) await removeCompany(urls.owner, id);
-  await makeDemo();
+  await makeDemo(urls);
 };
