@@ -21,6 +21,9 @@ import { summarize } from './summary';
 
 const TELL_EVERY_ROWS = 5_000;
 
+/** From so many changed records on the planner must be told, or the first screen after the import waits too long. */
+const REFRESH_FROM_ROWS = 1_000;
+
 /*
  * Takes a file in, in these steps:
  *
@@ -86,6 +89,8 @@ const takeRows = (work: ImportWork, plan: FilePlan): Promise<void> =>
     if (!work.dryRun) {
       await rememberMapping(client, work, plan);
       await write(client, work, plan, stated);
+      const { added = 0, updated = 0 } = counts.rows[0] ?? {};
+      if (added + updated >= REFRESH_FROM_ROWS) await client.query('select refresh_statistics()');
     }
     await client.query(FINISH_IMPORT, [...owner, counts.rows[0], summary]);
   });
