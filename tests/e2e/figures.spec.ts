@@ -142,8 +142,8 @@ test.describe('on a phone', () => {
     await page.goto('/trends');
     await page.getByRole('heading', { level: 1 }).getByRole('link').click();
     await expect(panelOf(page).getByRole('list', { name: 'Records' })).toBeVisible();
-    const box = await panelOf(page).boundingBox();
-    expect(box).toMatchObject({ x: 0, width: 390, height: 844 });
+    // Once it has slid in.
+    await expect.poll(() => panelOf(page).boundingBox()).toMatchObject({ x: 0, width: 390, height: 844 });
     const beyond = await panelOf(page).evaluate((panel) =>
       [panel, ...panel.querySelectorAll('*')].some((part) => part.getBoundingClientRect().right > 391),
     );
