@@ -41,19 +41,15 @@ const addressOf = async (context: BrowserContext, address: string, screen: strin
   return items.length ? screen.replace(/\[\w+\]/, idOf(items[0])) : null;
 };
 
-const scrollThrough = async (page: Page): Promise<void> => {
-  // Pictures are drawn when they are seen.
-  await page.evaluate(async () => {
-    for (let y = 0; y < document.body.scrollHeight; y += window.innerHeight) {
-      window.scrollTo(0, y);
-      await new Promise((done) => setTimeout(done, 60));
-    }
-    window.scrollTo(0, 0);
-  });
+/** A window as high as the page: pictures are drawn when they are seen, and what is fixed stands at its edges. */
+const growToPage = async (page: Page, width: number): Promise<void> => {
+  const height = await page.evaluate(() => document.documentElement.scrollHeight);
+  await page.setViewportSize({ width, height: Math.max(height, page.viewportSize()?.height ?? 0) });
+  await page.waitForTimeout(500);
 };
 
 /** Waits until nothing is being read or drawn; a page that never gets there is pictured as it is. */
-const comeToRest = async (page: Page): Promise<void> => {
+const comeToRest = async (page: Page, width: number): Promise<void> => {
   const busy = page.getByRole('status').filter({ hasText: /^(Reading|Drawing)/ });
   const settled = () =>
     busy
@@ -62,8 +58,9 @@ const comeToRest = async (page: Page): Promise<void> => {
       .catch(() => undefined);
   await page.waitForLoadState('networkidle', { timeout: PATIENCE_MS }).catch(() => undefined);
   await settled();
-  await scrollThrough(page);
+  await growToPage(page, width);
   await settled();
+  await growToPage(page, width);
 };
 
 type Visit = {
@@ -89,7 +86,7 @@ export const take = async ({ browser, address, folder, cookies }: Visit, picture
     const page = await context.newPage();
     await state.prepare?.(page);
     await page.goto(address + path, { waitUntil: 'domcontentloaded' });
-    if (state.rests) await comeToRest(page);
+    if (state.rests) await comeToRest(page, picture.width);
     else await page.waitForTimeout(1500);
     await mkdir(folder, { recursive: true });
     await page.screenshot({ path: join(folder, fileOf(picture)), fullPage: true, animations: 'disabled' });
