@@ -1,6 +1,6 @@
 import 'server-only';
 import { and, eq, isNull, lt, sql } from 'drizzle-orm';
-import { factFigures, toGram } from '@/analytics/figures';
+import { factFigures, toGram } from '@/analytics/fact-figures';
 import type { Figure } from '@/analytics/figures/figure';
 import { getJudged } from '@/analytics/low-recoveries/query';
 import { LARGE_PLANT_KG } from '@/analytics/monthly-pattern/pattern';

@@ -1,6 +1,6 @@
 import 'server-only';
 import { desc, eq, sql } from 'drizzle-orm';
-import { factFigures, toGram } from '@/analytics/figures';
+import { factFigures, toGram } from '@/analytics/fact-figures';
 import { MEASURE_UNITS, RECORDS_OF } from '@/analytics/figures/measures';
 import { recordsInList } from '@/analytics/records/filters';
 import type { Scope } from '@/analytics/scope';

@@ -1,6 +1,6 @@
 import 'server-only';
 import { and, eq, isNull, type SQL, sql } from 'drizzle-orm';
-import { toGram } from '@/analytics/figures';
+import { toGram } from '@/analytics/fact-figures';
 import { type Scope, UNSTATED } from '@/analytics/scope';
 import { inScope } from '@/analytics/scope-query';
 import type { Tx } from '@/db/client';

@@ -1,6 +1,6 @@
 import 'server-only';
 import { and, isNull, lt, not, type SQL, sql } from 'drizzle-orm';
-import { toGram } from '@/analytics/figures';
+import { toGram } from '@/analytics/fact-figures';
 import { cutMonths, partialMonth } from '@/analytics/monthly-trends/range';
 import { everyMonth } from '@/analytics/monthly-trends/series';
 import type { Scope } from '@/analytics/scope';

@@ -1,6 +1,6 @@
 import 'server-only';
 import { and, gte, lt, type SQLWrapper, sql } from 'drizzle-orm';
-import { factFigures, habitFigures, toGram } from '@/analytics/figures';
+import { factFigures, habitFigures, toGram } from '@/analytics/fact-figures';
 import { dayAfter, firstDay, type Scope } from '@/analytics/scope';
 import { inScope } from '@/analytics/scope-query';
 import type { Tx } from '@/db/client';

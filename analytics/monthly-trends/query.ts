@@ -1,6 +1,6 @@
 import 'server-only';
 import { and, eq, isNull, sql } from 'drizzle-orm';
-import { toGram } from '@/analytics/figures';
+import { toGram } from '@/analytics/fact-figures';
 import type { Dimension, Scope } from '@/analytics/scope';
 import { FACT_COLUMNS, inScope } from '@/analytics/scope-query';
 import type { Tx } from '@/db/client';

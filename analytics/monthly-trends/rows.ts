@@ -1,6 +1,6 @@
 import 'server-only';
 import { and, gte, isNull, lt, type SQL, sql } from 'drizzle-orm';
-import { factFigures, toGram } from '@/analytics/figures';
+import { factFigures, toGram } from '@/analytics/fact-figures';
 import { type Dimension, dayAfter, firstDay, type Scope, UNSTATED } from '@/analytics/scope';
 import { FACT_COLUMNS, inScope, isOneOf } from '@/analytics/scope-query';
 import type { Tx } from '@/db/client';

@@ -1,6 +1,6 @@
 import 'server-only';
 import { and, isNull, sql } from 'drizzle-orm';
-import { factFigures } from '@/analytics/figures';
+import { factFigures } from '@/analytics/fact-figures';
 import type { Scope } from '@/analytics/scope';
 import { inScope } from '@/analytics/scope-query';
 import type { Tx } from '@/db/client';

@@ -1,6 +1,6 @@
 import 'server-only';
 import { and, eq, or, sql } from 'drizzle-orm';
-import { factFigures, toGram } from '@/analytics/figures';
+import { factFigures, toGram } from '@/analytics/fact-figures';
 import type { Scope } from '@/analytics/scope';
 import { Z_95 } from '@/analytics/statistics/distributions/z-95';
 import { compareSums } from '@/analytics/statistics/season/year-on-year';

@@ -1,7 +1,7 @@
 import 'server-only';
 import { and, eq, gte, inArray, isNotNull, isNull, lt, or, type SQL, sql } from 'drizzle-orm';
 import { unionAll } from 'drizzle-orm/pg-core';
-import { toGram } from '@/analytics/figures';
+import { toGram } from '@/analytics/fact-figures';
 import { keyOf, MONTHLY_VIEWS } from '@/analytics/monthly-trends/rows';
 import { DIMENSIONS, type Dimension, type Scope } from '@/analytics/scope';
 import { FACT_COLUMNS, inScope } from '@/analytics/scope-query';
