@@ -1,8 +1,10 @@
 import type { DisplayUnit } from '@/lib/vocabulary';
-import { DIMENSIONS, type Dimension } from './dimensions';
+import { SCOPE_PARTS, type ScopePart } from './dimensions';
 
 /** A scope as it stands in the address, nothing left out: empty lists do not narrow. The browser reads this file too. */
-export type ScopeSelection = Record<Dimension, string[]> & {
+export type ScopeSelection = Record<ScopePart, string[]> & {
+  /** Parts whose values are left out rather than kept. */
+  except: ScopePart[];
   /** First and last month or day, inclusive; null is open. */
   from: string | null;
   to: string | null;
@@ -10,18 +12,51 @@ export type ScopeSelection = Record<Dimension, string[]> & {
   unit: DisplayUnit;
 };
 
+/** What narrows nothing: every record of every time. */
+export const EVERY_RECORD: Omit<ScopeSelection, 'unit'> = {
+  from: null,
+  to: null,
+  refrigerant: [],
+  technician: [],
+  site: [],
+  branch: [],
+  category: [],
+  jobType: [],
+  appliance: [],
+  except: [],
+};
+
+type Narrowing = Pick<ScopeSelection, ScopePart | 'except'>;
+
+/** A scope with one part narrowed to these values, whatever it was narrowed to before. */
+export const onlyOf = <Scope extends Narrowing>(scope: Scope, part: ScopePart, values: readonly string[]): Scope => ({
+  ...scope,
+  [part]: [...values],
+  except: scope.except.filter((other) => other !== part),
+});
+
+/** What a scope holds besides these values of one part; they must not be all that it holds. */
+export const allBut = <Scope extends Narrowing>(scope: Scope, part: ScopePart, values: readonly string[]): Scope => {
+  const kept = scope[part].filter((value) => !values.includes(value));
+  if (scope[part].length && !scope.except.includes(part)) return { ...scope, [part]: kept };
+  const left = [...new Set([...(scope.except.includes(part) ? scope[part] : []), ...values])];
+  return { ...scope, [part]: left, except: [...new Set([...scope.except, part])] };
+};
+
 /** Search parameters of the analytic routes. */
-export type ScopeQuery = Partial<Record<Dimension | 'from' | 'to', string | string[]>>;
+export type ScopeQuery = Partial<Record<ScopePart | 'except' | 'from' | 'to', string | string[]>>;
 
 /** The keys that a scope has in the address. */
-const SCOPE_KEYS = new Set<string>(['from', 'to', 'unit', ...DIMENSIONS]);
+const SCOPE_KEYS = new Set<string>(['from', 'to', 'unit', 'except', ...SCOPE_PARTS]);
 
 /** What an analytic route is asked for this scope. */
 export const scopeQuery = (scope: Omit<ScopeSelection, 'unit'>): ScopeQuery => {
   const query: ScopeQuery = {};
   if (scope.from) query.from = scope.from;
   if (scope.to) query.to = scope.to;
-  for (const dimension of DIMENSIONS) if (scope[dimension].length) query[dimension] = scope[dimension];
+  for (const part of SCOPE_PARTS) if (scope[part].length) query[part] = scope[part];
+  const except = scope.except.filter((part) => scope[part].length);
+  if (except.length) query.except = except;
   return query;
 };
 

@@ -1,8 +1,8 @@
 import { z } from 'zod';
 import { APPLIANCE_CATEGORIES, JOB_TYPES } from '@/lib/vocabulary';
-import { UNSTATED } from './dimensions';
+import { type Dimension, SCOPE_PARTS, UNSTATED } from './dimensions';
 
-export { DIMENSIONS, type Dimension, UNSTATED } from './dimensions';
+export { DIMENSIONS, type Dimension, SCOPE_PARTS, UNSTATED } from './dimensions';
 
 const day = /^(19|20|21)\d{2}-(0[1-9]|1[0-2])-(0[1-9]|[12]\d|3[01])$/;
 const month = /^(19|20|21)\d{2}-(0[1-9]|1[0-2])$/;
@@ -40,6 +40,9 @@ export const scopeShape = {
   site: many(name),
   category: many(z.enum([...APPLIANCE_CATEGORIES, UNSTATED])),
   jobType: many(z.enum([...JOB_TYPES, UNSTATED])),
+  appliance: many(name),
+  /** Parts whose values are left out rather than kept: `site=A&except=site` is every site but A. */
+  except: many(z.enum(SCOPE_PARTS)),
 };
 
 export const scopeSchema = z
@@ -49,6 +52,10 @@ export const scopeSchema = z
     message: 'The end lies before the beginning',
   });
 export type Scope = z.output<typeof scopeSchema>;
+
+/** Whether anything but the period narrows a scope; `besides` one part that may. */
+export const isNarrowed = (scope: Scope, besides?: Dimension): boolean =>
+  Boolean(scope.except?.length) || SCOPE_PARTS.some((part) => part !== besides && scope[part]?.length);
 
 /** First day of an inclusive `from`, `YYYY-MM-DD`. */
 export const firstDay = (from: string): string => (month.test(from) ? `${from}-01` : from);

@@ -1,4 +1,4 @@
-import { DIMENSIONS } from '@/analytics/dimensions';
+import { SCOPE_PARTS, type ScopePart } from '@/analytics/dimensions';
 import { type ScopeQuery, type ScopeSelection, scopeQuery } from '@/analytics/scope-address';
 import { MEASURES, type Measure, type MeasureRecords, RECORDS_OF } from './measures';
 
@@ -33,10 +33,10 @@ const periodParams = ({ from, to }: FigureScope): [string, string][] => {
 export const figureParams = ({ measure, scope }: Figure, page: FigureScope): [key: string, value: string][] => [
   ['open', measure],
   ...periodParams(scope),
-  ...DIMENSIONS.flatMap((dimension): [string, string][] => {
-    const names = scope[dimension];
-    if (sameNames(names, page[dimension])) return [];
-    return (names.length ? names : ['']).map((name) => [`${PREFIX}${dimension}`, name]);
+  ...([...SCOPE_PARTS, 'except'] as const).flatMap((part): [string, string][] => {
+    const names = scope[part];
+    if (sameNames(names, page[part])) return [];
+    return (names.length ? names : ['']).map((name) => [`${PREFIX}${part}`, name]);
   }),
 ];
 
@@ -45,10 +45,11 @@ export const figureOfAddress = (search: URLSearchParams, page: FigureScope): Fig
   const measure = MEASURES.find((one) => one === search.get('open'));
   if (!measure) return null;
   const month = search.get('open.month');
-  const namesOf = (dimension: (typeof DIMENSIONS)[number]): string[] => {
-    const key = `${PREFIX}${dimension}`;
-    return search.has(key) ? search.getAll(key).filter(Boolean) : page[dimension];
+  const namesOf = (part: ScopePart): string[] => {
+    const key = `${PREFIX}${part}`;
+    return search.has(key) ? search.getAll(key).filter(Boolean) : page[part];
   };
+  const except = search.getAll(`${PREFIX}except`);
   return {
     measure,
     scope: {
@@ -60,6 +61,8 @@ export const figureOfAddress = (search: URLSearchParams, page: FigureScope): Fig
       branch: namesOf('branch'),
       category: namesOf('category'),
       jobType: namesOf('jobType'),
+      appliance: namesOf('appliance'),
+      except: search.has(`${PREFIX}except`) ? SCOPE_PARTS.filter((part) => except.includes(part)) : page.except,
     },
   };
 };

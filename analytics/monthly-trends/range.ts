@@ -1,4 +1,4 @@
-import { DIMENSIONS, type Dimension, dayAfter, firstDay, type Scope } from '@/analytics/scope';
+import { type Dimension, dayAfter, firstDay, isNarrowed, type Scope } from '@/analytics/scope';
 import { monthOf as monthOfInstant } from '@/analytics/scope-address';
 import { monthsAfter } from './series';
 
@@ -9,12 +9,10 @@ const wholeMonths = (scope: Scope): boolean =>
   (!scope.from || startsMonth(firstDay(scope.from))) && (!scope.to || startsMonth(dayAfter(scope.to)));
 
 /** Whether views that are summed by month can answer: whole months, narrowed by nothing but the split dimension. */
-export const answeredByMonth = (scope: Scope, by: Dimension): boolean =>
-  wholeMonths(scope) && DIMENSIONS.every((dimension) => dimension === by || !scope[dimension]?.length);
+export const answeredByMonth = (scope: Scope, by: Dimension): boolean => wholeMonths(scope) && !isNarrowed(scope, by);
 
 /** Whether the months over all keys stand ready: whole months, narrowed by nothing. */
-export const summedByMonth = (scope: Scope): boolean =>
-  wholeMonths(scope) && DIMENSIONS.every((dimension) => !scope[dimension]?.length);
+export const summedByMonth = (scope: Scope): boolean => wholeMonths(scope) && !isNarrowed(scope);
 
 /** Months of which the scope's first or last day leaves a part out. */
 export const cutMonths = (scope: Scope): string[] => {

@@ -2,6 +2,7 @@ import 'server-only';
 import { and, eq, gte, ilike, isNotNull, isNull, lt, or, type SQL, sql } from 'drizzle-orm';
 import type { LikeJobsStanding, PlantSize, StatedReading } from '@/analytics/figures/measures';
 import { LARGE_PLANT_KG } from '@/analytics/monthly-pattern/pattern';
+import type { Scope } from '@/analytics/scope';
 import { inScope } from '@/analytics/scope-query';
 import { recoveryFacts as f } from '@/db/views/recovery-facts';
 import { yieldLimits as limits, lowRecoveries as low } from '@/db/views/yield-limits';
@@ -39,10 +40,8 @@ const PLANT: Record<PlantSize, SQL> = {
 };
 
 /** What narrows a list of records besides the page and its order. */
-type RecordFilters = Pick<
-  RecordListQuery,
-  'from' | 'to' | 'branch' | 'refrigerant' | 'technician' | 'site' | 'category' | 'jobType' | 'q' | 'importId'
-> &
+type RecordFilters = Scope &
+  Pick<RecordListQuery, 'q' | 'importId'> &
   Partial<Pick<RecordListQuery, 'exclusion' | 'likeJobs' | 'states' | 'plant'>>;
 
 /** The records that a list query means, whatever page of them. */

@@ -3,7 +3,7 @@ import { and, eq, gte, inArray, isNotNull, isNull, lt, or, type SQL, sql } from 
 import { unionAll } from 'drizzle-orm/pg-core';
 import { toGram } from '@/analytics/fact-figures';
 import { keyOf, MONTHLY_VIEWS } from '@/analytics/monthly-trends/rows';
-import { DIMENSIONS, type Dimension, type Scope } from '@/analytics/scope';
+import { type Dimension, isNarrowed, type Scope } from '@/analytics/scope';
 import { FACT_COLUMNS, inScope } from '@/analytics/scope-query';
 import type { Tx } from '@/db/client';
 import { refrigerants } from '@/db/schema/refrigerants';
@@ -23,8 +23,7 @@ export const onDays = (scope: Scope, spans: readonly Span[]): SQL | undefined =>
 
 /** Whole months are read where they stand ready, as long as nothing narrows the scope. */
 export const sourcesOf = (scope: Scope, side: Side): Sources => {
-  const narrowed = DIMENSIONS.some((dimension) => scope[dimension]?.length);
-  return narrowed
+  return isNarrowed(scope)
     ? { months: [], records: onDays(scope, side.spans) }
     : { months: side.wholeMonths.map((month) => `${month}-01`), records: onDays(scope, side.parts) };
 };

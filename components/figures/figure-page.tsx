@@ -3,6 +3,7 @@
 import { usePathname, useSearchParams } from 'next/navigation';
 import { createContext, type ReactNode, useContext, useMemo, useRef } from 'react';
 import { type Figure, figureOfAddress, figureParams, isFigureKey } from '@/analytics/figures/figure';
+import { EVERY_RECORD } from '@/analytics/scope-address';
 import { useScope } from '@/components/scope/use-scope';
 import { FigurePanel } from './figure-panel';
 
@@ -12,11 +13,9 @@ type FigurePageState = {
   open: (figure: Figure) => void;
 };
 
-const NO_NAMES = { refrigerant: [], technician: [], site: [], branch: [], category: [], jobType: [] };
-
 /** Outside of a screen with a scope a figure's address stands by itself. */
 const ALONE: FigurePageState = {
-  hrefOf: (figure) => `?${new URLSearchParams(figureParams(figure, { ...figure.scope, ...NO_NAMES }))}`,
+  hrefOf: (figure) => `?${new URLSearchParams(figureParams(figure, EVERY_RECORD))}`,
   open: () => undefined,
 };
 

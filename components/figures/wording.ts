@@ -1,7 +1,7 @@
-import { DIMENSIONS } from '@/analytics/dimensions';
+import { SCOPE_PARTS } from '@/analytics/dimensions';
 import type { FigureScope } from '@/analytics/figures/figure';
 import type { Measure } from '@/analytics/figures/measures';
-import { choicePhrase, periodPhrase } from '@/components/scope/wording';
+import { partPhrase, periodPhrase } from '@/components/scope/wording';
 import { formatCount, formatMassWithUnit, formatNumber, formatPercent } from '@/lib/format';
 import type { DisplayUnit } from '@/lib/vocabulary';
 
@@ -50,7 +50,6 @@ export const formatMeasure = (measure: Measure, value: number | null, unit: Disp
 
 /** The scope of a figure in words, parts that narrow nothing left out: `November 2026, R‑22, East`. */
 export const figureScopePhrase = (scope: FigureScope): string =>
-  [
-    periodPhrase(scope),
-    ...DIMENSIONS.flatMap((dimension) => (scope[dimension].length ? [choicePhrase(dimension, scope[dimension])] : [])),
-  ].join(', ');
+  [periodPhrase(scope), ...SCOPE_PARTS.flatMap((part) => (scope[part].length ? [partPhrase(scope, part)] : []))].join(
+    ', ',
+  );

@@ -1,6 +1,7 @@
 import Link from 'next/link';
 import type { FigureScope } from '@/analytics/figures/figure';
 import type { LowRecovery } from '@/analytics/low-recoveries/contract';
+import { EVERY_RECORD } from '@/analytics/scope-address';
 import { FigureLink } from '@/components/figures/figure-link';
 import { choiceName } from '@/components/scope/wording';
 import { formatCount, formatDay, formatDesignation, formatMass, formatMassWithUnit, formatPercent } from '@/lib/format';
@@ -9,14 +10,9 @@ import { YieldStrip } from './yield-strip';
 
 /** Like jobs are those of the company's whole record, whatever the scope. */
 const likeJobsOf = ({ refrigerant, category }: LowRecovery): FigureScope => ({
-  from: null,
-  to: null,
+  ...EVERY_RECORD,
   refrigerant: [refrigerant],
   category: [category],
-  technician: [],
-  site: [],
-  branch: [],
-  jobType: [],
 });
 
 const LowItem = ({ item, unit }: { item: LowRecovery; unit: DisplayUnit }) => (

@@ -2,8 +2,7 @@
 
 import { Command } from 'cmdk';
 import { useId, useState } from 'react';
-import type { Dimension } from '@/analytics/dimensions';
-import type { ScopeChoice } from '@/analytics/scope-options/contract';
+import type { ScopePart } from '@/analytics/dimensions';
 import { Button } from '@/components/ui/button';
 import { formatCount } from '@/lib/format';
 import { ChoiceItem } from './choice-item';
@@ -15,8 +14,9 @@ const MOST_SHOWN = 120;
 const LEAST_SEARCHED = 8;
 
 type ChoiceEditorProps = {
-  dimension: Dimension;
-  choices: readonly ScopeChoice[];
+  dimension: ScopePart;
+  /** `recoveries` is null where they were not counted. */
+  choices: readonly { value: string; recoveries: number | null }[];
   selected: readonly string[];
   onApply: (values: string[]) => void;
   close: () => void;
@@ -40,6 +40,10 @@ export const ChoiceEditor = ({ dimension, choices, selected, onApply, close }: C
   );
   const shown = found.slice(0, MOST_SHOWN);
 
+  const noteOf = ({ value, recoveries }: (typeof choices)[number]) => {
+    if (!known.has(value)) return 'not known here';
+    return recoveries === null ? '' : formatCount(recoveries);
+  };
   const toggle = (value: string) =>
     setDraft((before) => (before.includes(value) ? before.filter((one) => one !== value) : [...before, value]));
   const apply = (values: readonly string[]) => {
@@ -70,7 +74,7 @@ export const ChoiceEditor = ({ dimension, choices, selected, onApply, close }: C
               key={choice.value}
               value={choice.value}
               name={choiceName(dimension, choice.value)}
-              recoveries={known.has(choice.value) ? choice.recoveries : null}
+              small={noteOf(choice)}
               checked={draft.includes(choice.value)}
               onToggle={() => toggle(choice.value)}
             />

@@ -1,19 +1,18 @@
 'use client';
 
 import { Command } from 'cmdk';
-import { formatCount } from '@/lib/format';
 
 type ChoiceItemProps = {
   value: string;
   name: string;
-  /** Null when no record has this value. */
-  recoveries: number | null;
+  /** How many records have this value, or that none is known to. */
+  small: string;
   checked: boolean;
   onToggle: () => void;
 };
 
 /** One value to tick. Arrow keys move over the list, Enter or a touch ticks. */
-export const ChoiceItem = ({ value, name, recoveries, checked, onToggle }: ChoiceItemProps) => (
+export const ChoiceItem = ({ value, name, small, checked, onToggle }: ChoiceItemProps) => (
   <Command.Item
     value={value}
     onSelect={onToggle}
@@ -32,8 +31,6 @@ export const ChoiceItem = ({ value, name, recoveries, checked, onToggle }: Choic
       ) : null}
     </span>
     <span className="min-w-0 flex-1 break-words">{name}</span>
-    <span className="shrink-0 font-mono text-sm text-ink-2">
-      {recoveries === null ? 'not known here' : formatCount(recoveries)}
-    </span>
+    <span className="shrink-0 font-mono text-sm text-ink-2">{small}</span>
   </Command.Item>
 );

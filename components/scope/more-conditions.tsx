@@ -1,7 +1,7 @@
 'use client';
 
 import { type ReactNode, useState } from 'react';
-import type { Dimension } from '@/analytics/dimensions';
+import type { ScopePart } from '@/analytics/dimensions';
 import { TextButton } from '@/components/ui/button';
 import { Dialog } from '@/components/ui/dialog';
 import { Popover } from '@/components/ui/popover';
@@ -10,14 +10,14 @@ import { DIMENSION_WORDS } from './wording';
 
 type MoreConditionsProps = {
   /** Dimensions that the sentence does not speak of yet. */
-  dimensions: readonly Dimension[];
-  editorOf: (dimension: Dimension) => (close: () => void) => ReactNode;
+  dimensions: readonly ScopePart[];
+  editorOf: (dimension: ScopePart) => (close: () => void) => ReactNode;
 };
 
 /** Brings a further dimension into the sentence: first which one, then which values. */
 export const MoreConditions = ({ dimensions, editorOf }: MoreConditionsProps) => {
   const [open, setOpen] = useState(false);
-  const [chosen, setChosen] = useState<Dimension | null>(null);
+  const [chosen, setChosen] = useState<ScopePart | null>(null);
   const narrow = useNarrow();
   if (!dimensions.length) return null;
   const show = (next: boolean) => {

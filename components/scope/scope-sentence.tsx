@@ -1,7 +1,7 @@
 'use client';
 
 import type { ReactNode } from 'react';
-import type { Dimension } from '@/analytics/dimensions';
+import type { ScopePart as Part } from '@/analytics/dimensions';
 import { useScopeOptions } from '@/analytics/scope-options/hook';
 import { TextButton } from '@/components/ui/button';
 import { Failed, Loading } from '@/components/ui/states';
@@ -14,18 +14,19 @@ import { PeriodEditor } from './period-editor';
 import { ScopePart } from './scope-part';
 import { UnitEditor } from './unit-editor';
 import { useScope } from './use-scope';
-import { choicePhrase, DIMENSION_WORDS, isPeriodPart, periodPhrase } from './wording';
+import { DIMENSION_WORDS, isPeriodPart, partPhrase, periodPhrase } from './wording';
 
 /** Words before and after the value of a dimension, where it has a fixed place in the sentence. */
-const PLACES: Record<Dimension, { before: string; after?: string; always: boolean }> = {
+const PLACES: Record<Part, { before: string; after?: string; always: boolean }> = {
   branch: { before: 'from', always: true },
   refrigerant: { before: 'of', always: true },
   technician: { before: 'by', always: true },
   site: { before: 'at', always: false },
   category: { before: 'on', always: false },
+  appliance: { before: 'out of', always: false },
   jobType: { before: 'for', always: false },
 };
-const ORDER: readonly Dimension[] = ['branch', 'refrigerant', 'technician', 'site', 'category', 'jobType'];
+const ORDER: readonly Part[] = ['branch', 'refrigerant', 'technician', 'site', 'appliance', 'category', 'jobType'];
 
 type ScopeSentenceProps = {
   /** What the sentence speaks of. */
@@ -41,24 +42,30 @@ export const ScopeSentence = ({ subject = 'Recoveries', actions }: ScopeSentence
   const options = useScopeOptions();
 
   // A technician has one branch and one technician: himself.
-  const offered = ORDER.filter((dimension) => role !== 'technician' || !['branch', 'technician'].includes(dimension));
-  const spoken = offered.filter((dimension) => PLACES[dimension].always || scope[dimension].length);
-  const editorOf = (dimension: Dimension) => (close: () => void) => {
+  const offered = ORDER.filter((part) => role !== 'technician' || !['branch', 'technician'].includes(part));
+  const spoken = offered.filter((part) => PLACES[part].always || scope[part].length);
+  /** A company may have thousands of appliances: those of the address can be taken out, others come from their screen. */
+  const choicesOf = (part: Part) =>
+    part === 'appliance' ? scope.appliance.map((value) => ({ value, recoveries: null })) : options.data?.[part];
+  const editorOf = (part: Part) => (close: () => void) => {
     if (options.error) return <Failed error={options.error} onRetry={() => options.refetch()} />;
-    if (!options.data) return <Loading />;
+    const choices = choicesOf(part);
+    if (!choices) return <Loading />;
     return (
       <ChoiceEditor
-        dimension={dimension}
-        choices={options.data[dimension]}
-        selected={scope[dimension]}
-        onApply={(values) => setScope({ [dimension]: values.length ? values : null })}
+        dimension={part}
+        choices={choices}
+        selected={scope.except.includes(part) ? [] : scope[part]}
+        onApply={(values) =>
+          setScope({ [part]: values.length ? values : null, except: scope.except.filter((other) => other !== part) })
+        }
         close={close}
       />
     );
   };
-  const isUnknown = (dimension: Dimension) => {
-    const known = options.data?.[dimension];
-    return Boolean(known) && scope[dimension].some((value) => !known?.some((choice) => choice.value === value));
+  const isUnknown = (part: Part) => {
+    const known = choicesOf(part);
+    return Boolean(known) && scope[part].some((value) => !known?.some((choice) => choice.value === value));
   };
   const doubtfulPeriod = [scope.from, scope.to].some((part) => part !== null && !isPeriodPart(part));
 
@@ -66,16 +73,11 @@ export const ScopeSentence = ({ subject = 'Recoveries', actions }: ScopeSentence
     <div className="mb-5 flex flex-wrap items-baseline justify-between gap-x-8 gap-y-1">
       <p className="max-w-[62em] text-base text-ink-2 sm:text-lg">
         {role === 'technician' ? `Your ${subject.toLowerCase()}` : subject}{' '}
-        {spoken.map((dimension) => (
-          <span key={dimension}>
-            {PLACES[dimension].before}{' '}
-            <ScopePart
-              label={DIMENSION_WORDS[dimension].many}
-              editor={editorOf(dimension)}
-              stop=","
-              doubtful={isUnknown(dimension)}
-            >
-              {choicePhrase(dimension, scope[dimension])}
+        {spoken.map((part) => (
+          <span key={part}>
+            {PLACES[part].before}{' '}
+            <ScopePart label={DIMENSION_WORDS[part].many} editor={editorOf(part)} stop="," doubtful={isUnknown(part)}>
+              {partPhrase(scope, part)}
             </ScopePart>{' '}
           </span>
         ))}
@@ -105,7 +107,10 @@ export const ScopeSentence = ({ subject = 'Recoveries', actions }: ScopeSentence
         </ScopePart>
       </p>
       <div className="flex flex-wrap items-baseline gap-x-5 text-sm print:hidden">
-        <MoreConditions dimensions={offered.filter((dimension) => !spoken.includes(dimension))} editorOf={editorOf} />
+        <MoreConditions
+          dimensions={offered.filter((part) => part !== 'appliance' && !spoken.includes(part))}
+          editorOf={editorOf}
+        />
         {narrowed ? <TextButton onClick={clear}>Clear</TextButton> : null}
         <CopyLink />
         <TextButton onClick={() => window.print()}>Print</TextButton>

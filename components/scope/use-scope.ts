@@ -2,7 +2,7 @@
 
 import { parseAsNativeArrayOf, parseAsString, parseAsStringLiteral, useQueryStates } from 'nuqs';
 import { useMemo } from 'react';
-import { DIMENSIONS } from '@/analytics/dimensions';
+import { SCOPE_PARTS } from '@/analytics/dimensions';
 import { defaultFrom, monthOf, type ScopeSelection, scopeSearch } from '@/analytics/scope-address';
 import { useViewer } from '@/components/viewer-context';
 import { DISPLAY_UNITS } from '@/lib/vocabulary';
@@ -18,6 +18,8 @@ const PARSERS = {
   site: names,
   category: names,
   jobType: names,
+  appliance: names,
+  except: parseAsNativeArrayOf(parseAsStringLiteral(SCOPE_PARTS)),
   unit: parseAsStringLiteral(DISPLAY_UNITS),
 };
 
@@ -30,6 +32,8 @@ const NOTHING_NARROWED = {
   site: null,
   category: null,
   jobType: null,
+  appliance: null,
+  except: null,
 };
 
 /** Parts of the scope to set; a part set to null goes back to its default. */
@@ -59,6 +63,6 @@ export const useScope = () => {
     /** Back to the default period and to everything in it; the unit stays. */
     clear: () => setAddress(NOTHING_NARROWED),
     /** Whether the address says anything that Clear would take back. */
-    narrowed: DIMENSIONS.some((dimension) => scope[dimension].length > 0) || Boolean(address.from || address.to),
+    narrowed: SCOPE_PARTS.some((part) => scope[part].length > 0) || Boolean(address.from || address.to),
   };
 };

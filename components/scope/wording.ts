@@ -1,10 +1,10 @@
-import { type Dimension, UNSTATED } from '@/analytics/dimensions';
+import { type ScopePart, UNSTATED } from '@/analytics/dimensions';
 import type { ScopeSelection } from '@/analytics/scope-address';
 import { formatDay, formatDesignation, formatList, formatMonth } from '@/lib/format';
 import { CATEGORY_NAMES, JOB_TYPE_NAMES } from '@/lib/wording';
 
 /** How one dimension is spoken of: what all of it is called, what a record without it is called. */
-export const DIMENSION_WORDS: Record<Dimension, { one: string; many: string; all: string; unstated: string }> = {
+export const DIMENSION_WORDS: Record<ScopePart, { one: string; many: string; all: string; unstated: string }> = {
   branch: { one: 'branch', many: 'Branches', all: 'all branches', unstated: 'no branch stated' },
   refrigerant: { one: 'refrigerant', many: 'Refrigerants', all: 'all refrigerants', unstated: 'no refrigerant stated' },
   technician: { one: 'technician', many: 'Technicians', all: 'all technicians', unstated: 'no technician stated' },
@@ -16,23 +16,30 @@ export const DIMENSION_WORDS: Record<Dimension, { one: string; many: string; all
     unstated: 'no category stated',
   },
   jobType: { one: 'job type', many: 'Job types', all: 'all job types', unstated: 'no job type stated' },
+  appliance: { one: 'appliance', many: 'Appliances', all: 'all appliances', unstated: 'no appliance stated' },
 };
 
-const CLOSED_LISTS: Partial<Record<Dimension, Record<string, string>>> = {
+const CLOSED_LISTS: Partial<Record<ScopePart, Record<string, string>>> = {
   category: CATEGORY_NAMES,
   jobType: JOB_TYPE_NAMES,
 };
 
 /** One value of a dimension as it is read. */
-export const choiceName = (dimension: Dimension, value: string): string => {
+export const choiceName = (dimension: ScopePart, value: string): string => {
   if (value === UNSTATED) return DIMENSION_WORDS[dimension].unstated;
-  if (dimension === 'refrigerant') return formatDesignation(value);
+  if (dimension === 'refrigerant' || dimension === 'appliance') return formatDesignation(value);
   return CLOSED_LISTS[dimension]?.[value] ?? value;
 };
 
 /** A dimension's part of the sentence: `all branches`, `R‑22 and R‑410A`. */
-export const choicePhrase = (dimension: Dimension, values: readonly string[]): string =>
+export const choicePhrase = (dimension: ScopePart, values: readonly string[]): string =>
   values.length ? formatList(values.map((value) => choiceName(dimension, value))) : DIMENSION_WORDS[dimension].all;
+
+/** The same of a scope, which may leave the values out: `all sites but Pier 5`. */
+export const partPhrase = (scope: Pick<ScopeSelection, ScopePart | 'except'>, part: ScopePart): string =>
+  scope.except.includes(part) && scope[part].length
+    ? `${DIMENSION_WORDS[part].all} but ${choicePhrase(part, scope[part])}`
+    : choicePhrase(part, scope[part]);
 
 const PERIOD_PART = /^\d{4}-(0[1-9]|1[0-2])(-(0[1-9]|[12]\d|3[01]))?$/;
 

@@ -4,7 +4,7 @@ import dynamic from 'next/dynamic';
 import { useMemo } from 'react';
 import { useMonthlyTrends } from '@/analytics/monthly-trends/hook';
 import { lastWholeMonth, type StackedMonth, type StackLayer, toStacks } from '@/analytics/monthly-trends/series';
-import type { ScopeQuery, ScopeSelection } from '@/analytics/scope-address';
+import { onlyOf, type ScopeQuery, type ScopeSelection } from '@/analytics/scope-address';
 import { useSeen } from '@/components/charts/use-seen';
 import { useWidth } from '@/components/charts/use-width';
 import { FigureLink } from '@/components/figures/figure-link';
@@ -34,7 +34,7 @@ const Panel = ({ layer, months, highest, scope }: PanelProps) => {
       <figcaption className="mb-1">
         <span className="block truncate font-semibold">{name}</span>
         <span className="block text-sm text-ink-2">
-          <FigureLink measure="recoveredMass" scope={{ ...scope, branch: layer.members }}>
+          <FigureLink measure="recoveredMass" scope={onlyOf(scope, 'branch', layer.members)}>
             {formatMassWithUnit(total, scope.unit, 0)}
           </FigureLink>
           {inLatest}

@@ -2,7 +2,7 @@ import type { Dimension } from '@/analytics/dimensions';
 import { type Figure, monthInScope } from '@/analytics/figures/figure';
 import type { Measure } from '@/analytics/figures/measures';
 import type { StackedMonth, Stacks } from '@/analytics/monthly-trends/series';
-import type { ScopeSelection } from '@/analytics/scope-address';
+import { onlyOf, type ScopeSelection } from '@/analytics/scope-address';
 import type { ChartColumn, ChartModel } from '@/components/charts/model';
 import { figureScopePhrase } from '@/components/figures/wording';
 import { chartNotes, type NumberedNote, notesOfMonth } from '@/components/notes/numbered';
@@ -76,7 +76,7 @@ export const monthsModel = (
       if (layer)
         return layer.members.length > MOST_NAMES
           ? null
-          : { measure: 'recoveredMass', scope: { ...own, [by]: layer.members } };
+          : { measure: 'recoveredMass', scope: onlyOf(own, by, layer.members) };
       const measure = MEASURE_OF[key];
       return measure ? { measure, scope: own } : null;
     },

@@ -1,5 +1,5 @@
 import type { Dimension } from '@/analytics/dimensions';
-import type { ScopeSelection } from '@/analytics/scope-address';
+import { onlyOf, type ScopeSelection } from '@/analytics/scope-address';
 import type { Comparison } from '@/analytics/trends-comparison/contract';
 import { FigureLink } from '@/components/figures/figure-link';
 import { choiceName } from '@/components/scope/wording';
@@ -36,7 +36,7 @@ export const MoversList = ({ comparison: { movers, otherKeys, now }, by, scope }
               </span>
               <FigureLink
                 measure="recoveredMass"
-                scope={{ ...scope, from: now.from, to: now.to, [by]: [key] }}
+                scope={onlyOf({ ...scope, from: now.from, to: now.to }, by, [key])}
                 className="figure-link text-right decoration-transparent hover:decoration-current"
               >
                 {signed(difference, scope.unit)}

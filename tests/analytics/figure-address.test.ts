@@ -1,6 +1,6 @@
 import fc from 'fast-check';
 import { expect, test } from 'vitest';
-import { DIMENSIONS } from '@/analytics/dimensions';
+import { SCOPE_PARTS } from '@/analytics/dimensions';
 import {
   type FigureScope,
   figureOfAddress,
@@ -9,6 +9,7 @@ import {
   isFigureKey,
 } from '@/analytics/figures/figure';
 import { MEASURES } from '@/analytics/figures/measures';
+import { EVERY_RECORD } from '@/analytics/scope-address';
 
 const month = fc.constantFrom('2024-12', '2026-01', '2026-11');
 const moment = fc.option(fc.oneof(month, fc.constantFrom('2025-03-15', '2026-11-30')));
@@ -27,18 +28,9 @@ const scopes: fc.Arbitrary<FigureScope> = fc.record({
   branch: names,
   category: names,
   jobType: names,
+  appliance: names,
+  except: fc.subarray([...SCOPE_PARTS]),
 });
-
-const NOTHING: FigureScope = {
-  from: null,
-  to: null,
-  refrigerant: [],
-  technician: [],
-  site: [],
-  branch: [],
-  category: [],
-  jobType: [],
-};
 
 test('any figure comes back out of the address of any screen as it went in', () => {
   fc.assert(
@@ -46,10 +38,10 @@ test('any figure comes back out of the address of any screen as it went in', () 
       fc.constantFrom(...MEASURES),
       scopes,
       scopes,
-      fc.array(fc.constantFrom(...DIMENSIONS)),
+      fc.array(fc.constantFrom(...SCOPE_PARTS, 'except' as const)),
       (measure, page, own, narrowed) => {
         const scope = { ...page, from: own.from, to: own.to };
-        for (const dimension of narrowed) scope[dimension] = own[dimension];
+        for (const part of narrowed) Object.assign(scope, { [part]: own[part] });
         const params = figureParams({ measure, scope }, page);
         const address = new URLSearchParams([['from', 'x'], ['by', 'site'], ...params]);
         expect(figureOfAddress(new URLSearchParams(address.toString()), page)).toEqual({ measure, scope });
@@ -61,7 +53,7 @@ test('any figure comes back out of the address of any screen as it went in', () 
 });
 
 test('it reads as what it is', () => {
-  const page = { ...NOTHING, from: '2024-12', branch: ['East'] };
+  const page = { ...EVERY_RECORD, from: '2024-12', branch: ['East'] };
   const scope = { ...page, from: '2026-11', to: '2026-11', refrigerant: ['R-22'] };
   const search = new URLSearchParams(figureParams({ measure: 'recoveredMass', scope }, page)).toString();
   expect(search).toBe('open=recoveredMass&open.month=2026-11&open.refrigerant=R-22');
@@ -69,11 +61,11 @@ test('it reads as what it is', () => {
 
 test('an address that names no known measure opens nothing', () => {
   for (const search of ['', 'open=', 'open=__proto__', 'open=mass', 'open.month=2026-11'])
-    expect(figureOfAddress(new URLSearchParams(search), NOTHING)).toBeNull();
+    expect(figureOfAddress(new URLSearchParams(search), EVERY_RECORD)).toBeNull();
 });
 
 test('the records of a figure are those that count, and stand as its measure says', () => {
-  const scope = { ...NOTHING, from: '2026-11', to: '2026-11', site: ['North Yard'] };
+  const scope = { ...EVERY_RECORD, from: '2026-11', to: '2026-11', site: ['North Yard'] };
   const asked = { from: '2026-11', to: '2026-11', site: ['North Yard'], exclusion: 'none' };
   expect(figureRecords({ measure: 'recoveries', scope })).toEqual(asked);
   expect(figureRecords({ measure: 'flagged', scope })).toEqual({ ...asked, likeJobs: 'below' });

@@ -1,25 +1,18 @@
 import { expect, test } from 'vitest';
 import {
+  allBut,
   defaultFrom,
+  EVERY_RECORD,
   keptScope,
   monthOf,
   monthsBefore,
+  onlyOf,
   type ScopeSelection,
   scopeQuery,
   scopeSearch,
 } from '@/analytics/scope-address';
 
-const everything: ScopeSelection = {
-  from: null,
-  to: null,
-  unit: 'lb',
-  branch: [],
-  refrigerant: [],
-  technician: [],
-  site: [],
-  category: [],
-  jobType: [],
-};
+const everything: ScopeSelection = { ...EVERY_RECORD, unit: 'lb' };
 
 test('a scope asks the routes for what narrows it, and for nothing else', () => {
   expect(scopeQuery(everything)).toEqual({});
@@ -55,4 +48,14 @@ test('the running month is the one of the company', () => {
   const instant = new Date('2026-12-01T03:30:00Z');
   expect(monthOf(instant, 'America/New_York')).toBe('2026-11');
   expect(monthOf(instant, 'Europe/Berlin')).toBe('2026-12');
+});
+
+test('a part is narrowed to names, or to all others', () => {
+  const page = { ...everything, site: ['A'], except: ['site' as const] };
+  expect(onlyOf(page, 'site', ['B'])).toEqual({ ...everything, site: ['B'] });
+  expect(allBut(everything, 'site', ['B', 'C'])).toEqual({ ...everything, site: ['B', 'C'], except: ['site'] });
+  // What the scope leaves out already stays out; what it names already is named less.
+  expect(allBut(page, 'site', ['B'])).toEqual({ ...everything, site: ['A', 'B'], except: ['site'] });
+  expect(allBut({ ...everything, site: ['A', 'B', 'C'] }, 'site', ['B'])).toEqual({ ...everything, site: ['A', 'C'] });
+  expect(scopeQuery(allBut(everything, 'site', ['B']))).toEqual({ site: ['B'], except: ['site'] });
 });

@@ -9,7 +9,7 @@ import { DIMENSIONS, type Dimension } from '@/analytics/dimensions';
 import type { FigureScope } from '@/analytics/figures/figure';
 import type { MonthlyTrends } from '@/analytics/monthly-trends/contract';
 import { toStacks } from '@/analytics/monthly-trends/series';
-import { scopeQuery } from '@/analytics/scope-address';
+import { EVERY_RECORD, scopeQuery } from '@/analytics/scope-address';
 import { GET } from '@/app/api/trends/monthly/route';
 import { fileColumns, tableColumns } from '@/components/charts/model';
 import { modelFile } from '@/components/charts/model-file';
@@ -140,24 +140,13 @@ test('table, CSV and Excel say the same, and what the API says', { timeout: 300_
   expect(cells).toBeGreaterThan(1000);
 });
 
-const EVERYTHING: FigureScope = {
-  from: null,
-  to: null,
-  refrigerant: [],
-  technician: [],
-  site: [],
-  branch: [],
-  category: [],
-  jobType: [],
-};
-
 test('the workbook has typed cells and says what it holds', async () => {
   const trends = await answerOf(
-    { ...EVERYTHING, from: '2026-05', to: '2026-06', refrigerant: ['R-22', 'R-410A'] },
+    { ...EVERY_RECORD, from: '2026-05', to: '2026-06', refrigerant: ['R-22', 'R-410A'] },
     'refrigerant',
   );
   const table = modelFile(
-    modelOf(trends, { ...EVERYTHING, from: '2026-05', to: '2026-06', refrigerant: ['R-22', 'R-410A'] }, 'lb'),
+    modelOf(trends, { ...EVERY_RECORD, from: '2026-05', to: '2026-06', refrigerant: ['R-22', 'R-410A'] }, 'lb'),
   );
   const [figures, about] = await readXlsxFile(await writeXlsxFile(toWorkbook(table, origin)).toBuffer());
   expect(figures?.sheet).toBe('Figures');
@@ -178,7 +167,7 @@ test('the workbook has typed cells and says what it holds', async () => {
 });
 
 test('a name that a spreadsheet would run stays a name', async () => {
-  const scope = { ...EVERYTHING, from: '2026-05', to: '2026-05' };
+  const scope = { ...EVERY_RECORD, from: '2026-05', to: '2026-05' };
   const table = modelFile(modelOf(await answerOf({ ...scope, site: ["=HYPERLINK('x')"] }, 'site'), scope, 'kg'));
   const [heads] = csvRows(toCsv(table));
   expect(heads).toContain("'=HYPERLINK('x'), kg");

@@ -2,23 +2,14 @@
 import { cleanup, render, screen, within } from '@testing-library/react';
 import { afterEach, expect, test } from 'vitest';
 import { toStacks } from '@/analytics/monthly-trends/series';
+import { EVERY_RECORD } from '@/analytics/scope-address';
 import { ModelTable } from '@/components/charts/model-table';
 import { monthsModel } from '@/components/trends/months-model';
 import { trendsOf } from '../support/trends';
 
 afterEach(cleanup);
 
-const scope = {
-  from: '2025-11',
-  to: null,
-  branch: ['East'],
-  refrigerant: [],
-  technician: [],
-  site: [],
-  category: [],
-  jobType: [],
-  unit: 'lb' as const,
-};
+const scope = { ...EVERY_RECORD, from: '2025-11', branch: ['East'], unit: 'lb' as const };
 const stacks = toStacks(
   trendsOf(
     [

@@ -3,6 +3,7 @@ import { cleanup, fireEvent, render, screen } from '@testing-library/react';
 import { afterEach, beforeAll, beforeEach, expect, test, vi } from 'vitest';
 import type { Figure } from '@/analytics/figures/figure';
 import { toStacks } from '@/analytics/monthly-trends/series';
+import { EVERY_RECORD } from '@/analytics/scope-address';
 import { StackedMonthsFigure } from '@/components/charts/stacked-months-figure';
 import { monthsModel } from '@/components/trends/months-model';
 import { trendsOf } from '../support/trends';
@@ -12,17 +13,7 @@ vi.mock('@/components/figures/figure-page', () => ({
   useFigurePage: () => ({ hrefOf: ({ scope }: Figure) => `?open.month=${scope.from}`, open: opened }),
 }));
 
-const scope = {
-  from: '2026-09',
-  to: null,
-  branch: [],
-  refrigerant: [],
-  technician: [],
-  site: [],
-  category: [],
-  jobType: [],
-  unit: 'kg' as const,
-};
+const scope = { ...EVERY_RECORD, from: '2026-09', unit: 'kg' as const };
 const model = monthsModel(
   toStacks(
     trendsOf([

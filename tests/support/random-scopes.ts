@@ -1,4 +1,5 @@
 import fc from 'fast-check';
+import { SCOPE_PARTS, type ScopePart } from '@/analytics/dimensions';
 import type { FigureScope } from '@/analytics/figures/figure';
 import { RANDOM_NAMES } from './random-records';
 
@@ -33,5 +34,10 @@ export const randomScopes: fc.Arbitrary<FigureScope> = fc
     branch: some(RANDOM_NAMES.branch, ['Nowhere']),
     category: some(RANDOM_NAMES.category, ['other']),
     jobType: some(RANDOM_NAMES.jobType, []),
+    appliance: some(['RTU-1', 'RTU-2'], ['RTU-9']),
+    except: fc.oneof(
+      { weight: 3, arbitrary: fc.constant<ScopePart[]>([]) },
+      { weight: 1, arbitrary: fc.subarray([...SCOPE_PARTS]) },
+    ),
   })
   .filter(({ from, to }) => from === null || to === null || startOf(from) <= endOf(to));
