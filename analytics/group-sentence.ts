@@ -2,6 +2,9 @@ import type { Piece } from '@/analytics/figures/pieces';
 import { formatCount, formatMassWithUnit, plural } from '@/lib/format';
 import type { DisplayUnit } from '@/lib/vocabulary';
 
+/** How groups are spoken of: `14 technicians brought in …`. */
+export type GroupWords = { one: string; many: string; verb: string };
+
 type Group = { recoveries: number; recoveredMass: number };
 
 /** How few of the groups, taken from the largest down, hold half of the mass. */
@@ -17,11 +20,7 @@ export const groupsOfHalf = (groups: readonly Group[]): number => {
 };
 
 /** What groups of recoveries come to together: `14 technicians brought in 1,214 lb in 187 recoveries.` */
-export const groupAnswer = (
-  groups: readonly Group[],
-  { one, many, verb }: { one: string; many: string; verb: string },
-  unit: DisplayUnit,
-): Piece[] => {
+export const groupAnswer = (groups: readonly Group[], { one, many, verb }: GroupWords, unit: DisplayUnit): Piece[] => {
   const mass = groups.reduce((sum, group) => sum + group.recoveredMass, 0);
   const recoveries = groups.reduce((sum, group) => sum + group.recoveries, 0);
   return [

@@ -2,6 +2,7 @@ import { z } from 'zod';
 import type { Contract } from '@/lib/api/contract';
 import type { PublishedRoute } from '@/lib/api/openapi';
 import { importListSchema, importSchema } from '@/lib/imports/contract';
+import { applianceRecoveries } from './appliances/contract';
 import { explain } from './explain/contract';
 import { lowRecoveriesList } from './low-recoveries/contract';
 import { monthlyPattern } from './monthly-pattern/contract';
@@ -29,6 +30,7 @@ export const PUBLISHED_ROUTES: readonly PublishedRoute[] = [
   published(monthlyPattern, 'Season, trend and unusual months'),
   published(technicianRecoveries, 'What each technician recovered'),
   published(siteRecoveries, 'What was recovered at each site'),
+  published(applianceRecoveries, 'What was recovered from each appliance'),
   published(lowRecoveriesList, 'Recoveries far below like jobs'),
   published(recordListContract, 'Records, page by page; with format=csv all of them as a recovery file'),
   published(knownNamesContract, 'Names that a new record can use'),

@@ -31,7 +31,7 @@ export const ROLE_PURPOSES: Record<Role, string> = {
   operations: 'All figures, records and imports',
   trainer: 'Technicians, low recoveries and trends; reads records',
   technician: 'Own records only, to read and to write',
-  office: 'Records, sites, trends and imports',
+  office: 'Records, sites, appliances, trends and imports',
   auditor: 'Reads and exports records; changes nothing',
 };
 

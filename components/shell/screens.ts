@@ -15,6 +15,7 @@ export const SCREENS: readonly Screen[] = [
   { path: '/low-recoveries', name: 'Low recoveries', action: 'flags:read', scoped: true },
   { path: '/technicians', name: 'Technicians', action: 'technicians:read', scoped: true },
   { path: '/sites', name: 'Sites', action: 'sites:read', scoped: true },
+  { path: '/appliances', name: 'Appliances', action: 'appliances:read', scoped: true },
   { path: '/records', name: 'Records', action: 'records:read', scoped: true },
   { path: '/imports', name: 'Imports', action: 'imports:manage', scoped: false },
   { path: '/settings', name: 'Settings', action: 'company:manage', scoped: false },

@@ -1,53 +1,49 @@
 'use client';
 
+import Link from 'next/link';
 import { useMemo } from 'react';
-import { groupAnswer } from '@/analytics/group-sentence';
-import { scopeQuery } from '@/analytics/scope-address';
+import { onlyOf, scopeQuery, scopeSearch } from '@/analytics/scope-address';
+import type { TechnicianRow } from '@/analytics/technicians/contract';
 import { useTechnicianRecoveries } from '@/analytics/technicians/hook';
-import { FigureSentence } from '@/components/figures/figure-sentence';
-import { FileButtons } from '@/components/files/file-buttons';
-import { ScopedReport } from '@/components/scope/scoped-report';
+import { FIRST, LAST, MASS_COLUMNS, RECOVERIES } from '@/components/grouped-figures/column';
+import { type GroupedKind, GroupedScreen } from '@/components/grouped-figures/grouped-screen';
 import { useScope } from '@/components/scope/use-scope';
-import { PageHead } from '@/components/ui/page-head';
-import { Sheet } from '@/components/ui/sheet';
-import { techniciansFile } from './technicians-file';
-import { TechniciansTable } from './technicians-table';
 
-const WORDS = { one: 'technician', many: 'technicians', verb: 'brought in' };
+/** The crew by name; its reader may sort it, nobody is ranked. */
+const TECHNICIANS: GroupedKind<TechnicianRow> = {
+  screen: 'Technicians',
+  words: { one: 'technician', many: 'technicians', verb: 'brought in' },
+  label: 'Recoveries by technician',
+  title: 'The crew',
+  order: 'by name',
+  columns: [
+    {
+      id: 'technician',
+      label: 'Technician',
+      kind: 'text',
+      heads: true,
+      value: ({ technician }) => technician,
+      draw: ({ technician }, own) => (
+        <Link href={`/records${scopeSearch(own)}`} className="link">
+          {technician}
+        </Link>
+      ),
+    },
+    RECOVERIES,
+    ...MASS_COLUMNS,
+    FIRST,
+    LAST,
+  ],
+  rowId: ({ technicianId }) => technicianId,
+  ownScope: (scope, { technician }) => onlyOf(scope, 'technician', [technician]),
+  sub: () =>
+    'A yield alone does not judge a person. A system that had leaked before anyone came gives little to the best technician, and large chillers give more than window units to anyone. Read the records before you speak to somebody.',
+  note: 'Total yield is all recovered mass over all full charges; median yield is the middle one of the recoveries. Full charge is the nameplate charge plus what was added for long lines. Entry errors are left out.',
+};
 
 /** Who recovered how much, with what yields do and do not say. */
 export const TechniciansScreen = () => {
   const { scope } = useScope();
   const query = useMemo(() => scopeQuery(scope), [scope]);
-  const { data, error, isPlaceholderData, refetch } = useTechnicianRecoveries(query);
-  return (
-    <ScopedReport
-      screen="Technicians"
-      data={data}
-      error={error}
-      stale={isPlaceholderData}
-      retry={() => refetch()}
-      isEmpty={({ items }) => items.length === 0}
-    >
-      {({ items }) => (
-        <>
-          <PageHead
-            title={<FigureSentence pieces={groupAnswer(items, WORDS, scope.unit)} scope={scope} />}
-            sub="A yield alone does not judge a person. A system that had leaked before anyone came gives little to the best technician, and large chillers give more than window units to anyone. Read the records before you speak to somebody."
-          />
-          <Sheet
-            title="The crew"
-            aside="by name; choose a heading to put it in another order"
-            tools={<FileButtons makeTable={() => techniciansFile(items, scope)} />}
-          >
-            <TechniciansTable items={items} scope={scope} />
-          </Sheet>
-          <p className="max-w-prose text-sm text-ink-2">
-            Total yield is all recovered mass over all full charges; median yield is the middle one of the recoveries.
-            Full charge is the nameplate charge plus what was added for long lines. Entry errors are left out.
-          </p>
-        </>
-      )}
-    </ScopedReport>
-  );
+  return <GroupedScreen kind={TECHNICIANS} scope={scope} answer={useTechnicianRecoveries(query)} />;
 };

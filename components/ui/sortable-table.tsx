@@ -11,6 +11,9 @@ import {
   tableFeatures,
   useTable,
 } from '@tanstack/react-table';
+import { useState } from 'react';
+import { formatCount } from '@/lib/format';
+import { TextButton } from './button';
 import { Table, Td, Th } from './table';
 
 type ColumnLook = {
@@ -44,58 +47,73 @@ type SortableTableProps<Row extends RowData> = {
   rowId: (row: Row) => string;
 };
 
+/** More rows than this at once make a browser slow; who wants all of them asks. */
+const MOST_ROWS = 200;
+
 /** A table that its reader puts in order by any column; the order it comes in is the first. */
 export const SortableTable = <Row extends RowData>({ label, columns, data, rowId }: SortableTableProps<Row>) => {
+  const [all, setAll] = useState(false);
   const table = useTable({ features, columns: [...columns], data: data as Row[], getRowId: rowId });
+  const { rows } = table.getRowModel();
   return (
-    <Table label={label}>
-      <thead>
-        {table.getHeaderGroups().map((group) => (
-          <tr key={group.id}>
-            {group.headers.map((header) => {
-              const sorted = header.column.getIsSorted();
-              return (
-                <Th
-                  key={header.id}
-                  numeric={header.column.columnDef.meta?.numeric ?? false}
-                  data-numeric={header.column.columnDef.meta?.numeric || undefined}
-                  aria-sort={sorted ? ARIA[sorted] : 'none'}
-                >
-                  <button
-                    type="button"
-                    onClick={header.column.getToggleSortingHandler()}
-                    className="inline-flex min-h-8 items-end align-bottom gap-1 font-medium hover:text-act pointer-coarse:min-h-11"
+    <>
+      <Table label={label}>
+        <thead>
+          {table.getHeaderGroups().map((group) => (
+            <tr key={group.id}>
+              {group.headers.map((header) => {
+                const sorted = header.column.getIsSorted();
+                return (
+                  <Th
+                    key={header.id}
+                    numeric={header.column.columnDef.meta?.numeric ?? false}
+                    data-numeric={header.column.columnDef.meta?.numeric || undefined}
+                    aria-sort={sorted ? ARIA[sorted] : 'none'}
                   >
-                    {/* The arrow stands where it does not push the heading away from its figures. */}
-                    <span aria-hidden="true" className="order-last w-3 text-ink in-data-numeric:order-first">
-                      {sorted ? ARROWS[sorted] : ''}
-                    </span>
-                    <table.FlexRender header={header} />
-                  </button>
-                </Th>
-              );
-            })}
-          </tr>
-        ))}
-      </thead>
-      <tbody>
-        {table.getRowModel().rows.map((row) => (
-          <tr key={row.id}>
-            {row.getAllCells().map((cell) => {
-              const { numeric = false, rowHeader = false } = cell.column.columnDef.meta ?? {};
-              return rowHeader ? (
-                <Th key={cell.id} scope="row">
-                  <table.FlexRender cell={cell} />
-                </Th>
-              ) : (
-                <Td key={cell.id} numeric={numeric}>
-                  <table.FlexRender cell={cell} />
-                </Td>
-              );
-            })}
-          </tr>
-        ))}
-      </tbody>
-    </Table>
+                    <button
+                      type="button"
+                      onClick={header.column.getToggleSortingHandler()}
+                      className="inline-flex min-h-8 items-end align-bottom gap-1 font-medium hover:text-act pointer-coarse:min-h-11"
+                    >
+                      {/* The arrow stands where it does not push the heading away from its figures. */}
+                      <span aria-hidden="true" className="order-last w-3 text-ink in-data-numeric:order-first">
+                        {sorted ? ARROWS[sorted] : ''}
+                      </span>
+                      <table.FlexRender header={header} />
+                    </button>
+                  </Th>
+                );
+              })}
+            </tr>
+          ))}
+        </thead>
+        <tbody>
+          {(all ? rows : rows.slice(0, MOST_ROWS)).map((row) => (
+            <tr key={row.id}>
+              {row.getAllCells().map((cell) => {
+                const { numeric = false, rowHeader = false } = cell.column.columnDef.meta ?? {};
+                return rowHeader ? (
+                  <Th key={cell.id} scope="row">
+                    <table.FlexRender cell={cell} />
+                  </Th>
+                ) : (
+                  <Td key={cell.id} numeric={numeric}>
+                    <table.FlexRender cell={cell} />
+                  </Td>
+                );
+              })}
+            </tr>
+          ))}
+        </tbody>
+      </Table>
+      {rows.length > MOST_ROWS && !all ? (
+        <p className="mt-3 flex flex-wrap items-baseline gap-x-4 text-sm text-ink-2">
+          The first {formatCount(MOST_ROWS)} of {formatCount(rows.length)}; the files have them all.
+          <TextButton className="print:hidden" onClick={() => setAll(true)}>
+            Show all
+          </TextButton>
+        </p>
+      ) : null}
+    </>
   );
 };

@@ -1,4 +1,5 @@
 import { expect, test } from 'vitest';
+import { lowAgainNote, mostLowFirst } from '@/analytics/appliances/low-again';
 import { piecesText } from '@/analytics/figures/pieces';
 import { groupAnswer, groupsOfHalf, spreadNote } from '@/analytics/group-sentence';
 import { lowAnswer, unjudgedNote } from '@/analytics/low-recoveries/sentence';
@@ -47,4 +48,15 @@ test('low recoveries in words', () => {
     'About 34 others nothing is said: fewer than 20 jobs are like them.',
   );
   expect(piecesText(unjudgedNote({ ...judged, tooFewLikeJobs: 0 }))).toBe('');
+});
+
+test('units that come back low are counted in words, the most often low first', () => {
+  const unit = (lowRecoveries: number, recoveredMass = 1) => ({ lowRecoveries, recoveredMass });
+  expect(mostLowFirst([unit(0, 5), unit(2, 1), unit(0, 9)])).toEqual([unit(2, 1), unit(0, 9), unit(0, 5)]);
+  const note = (...low: number[]) => plainSpaces(lowAgainNote(low.map((count) => unit(count))));
+  expect(note(0, 0)).toBe('None of them came back far below like jobs.');
+  expect(note(1, 0)).toBe('1 unit came back far below like jobs, once.');
+  expect(note(1, 1)).toBe('2 units came back far below like jobs, none of them more than once.');
+  expect(note(3, 1)).toBe('2 units came back far below like jobs, 1 of them more than once.');
+  expect(note(2, 2)).toBe('2 units came back far below like jobs more than once.');
 });

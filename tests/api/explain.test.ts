@@ -6,6 +6,7 @@ import { type Figure, type FigureScope, figureRecords, monthInScope } from '@/an
 import { MEASURES, type Measure } from '@/analytics/figures/measures';
 import type { RecordList, RecordRow } from '@/analytics/records/contract';
 import { EVERY_RECORD, onlyOf, scopeQuery } from '@/analytics/scope-address';
+import { GET as appliancesRoute } from '@/app/api/appliances/route';
 import { GET as explainRoute } from '@/app/api/explain/route';
 import { GET as lowRoute } from '@/app/api/low-recoveries/route';
 import { GET as recordsRoute } from '@/app/api/recoveries/route';
@@ -134,8 +135,21 @@ const SCREENS: Record<string, Screen> = {
       cell(onlyOf(scope, 'technician', [row.technician]), row),
     ),
   sites: async (scope) =>
-    (await itemsOf<{ site: string }>(sitesRoute, '/api/sites', scope)).map((row) =>
-      cell(onlyOf(scope, 'site', [row.site]), row),
+    (await itemsOf<{ site: string; lowRecoveries: number }>(sitesRoute, '/api/sites', scope)).map((row) =>
+      cell(onlyOf(scope, 'site', [row.site]), { ...row, flagged: row.lowRecoveries }),
+    ),
+  appliances: async (scope) =>
+    (
+      await itemsOf<{ site: string; appliance: string; lowRecoveries: number }>(
+        appliancesRoute,
+        '/api/appliances',
+        scope,
+      )
+    ).map((row) =>
+      cell(onlyOf(onlyOf(scope, 'site', [row.site]), 'appliance', [row.appliance]), {
+        ...row,
+        flagged: row.lowRecoveries,
+      }),
     ),
   season: async (scope) => {
     const list = await ask<RecordList>(

@@ -34,6 +34,8 @@ test('adds up each site in the order people read, entry errors left out', async 
     fullCharge: 12,
     totalYield: 0.75,
     medianYield: 0.75,
+    lowRecoveries: 0,
+    firstRecoveredOn: '2026-01-10',
     lastRecoveredOn: '2026-03-10',
   });
 });

@@ -13,11 +13,11 @@ const findFaults = async (page: Page): Promise<string[]> => {
   );
 };
 
-/** The address of a page, ids taken from the demo company. Of the hundreds of sites a month's are enough. */
+/** The address of a page, ids taken from the demo company. Of the hundreds of sites and appliances a month's are enough. */
 const addressOf = async (page: Page, path: string): Promise<string> => {
-  if (path === '/sites') {
+  if (path === '/sites' || path === '/appliances') {
     const { lastMonth } = await (await page.request.get('/api/scope-options')).json();
-    return `/sites?from=${lastMonth}&to=${lastMonth}`;
+    return `${path}?from=${lastMonth}&to=${lastMonth}`;
   }
   if (!path.includes('[')) return path;
   const list = path.startsWith('/records') ? '/api/recoveries?limit=1' : '/api/imports?limit=1';

@@ -54,6 +54,11 @@ const sumOf = (items: { recoveries: number }[]) => items.reduce((sum, { recoveri
  * comes back.
  */
 export const ROUTES: Record<string, RouteRule> = {
+  'GET /api/appliances': {
+    action: 'appliances:read',
+    status: 200,
+    records: (answer: { items: { recoveries: number }[] }) => sumOf(answer.items),
+  },
   'GET /api/auth/[...nextauth]': { open: 'signing in is for those who are not signed in' },
   'POST /api/auth/[...nextauth]': { open: 'signing in is for those who are not signed in' },
   'GET /api/explain': {
