@@ -64,3 +64,11 @@ export type FlagDecision = (typeof FLAG_DECISIONS)[number];
 /** Units in which a person may read masses; the API speaks kilograms whatever is chosen. */
 export const DISPLAY_UNITS = ['lb', 'kg'] as const;
 export type DisplayUnit = (typeof DISPLAY_UNITS)[number];
+
+/** Why refrigerant was put into an appliance. Only the first and the last count as leaked (40 CFR 82.157). */
+export const ADDITION_REASONS = ['leak_top_up', 'initial_charge', 'retrofit', 'seasonal_variance', 'unknown'] as const;
+export type AdditionReason = (typeof ADDITION_REASONS)[number];
+
+/** The two ways of 40 CFR 82.152 to compute a leak rate; a facility keeps to one. */
+export const LEAK_RATE_METHODS = ['annualizing', 'rolling_average'] as const;
+export type LeakRateMethod = (typeof LEAK_RATE_METHODS)[number];
