@@ -7,6 +7,8 @@ export type Random = {
   chance: (probability: number) => boolean;
   normal: (mean: number, standardDeviation: number) => number;
   beta: (a: number, b: number) => number;
+  /** With scale 1: mean and variance are both the shape. */
+  gamma: (shape: number) => number;
   poisson: (mean: number) => number;
   /** One of the list, by weight where one is given; throws on an empty list. */
   pick: <T>(list: readonly T[], weightOf?: (item: T) => number) => T;
@@ -75,6 +77,7 @@ export const seededRandom = (seed: string): Random => {
       const x = gamma(a);
       return x / (x + gamma(b));
     },
+    gamma,
     poisson,
     pick,
     fork: (name) => seededRandom(`${seed}/${name}`),
