@@ -14,15 +14,12 @@ import { ANALYZE_DECIDED_ROWS, COUNT_OUTCOMES, createDecidedRows, INSERT_IMPORT_
 import { FINISH_IMPORT, LOCK_IMPORT } from './sql/finish';
 import { ANALYZE_MATCHED_ROWS, CREATE_MATCHED_ROWS, LOCK_KNOWN_RECORDS } from './sql/match';
 import { ANALYZE_STAGED_NAMES, CREATE_STAGED_APPLIANCES, createStagedNames } from './sql/names';
-import { FOR_MANY_ROWS } from './sql/settings';
+import { FOR_MANY_ROWS, REFRESH_FROM_ROWS, REFRESH_STATISTICS } from './sql/settings';
 import { INSERT_NAMES, INSERT_RECOVERIES, updateRecoveries } from './sql/write';
 import { stageRows } from './stage';
 import { summarize } from './summary';
 
 const TELL_EVERY_ROWS = 5_000;
-
-/** From so many changed records on the planner must be told, or the first screen after the import waits too long. */
-const REFRESH_FROM_ROWS = 1_000;
 
 /*
  * Takes a file in, in these steps:
@@ -90,7 +87,7 @@ const takeRows = (work: ImportWork, plan: FilePlan): Promise<void> =>
       await rememberMapping(client, work, plan);
       await write(client, work, plan, stated);
       const { added = 0, updated = 0 } = counts.rows[0] ?? {};
-      if (added + updated >= REFRESH_FROM_ROWS) await client.query('select refresh_statistics()');
+      if (added + updated >= REFRESH_FROM_ROWS) await client.query(REFRESH_STATISTICS);
     }
     await client.query(FINISH_IMPORT, [...owner, counts.rows[0], summary]);
   });

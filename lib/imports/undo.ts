@@ -8,7 +8,7 @@ import { scopeOf, type Viewer } from '@/lib/auth/viewer';
 import { AppError, conflict } from '@/lib/errors';
 import type { ImportPayload } from '@/lib/jobs/task';
 import { LOCK_IMPORT } from './sql/finish';
-import { FOR_MANY_ROWS } from './sql/settings';
+import { FOR_MANY_ROWS, REFRESH_FROM_ROWS, REFRESH_STATISTICS } from './sql/settings';
 import {
   CREATE_TAKEN_ROWS,
   DELETE_ADDED,
@@ -40,6 +40,8 @@ export const undoImport = ({ companyId, importId, actor }: ImportPayload): Promi
     for (const statement of [DELETE_ADDED, RESTORE_UPDATED, RENEW_EARLIER_LEDGER])
       await client.query(statement, [companyId]);
     for (const statement of DELETE_NAMES) await client.query(statement, owner);
+    const { rows: taken } = await client.query<{ count: number }>('select count(*)::int as count from taken_rows');
+    if ((taken[0]?.count ?? 0) >= REFRESH_FROM_ROWS) await client.query(REFRESH_STATISTICS);
     await client.query(FINISH_UNDO, [...owner, JSON.stringify(kept.rows)]);
   });
 
