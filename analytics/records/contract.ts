@@ -87,6 +87,8 @@ export const recordListQuery = scopeSchema.safeExtend({
   likeJobs: z.enum(LIKE_JOBS_STANDINGS).optional(),
   /** Only records that state a hold, or a final vacuum. */
   states: z.enum(STATED_READINGS).optional(),
+  /** Only records that do not state a hold, or a final vacuum. */
+  lacks: z.enum(STATED_READINGS).optional(),
   /** Only routine jobs, or only those at large plant (full charge of 100 lb and more). */
   plant: z.enum(PLANT_SIZES).optional(),
   limit: z.coerce.number().int().min(1).max(MOST_ROWS_A_PAGE).default(50),

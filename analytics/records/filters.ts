@@ -34,6 +34,8 @@ const STANDS: Record<LikeJobsStanding, SQL> = {
 
 const STATES: Record<StatedReading, SQL> = { hold: isNotNull(f.held), vacuum: isNotNull(f.downToLevel) };
 
+const LACKS: Record<StatedReading, SQL> = { hold: isNull(f.held), vacuum: isNull(f.downToLevel) };
+
 const PLANT: Record<PlantSize, SQL> = {
   routine: lt(f.fullChargeKg, LARGE_PLANT_KG),
   large: gte(f.fullChargeKg, LARGE_PLANT_KG),
@@ -42,7 +44,7 @@ const PLANT: Record<PlantSize, SQL> = {
 /** What narrows a list of records besides the page and its order. */
 type RecordFilters = Scope &
   Pick<RecordListQuery, 'q' | 'importId'> &
-  Partial<Pick<RecordListQuery, 'exclusion' | 'likeJobs' | 'states' | 'plant'>>;
+  Partial<Pick<RecordListQuery, 'exclusion' | 'likeJobs' | 'states' | 'lacks' | 'plant'>>;
 
 /** The records that a list query means, whatever page of them. */
 export const recordsInList = ({
@@ -51,6 +53,7 @@ export const recordsInList = ({
   exclusion,
   likeJobs,
   states,
+  lacks,
   plant,
   ...scope
 }: RecordFilters): SQL | undefined =>
@@ -61,5 +64,6 @@ export const recordsInList = ({
     exclusion ? (exclusion === 'none' ? isNull(f.exclusion) : isNotNull(f.exclusion)) : undefined,
     likeJobs ? STANDS[likeJobs] : undefined,
     states ? STATES[states] : undefined,
+    lacks ? LACKS[lacks] : undefined,
     plant ? PLANT[plant] : undefined,
   );

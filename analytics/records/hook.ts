@@ -1,5 +1,5 @@
 import { keepPreviousData, queryOptions, useQuery } from '@tanstack/react-query';
-import type { MeasureRecords } from '@/analytics/figures/measures';
+import type { MeasureRecords, StatedReading } from '@/analytics/figures/measures';
 import type { ScopeQuery } from '@/analytics/scope-address';
 import { apiFetch, searchString } from '@/lib/api/client';
 import type { Exclusion, Sort } from './constants';
@@ -15,6 +15,7 @@ export type RecordFilters = ScopeQuery & {
   q?: string;
   importId?: string;
   exclusion?: Exclusion;
+  lacks?: StatedReading;
 } & MeasureRecords;
 
 /** One page: its size and the cursor of the list; without a cursor it is the first. */

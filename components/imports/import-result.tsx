@@ -1,11 +1,13 @@
 'use client';
 
+import { useScopeOptions } from '@/analytics/scope-options/hook';
 import { Button, LinkButton } from '@/components/ui/button';
 import { Notice } from '@/components/ui/notice';
 import { PageHead } from '@/components/ui/page-head';
 import { Sheet } from '@/components/ui/sheet';
 import { Table, Td, Th } from '@/components/ui/table';
 import { useViewer } from '@/components/viewer-context';
+import { searchString } from '@/lib/api/client';
 import { formatInstant } from '@/lib/format';
 import type { ImportView } from '@/lib/imports/contract';
 import { ChangedRecords } from './changed-records';
@@ -38,11 +40,20 @@ const KeptByUndo = ({ kept }: { kept: { recordRef: string; reason: string }[] })
     </Sheet>
   ) : null;
 
+/** The records that an import last added or changed, over the whole time: a file may be older than the usual period. */
+const useRecordsHref = (importId: string): string => {
+  const { data } = useScopeOptions();
+  const { firstMonth, lastMonth } = data ?? {};
+  const period = firstMonth && lastMonth ? { from: firstMonth, to: lastMonth } : {};
+  return `/records${searchString({ ...period, importId })}`;
+};
+
 type ImportResultProps = { view: ImportView; verbs: ReturnType<typeof useImportVerbs> };
 
 /** What came of a file that was taken in, or was undone. */
 export const ImportResult = ({ view, verbs }: ImportResultProps) => {
   const { timeZone } = useViewer();
+  const recordsHref = useRecordsHref(view.id);
   const isUndone = view.status === 'undone';
   const at = isUndone ? view.undoneAt : view.finishedAt;
   const canUndo = !isUndone && takenCount(view) > 0;
@@ -53,8 +64,8 @@ export const ImportResult = ({ view, verbs }: ImportResultProps) => {
         sub={at ? `${isUndone ? 'Undone' : 'Taken in'} ${formatInstant(at, timeZone)}` : undefined}
         actions={
           <>
-            {isUndone ? null : (
-              <LinkButton tone="primary" href="/records">
+            {isUndone || takenCount(view) === 0 ? null : (
+              <LinkButton tone="primary" href={recordsHref}>
                 Open the records
               </LinkButton>
             )}

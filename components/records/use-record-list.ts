@@ -17,6 +17,7 @@ const PARSERS = {
   exclusion: parseAsStringLiteral(EXCLUSIONS),
   likeJobs: parseAsStringLiteral(LIKE_JOBS_STANDINGS),
   states: parseAsStringLiteral(STATED_READINGS),
+  lacks: parseAsStringLiteral(STATED_READINGS),
   plant: parseAsStringLiteral(PLANT_SIZES),
   limit: parseAsNumberLiteral(PAGE_SIZES).withDefault(PAGE_SIZES[0]),
   columns: parseAsArrayOf(parseAsStringLiteral(COLUMN_IDS)),
@@ -35,7 +36,7 @@ const markOf = (text: string): string => {
 export const useRecordList = () => {
   const { scope } = useScope();
   const [address, setAddress] = useQueryStates(PARSERS, { history: 'push' });
-  const { sort, q, importId, exclusion, likeJobs, states, plant, limit, columns, page } = address;
+  const { sort, q, importId, exclusion, likeJobs, states, lacks, plant, limit, columns, page } = address;
   const filters = useMemo<RecordFilters>(
     () => ({
       ...scopeQuery(scope),
@@ -45,9 +46,10 @@ export const useRecordList = () => {
       ...(exclusion ? { exclusion } : {}),
       ...(likeJobs ? { likeJobs } : {}),
       ...(states ? { states } : {}),
+      ...(lacks ? { lacks } : {}),
       ...(plant ? { plant } : {}),
     }),
-    [scope, sort, q, importId, exclusion, likeJobs, states, plant],
+    [scope, sort, q, importId, exclusion, likeJobs, states, lacks, plant],
   );
   const mark = `${markOf(searchString({ ...filters, limit }))}.`;
   const cursor = page?.startsWith(mark) ? page.slice(mark.length) : null;
@@ -63,7 +65,15 @@ export const useRecordList = () => {
     setCursor: (next: string | null) => setAddress({ page: next === null ? null : `${mark}${next}` }),
     /** Takes back what narrows the list besides scope and search. */
     showAll: () =>
-      setAddress({ importId: null, exclusion: null, likeJobs: null, states: null, plant: null, page: null }),
+      setAddress({
+        importId: null,
+        exclusion: null,
+        likeJobs: null,
+        states: null,
+        lacks: null,
+        plant: null,
+        page: null,
+      }),
   };
 };
 export type RecordListState = ReturnType<typeof useRecordList>;

@@ -72,13 +72,16 @@ export const onlyPhrase = ({
   exclusion,
   likeJobs,
   states,
+  lacks,
   plant,
-}: Pick<RecordFilters, 'importId' | 'exclusion' | 'likeJobs' | 'states' | 'plant'>): string =>
+}: Pick<RecordFilters, 'importId' | 'exclusion' | 'likeJobs' | 'states' | 'lacks' | 'plant'>): string =>
   [
-    importId ? 'that one import brought' : '',
+    importId ? 'that one import added or changed last' : '',
     likeJobs ? STANDING_PHRASES[likeJobs] : '',
     states === 'hold' ? 'that state a hold' : '',
     states === 'vacuum' ? 'that state a final vacuum' : '',
+    lacks === 'hold' ? 'that state no hold' : '',
+    lacks === 'vacuum' ? 'that state no final vacuum' : '',
     plant === 'routine' ? 'of routine jobs' : '',
     plant === 'large' ? 'of large plant' : '',
     exclusion === 'none' ? 'that count in figures' : '',
