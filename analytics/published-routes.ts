@@ -12,6 +12,7 @@ import { recordHistorySchema, recordListContract, recordSchema } from './records
 import { knownNamesContract } from './records/known-names-contract';
 import { scopeOptions } from './scope-options/contract';
 import { siteRecoveries } from './sites/contract';
+import { start } from './start/contract';
 import { technicianRecoveries } from './technicians/contract';
 import { trendsComparison } from './trends-comparison/contract';
 
@@ -25,6 +26,7 @@ const health = z.object({ status: z.enum(['ok', 'failing']), database: z.string(
 /** Every route that reads, for programs: a test holds this list against the handlers that there are. */
 export const PUBLISHED_ROUTES: readonly PublishedRoute[] = [
   published(explain, 'How a figure was computed, and the query of its records'),
+  published(start, 'What changed and what waits, by role'),
   published(monthlyTrends, 'Recovered mass by month, split by one dimension'),
   published(trendsComparison, 'A period against another one, like for like'),
   published(monthlyPattern, 'Season, trend and unusual months'),

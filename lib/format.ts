@@ -68,6 +68,9 @@ export const formatMonthName = (month: string, style: 'long' | 'short' = 'long')
 /** A local day `2026-11-30` as `Nov 30, 2026`; other text as it is. */
 export const formatDay = (day: string): string => inUtc(day, { month: 'short', day: 'numeric', year: 'numeric' });
 
+/** A local day with its weekday: `Tuesday, December 1, 2026`; other text as it is. */
+export const formatWeekday = (day: string): string => inUtc(day, { dateStyle: 'full' });
+
 /** An ISO instant in the company's zone as `Nov 30, 2026, 17:42`; other text as it is. */
 export const formatInstant = (instant: string, timeZone: string): string => {
   const date = new Date(instant);

@@ -1,5 +1,5 @@
 import 'server-only';
-import { and, asc, count, eq, gte, lt } from 'drizzle-orm';
+import { and, asc, count, desc, eq, gte, lt } from 'drizzle-orm';
 import { dayAfter, firstDay } from '@/analytics/scope';
 import type { Tx } from '@/db/client';
 import { notes } from '@/db/schema/notes';
@@ -42,6 +42,21 @@ export const getNotes = async (tx: Tx, { from, to }: NotesQuery): Promise<NotesL
     items: rows.map((row) => ({ ...row, writtenBy: nameOf(row.writtenBy), writtenAt: iso(row.writtenAt) })),
     total: all?.total ?? 0,
   };
+};
+
+/** The notes written since a day, the newest first. */
+export const getLatestNotes = async (tx: Tx, since: string, most: number): Promise<Note[]> => {
+  const rows = await tx
+    .select(columns)
+    .from(notes)
+    .where(gte(notes.createdAt, since))
+    .orderBy(desc(notes.createdAt), asc(notes.id))
+    .limit(most);
+  const nameOf = await whoTheyAre(
+    tx,
+    rows.map(({ writtenBy }) => writtenBy),
+  );
+  return rows.map((row) => ({ ...row, writtenBy: nameOf(row.writtenBy), writtenAt: iso(row.writtenAt) }));
 };
 
 /** One note; undefined when the company has none with this id. */

@@ -11,6 +11,7 @@ export type Screen = {
 
 /** All screens in the order in which they are offered. */
 export const SCREENS: readonly Screen[] = [
+  { path: '/', name: 'Today', action: 'records:read', scoped: false },
   { path: '/trends', name: 'Trends', action: 'trends:read', scoped: true },
   { path: '/low-recoveries', name: 'Low recoveries', action: 'flags:read', scoped: true },
   { path: '/technicians', name: 'Technicians', action: 'technicians:read', scoped: true },
@@ -24,6 +25,3 @@ export const SCREENS: readonly Screen[] = [
 /** The screens that somebody with these actions may open. */
 export const screensFor = (allowed: readonly Action[]): Screen[] =>
   SCREENS.filter((screen) => allowed.includes(screen.action));
-
-/** Where somebody begins: the first screen of the role. */
-export const startPath = (allowed: readonly Action[]): string => screensFor(allowed)[0]?.path ?? '/sign-in';

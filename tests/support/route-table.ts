@@ -129,6 +129,11 @@ export const ROUTES: Record<string, RouteRule> = {
     status: 200,
     records: (answer: { items: { recoveries: number }[] }) => sumOf(answer.items),
   },
+  'GET /api/start': {
+    action: 'records:read',
+    status: 200,
+    records: (answer: { recoveries: number }) => answer.recoveries,
+  },
   'GET /api/technicians': {
     action: 'technicians:read',
     status: 200,
