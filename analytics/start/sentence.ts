@@ -2,7 +2,7 @@ import type { FigureScope } from '@/analytics/figures/figure';
 import type { Piece } from '@/analytics/figures/pieces';
 import { lowAnswer } from '@/analytics/low-recoveries/sentence';
 import { changeWords } from '@/analytics/monthly-trends/sentence';
-import { monthsBefore } from '@/analytics/scope-address';
+import { EVERY_RECORD, monthsBefore } from '@/analytics/scope-address';
 import { formatCount, formatDay, formatMassWithUnit, formatMonth, formatPercent, plural } from '@/lib/format';
 import type { DisplayUnit, Role } from '@/lib/vocabulary';
 import type { Start } from './contract';
@@ -10,10 +10,8 @@ import type { Start } from './contract';
 /** A sentence whose figures open, the records they are about, and what is said under it. */
 export type StartAnswer = { pieces: Piece[]; scope: FigureScope; sub: string };
 
-const NO_NAMES = { refrigerant: [], technician: [], site: [], branch: [], category: [], jobType: [] };
-
 /** Everything the viewer sees between two days or months, both included; null is open. */
-export const wholeScope = (from: string | null, to: string | null): FigureScope => ({ ...NO_NAMES, from, to });
+export const wholeScope = (from: string | null, to: string | null): FigureScope => ({ ...EVERY_RECORD, from, to });
 
 type Latest = NonNullable<Start['latest']>;
 
