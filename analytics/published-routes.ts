@@ -3,6 +3,7 @@ import type { Contract } from '@/lib/api/contract';
 import type { PublishedRoute } from '@/lib/api/openapi';
 import { importListSchema, importSchema } from '@/lib/imports/contract';
 import { applianceRecoveries } from './appliances/contract';
+import { coachingList } from './coaching/contract';
 import { explain } from './explain/contract';
 import { lowRecoveriesList } from './low-recoveries/contract';
 import { monthlyPattern } from './monthly-pattern/contract';
@@ -37,6 +38,7 @@ export const PUBLISHED_ROUTES: readonly PublishedRoute[] = [
   published(recordListContract, 'Records, page by page; with format=csv all of them as a recovery file'),
   published(knownNamesContract, 'Names that a new record can use'),
   published(scopeOptions, 'What a scope can be narrowed to'),
+  published(coachingList, 'Coachings of technicians'),
   published(notesList, 'Notes pinned to days'),
   {
     path: '/api/recoveries/{id}',

@@ -13,13 +13,15 @@ export const ACTIONS = [
   'imports:manage',
   'notes:read',
   'notes:write',
+  'coaching:read',
+  'coaching:write',
   'company:manage',
 ] as const;
 export type Action = (typeof ACTIONS)[number];
 
 /**
- * Who may do what. A technician's `records:*` reach only his own records: row-level security narrows his transactions
- * to them (see `technicianId` of the viewer).
+ * Who may do what. A technician's `records:*` and `coaching:read` reach only what is his own: row-level security
+ * narrows his transactions to it (see `technicianId` of the viewer).
  */
 export const PERMISSIONS: Record<Role, readonly Action[]> = {
   owner: ACTIONS,
@@ -35,6 +37,8 @@ export const PERMISSIONS: Record<Role, readonly Action[]> = {
     'imports:manage',
     'notes:read',
     'notes:write',
+    'coaching:read',
+    'coaching:write',
   ],
   trainer: [
     'trends:read',
@@ -46,8 +50,10 @@ export const PERMISSIONS: Record<Role, readonly Action[]> = {
     'records:export',
     'notes:read',
     'notes:write',
+    'coaching:read',
+    'coaching:write',
   ],
-  technician: ['records:read', 'records:write', 'records:export'],
+  technician: ['records:read', 'records:write', 'records:export', 'coaching:read'],
   office: [
     'trends:read',
     'sites:read',

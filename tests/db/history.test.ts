@@ -7,6 +7,7 @@ import { entriesOf } from '../support/history';
 const TRACKED: Record<string, [column: string, value: string]> = {
   appliances: ['name', 'New name'],
   branches: ['name', 'New name'],
+  coaching: ['plan', 'New plan'],
   cylinders: ['name', 'New name'],
   flag_decisions: ['note', 'New note'],
   flags: ['state', 'decided'],
@@ -25,6 +26,7 @@ const DELETE_ORDER = [
   'appliances',
   'sites',
   'memberships',
+  'coaching',
   'technicians',
   'cylinders',
   'branches',

@@ -1,5 +1,6 @@
 import { randomUUID } from 'node:crypto';
 import { addSettings, type Tx, withCompany } from '@/db/client';
+import { coaching } from '@/db/schema/coaching';
 import { settings } from '@/db/schema/companies';
 import { flagDecisions, flags } from '@/db/schema/flags';
 import { importFileChunks, importMappings, importRows, imports } from '@/db/schema/imports';
@@ -24,6 +25,8 @@ const ids = () => ({
   flagId: randomUUID(),
   recoveryId: randomUUID(),
   noteId: randomUUID(),
+  coachingId: randomUUID(),
+  otherCoachingId: randomUUID(),
   otherRecoveryId: randomUUID(),
 });
 type Ids = ReturnType<typeof ids>;
@@ -85,6 +88,14 @@ const fillNotes = (tx: Tx, companyId: string, label: string, id: Ids) =>
     writtenBy: 'test',
   });
 
+const fillCoaching = (tx: Tx, companyId: string, label: string, id: Ids) => {
+  const shared = { companyId, startedOn: '2025-03-01', plan: `Plan of ${label}`, writtenBy: 'test' };
+  return tx.insert(coaching).values([
+    { ...shared, id: id.coachingId, technicianId: id.technicianId },
+    { ...shared, id: id.otherCoachingId, technicianId: id.otherTechnicianId },
+  ]);
+};
+
 const fillImports = async (tx: Tx, companyId: string, label: string, id: Ids): Promise<void> => {
   const { importId } = id;
   await tx.insert(imports).values({
@@ -125,6 +136,7 @@ export const filledCompany = async (label: string, massKg: string) => {
     await fillRecords(tx, companyId, label, id, massKg);
     await fillImports(tx, companyId, label, id);
     await fillNotes(tx, companyId, label, id);
+    await fillCoaching(tx, companyId, label, id);
   });
   const { personId } = await newPerson(companyId, 'owner');
   const expiresAt = '2099-01-01T00:00:00Z';

@@ -46,6 +46,7 @@ const takenRecord = ({ label }: FilledCompany) =>
 const recoveryId = ({ ids }: FilledCompany) => ids.recoveryId;
 const otherRecoveryId = ({ ids }: FilledCompany) => ids.otherRecoveryId;
 const noteId = ({ ids }: FilledCompany) => ids.noteId;
+const coachingId = ({ ids }: FilledCompany) => ids.coachingId;
 const importId = ({ ids }: FilledCompany) => ids.importId;
 const sumOf = (items: { recoveries: number }[]) => items.reduce((sum, { recoveries }) => sum + recoveries, 0);
 
@@ -61,6 +62,23 @@ export const ROUTES: Record<string, RouteRule> = {
   },
   'GET /api/auth/[...nextauth]': { open: 'signing in is for those who are not signed in' },
   'POST /api/auth/[...nextauth]': { open: 'signing in is for those who are not signed in' },
+  'GET /api/coaching': {
+    action: 'coaching:read',
+    status: 200,
+  },
+  'POST /api/coaching': {
+    action: 'coaching:write',
+    send: ({ ids }) => asJson({ technicianId: ids.technicianId, startedOn: '2025-03-15', plan: 'Wait out the hold.' }),
+    status: 201,
+  },
+  // A version that nobody has seen yet.
+  'PATCH /api/coaching/[id]': {
+    action: 'coaching:write',
+    id: coachingId,
+    send: () => asJson({ version: 999, plan: 'mended' }),
+    status: 409,
+  },
+  'DELETE /api/coaching/[id]': { action: 'coaching:write', id: coachingId, search: '?version=999', status: 409 },
   'GET /api/explain': {
     action: 'records:read',
     search: '?measure=recoveries',
