@@ -74,6 +74,11 @@ export const appliances = pgTable(
     refrigerant: text('refrigerant').references(() => refrigerants.designation),
     nameplateChargeKg: massKg('nameplate_charge_kg'),
     manufacturedOn: date('manufactured_on', { mode: 'string' }),
+    /**
+     * Whether it is of the residential and light commercial air-conditioning and heat pump subsector, which 40 CFR 84.106
+     * leaves out; NULL: nobody has said.
+     */
+    lightCommercial: boolean('light_commercial'),
   },
   (t) => [
     primaryKey({ columns: [t.companyId, t.id] }),

@@ -1,5 +1,6 @@
 import { randomUUID } from 'node:crypto';
 import { addSettings, type Tx, withCompany } from '@/db/client';
+import { additionImports, chargeAdditions, siteLeakMethods } from '@/db/schema/charge-additions';
 import { coaching } from '@/db/schema/coaching';
 import { settings } from '@/db/schema/companies';
 import { flagDecisions, flags } from '@/db/schema/flags';
@@ -27,6 +28,8 @@ const ids = () => ({
   noteId: randomUUID(),
   coachingId: randomUUID(),
   otherCoachingId: randomUUID(),
+  additionId: randomUUID(),
+  additionImportId: randomUUID(),
   otherRecoveryId: randomUUID(),
 });
 type Ids = ReturnType<typeof ids>;
@@ -96,6 +99,34 @@ const fillCoaching = (tx: Tx, companyId: string, label: string, id: Ids) => {
   ]);
 };
 
+const fillAdditions = async (tx: Tx, companyId: string, label: string, id: Ids, massKg: string): Promise<void> => {
+  await tx.insert(additionImports).values({
+    companyId,
+    id: id.additionImportId,
+    fileName: `${label}.csv`,
+    fileSha256: label,
+    ...{ rowsRead: 1, added: 0, updated: 0, unchanged: 0, rejected: 1 },
+    refused: [],
+    ledger: [],
+    createdBy: 'test',
+  });
+  await tx.insert(chargeAdditions).values({
+    companyId,
+    id: id.additionId,
+    additionRef: `${label}-addition`,
+    applianceId: id.applianceId,
+    addedOn: '2025-04-01',
+    addedChargeKg: massKg,
+    massUnit: 'kg',
+    enteredMass: massKg,
+    reason: 'leak_top_up',
+    createdBy: 'test',
+  });
+  await tx
+    .insert(siteLeakMethods)
+    .values({ companyId, siteId: id.siteId, method: 'annualizing', chosenBy: `Manager of ${label}` });
+};
+
 const fillImports = async (tx: Tx, companyId: string, label: string, id: Ids): Promise<void> => {
   const { importId } = id;
   await tx.insert(imports).values({
@@ -137,6 +168,7 @@ export const filledCompany = async (label: string, massKg: string) => {
     await fillImports(tx, companyId, label, id);
     await fillNotes(tx, companyId, label, id);
     await fillCoaching(tx, companyId, label, id);
+    await fillAdditions(tx, companyId, label, id, massKg);
   });
   const { personId } = await newPerson(companyId, 'owner');
   const expiresAt = '2099-01-01T00:00:00Z';

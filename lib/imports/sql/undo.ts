@@ -63,11 +63,15 @@ const DELETE_CERTIFICATIONS = `
 /** In the order in which they refer to one another. */
 export const DELETE_NAMES: readonly string[] = [
   DELETE_CERTIFICATIONS,
-  deleteNames('appliances', [['recoveries', 'appliance_id']]),
+  deleteNames('appliances', [
+    ['recoveries', 'appliance_id'],
+    ['charge_additions', 'appliance_id'],
+  ]),
   deleteNames('cylinders', [['recoveries', 'cylinder_id']]),
   deleteNames('sites', [
     ['recoveries', 'site_id'],
     ['appliances', 'site_id'],
+    ['site_leak_methods', 'site_id'],
   ]),
   deleteNames('technicians', [
     ['recoveries', 'technician_id'],
