@@ -1,58 +1,73 @@
 import 'server-only';
-import { eq } from 'drizzle-orm';
-import { withCompany } from '@/db/client';
-import { historyHeads } from '@/db/schema/history';
-import { scopeOf, type Viewer } from '@/lib/auth/viewer';
+import { createHash } from 'node:crypto';
+import { promisify } from 'node:util';
+import { gzip } from 'node:zlib';
+import { type AskingViewer, scopeOf } from '@/lib/auth/viewer';
+
+/** An answer ready to be sent: its bytes, the same compressed, and a name that only this content has (a weak entity tag: one for both). */
+export type KeptAnswer = { etag: string; body: Uint8Array<ArrayBuffer>; gzipped: Uint8Array<ArrayBuffer> };
 
 /** Bytes of answers that one process keeps; the ones unused for longest make room. */
 const MOST_BYTES = 64 * 1024 * 1024;
 
-const answers = new Map<string, string>();
+type Entry = { answer: Promise<KeptAnswer>; bytes: number };
+const entries = new Map<string, Entry>();
 let keptBytes = 0;
 
 const forget = (key: string) => {
-  keptBytes -= (answers.get(key)?.length ?? 0) + key.length;
-  answers.delete(key);
+  keptBytes -= entries.get(key)?.bytes ?? 0;
+  entries.delete(key);
 };
 
-const keep = (key: string, body: string) => {
-  if (answers.has(key)) forget(key);
-  answers.set(key, body);
-  keptBytes += body.length + key.length;
-  for (const oldest of answers.keys()) {
+/** Moves an entry to the young end. */
+const renew = (key: string, entry: Entry) => {
+  entries.delete(key);
+  entries.set(key, entry);
+};
+
+/** Counts an answer once its size is known; the oldest ones make room for it. */
+const weigh = (key: string, entry: Entry, { body, gzipped }: KeptAnswer) => {
+  if (entries.get(key) !== entry) return;
+  entry.bytes = body.length + gzipped.length + key.length;
+  keptBytes += entry.bytes;
+  for (const oldest of entries.keys()) {
     if (keptBytes <= MOST_BYTES) break;
     forget(oldest);
   }
 };
 
-/** The last number of the company's history: it grows with every change that an analytic answer could show. */
-const revisionOf = (viewer: Viewer): Promise<number> =>
-  withCompany(scopeOf(viewer), async (tx) => {
-    const [head] = await tx
-      .select({ entryNo: historyHeads.entryNo })
-      .from(historyHeads)
-      .where(eq(historyHeads.companyId, viewer.companyId));
-    return head?.entryNo ?? 0;
-  });
+const compress = promisify(gzip);
+
+const ready = async (text: string): Promise<KeptAnswer> => {
+  const body = new Uint8Array(Buffer.from(text));
+  const etag = `W/"${createHash('sha256').update(body).digest('base64url')}"`;
+  return { etag, body, gzipped: new Uint8Array(await compress(body)) };
+};
 
 /**
- * The answer to a question, computed once for each state of the company's records. The revision is read before the
- * answer is computed, so an answer may be newer than it says, never older. The local day is part of the question: it
- * decides which month is running.
+ * The answer to a question, computed once for each state of the company's records; whoever asks meanwhile waits for the
+ * same computation. The viewer's revision was read before, so an answer may be newer than it says, never older. The
+ * local day is part of the question: it decides which month is running.
  */
-export const keptAnswer = async (viewer: Viewer, question: string, compute: () => Promise<string>): Promise<string> => {
-  const revision = await revisionOf(viewer);
+export const keptAnswer = (
+  viewer: AskingViewer,
+  question: string,
+  compute: () => Promise<string>,
+): Promise<KeptAnswer> => {
   const { technicianId } = scopeOf(viewer);
   const today = new Date().toLocaleDateString('sv-SE', { timeZone: viewer.timeZone });
-  const key = [viewer.companyId, technicianId ?? '', viewer.timeZone, today, revision, question].join('|');
-  const kept = answers.get(key);
-  if (kept !== undefined) {
-    // Moved to the young end.
-    answers.delete(key);
-    answers.set(key, kept);
-    return kept;
+  const key = [viewer.companyId, technicianId ?? '', viewer.timeZone, today, viewer.revision, question].join('|');
+  const kept = entries.get(key);
+  if (kept) {
+    renew(key, kept);
+    return kept.answer;
   }
-  const body = await compute();
-  keep(key, body);
-  return body;
+  const entry: Entry = { answer: compute().then(ready), bytes: 0 };
+  entries.set(key, entry);
+  entry.answer.then(
+    (answer) => weigh(key, entry, answer),
+    // A failure is nobody's answer but theirs who waited for it.
+    () => entries.get(key) === entry && forget(key),
+  );
+  return entry.answer;
 };

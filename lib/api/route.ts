@@ -6,15 +6,15 @@ import { viewerOfAccessToken } from '@/lib/auth/access-tokens';
 import { sessionTokenOf } from '@/lib/auth/current-viewer';
 import { type Action, may } from '@/lib/auth/permissions';
 import { viewerOfSession } from '@/lib/auth/sessions';
-import type { Viewer } from '@/lib/auth/viewer';
+import type { AskingViewer, Viewer } from '@/lib/auth/viewer';
 import { env } from '@/lib/env';
 import { AppError, forbidden, unauthorized } from '@/lib/errors';
 import { log } from '@/lib/log';
 import type { Contract } from './contract';
-import { keptAnswer } from './kept-answers';
+import { type KeptAnswer, keptAnswer } from './kept-answers';
 import { problemResponse, throwBadInput } from './problem';
 
-const viewerOf = async (request: Request): Promise<Viewer> => {
+const viewerOf = async (request: Request): Promise<AskingViewer> => {
   const bearer = request.headers.get('authorization')?.match(/^Bearer\s+(\S+)$/i)?.[1];
   if (bearer) return (await viewerOfAccessToken(bearer)) ?? raise(unauthorized());
   const jar = parseCookie(request.headers.get('cookie') ?? '', '; ', '=');
@@ -42,7 +42,7 @@ const refuseForeignOrigin = (request: Request) => {
  * the response.
  */
 export const withViewer =
-  <Context>(action: Action, handle: (request: Request, viewer: Viewer, context: Context) => Promise<Response>) =>
+  <Context>(action: Action, handle: (request: Request, viewer: AskingViewer, context: Context) => Promise<Response>) =>
   async (request: Request, context: Context): Promise<Response> => {
     const requestId = randomUUID();
     const began = performance.now();
@@ -79,9 +79,15 @@ export const searchInput = (url: string): Record<string, string | string[]> => {
 export const json = (body: unknown, status = 200): Response =>
   Response.json(body, { status, headers: { 'cache-control': 'private, no-store' } });
 
-/** JSON text that is ready to be sent. */
-const jsonText = (body: string): Response =>
-  new Response(body, { headers: { 'content-type': 'application/json', 'cache-control': 'private, no-store' } });
+/** A kept answer, compressed where that is taken; 304 without a body to whoever says that he holds it already. */
+const keptResponse = (request: Request, { etag, body, gzipped }: KeptAnswer): Response => {
+  const headers = new Headers({ etag, 'cache-control': 'private, no-store', vary: 'accept-encoding' });
+  if (request.headers.get('if-none-match')?.includes(etag)) return new Response(null, { status: 304, headers });
+  headers.set('content-type', 'application/json');
+  if (!/\bgzip\b/.test(request.headers.get('accept-encoding') ?? '')) return new Response(body, { headers });
+  headers.set('content-encoding', 'gzip');
+  return new Response(gzipped, { headers });
+};
 
 /**
  * A reading route from its contract: parse the query, load, check the answer against the promise. For answers that
@@ -95,7 +101,7 @@ export const getKeptRoute = <Query extends z.ZodType, Answer extends z.ZodType>(
     const query = contract.query.safeParse(searchInput(request.url));
     if (!query.success) return throwBadInput(query.error);
     const compute = async () => JSON.stringify(contract.response.parse(await load(query.data, viewer)));
-    return jsonText(await keptAnswer(viewer, `${contract.path} ${JSON.stringify(query.data)}`, compute));
+    return keptResponse(request, await keptAnswer(viewer, `${contract.path} ${JSON.stringify(query.data)}`, compute));
   });
 
 /** A reading route from its contract: parse the query, load, check the answer against the promise. */

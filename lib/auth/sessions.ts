@@ -1,10 +1,11 @@
 import 'server-only';
-import { and, eq, gt, sql } from 'drizzle-orm';
-import { addSettings, withKnowledge, withPerson } from '@/db/client';
+import { eq, sql } from 'drizzle-orm';
+import { withKnowledge, withPerson } from '@/db/client';
 import { companies } from '@/db/schema/companies';
-import { memberships, people, sessions } from '@/db/schema/people';
+import { memberships, sessions } from '@/db/schema/people';
+import { sessionByHash } from '@/db/who-asks';
 import { hashToken, newToken } from './tokens';
-import type { Membership, Viewer } from './viewer';
+import type { AskingViewer, Membership } from './viewer';
 
 /** A session ends by itself after this, whatever happens. */
 const SESSION_DAYS = 14;
@@ -42,31 +43,17 @@ export const openSession = (personId: string, userAgent: string | null): Promise
     return token;
   });
 
-/** Who this session token is, read anew at each request; null when it was ended, has expired or is in no company. */
-export const viewerOfSession = (token: string): Promise<Viewer | null> =>
-  withKnowledge({ session_hash: hashToken(token) }, async (tx) => {
-    const [session] = await tx
-      .select({ personId: sessions.personId, companyId: sessions.companyId })
-      .from(sessions)
-      .where(and(eq(sessions.tokenHash, hashToken(token)), gt(sessions.expiresAt, sql`now()`)));
-    if (!session) return null;
-    await addSettings(tx, { person_id: session.personId });
-    const [person] = await tx
-      .select({ name: people.name, email: people.email })
-      .from(people)
-      .where(eq(people.id, session.personId));
-    const all = await membershipsOf(tx, session.personId);
-    const here = all.find((m) => m.companyId === session.companyId) ?? all[0];
-    if (!person || !here) return null;
-    return {
-      kind: 'person',
-      actor: session.personId,
-      name: person.name,
-      email: person.email,
-      ...here,
-      memberships: all,
-    };
-  });
+/**
+ * Who this session token is, read anew at each request by one statement; null when it was ended, has expired or is in
+ * no company.
+ */
+export const viewerOfSession = async (token: string): Promise<AskingViewer | null> => {
+  const found = await sessionByHash(hashToken(token));
+  const here = found?.memberships.find((membership) => membership.companyId === found.companyId);
+  if (!found || !here) return null;
+  const { personId, name, email, memberships: all, revision } = found;
+  return { kind: 'person', actor: personId, name, email, ...here, memberships: all, revision };
+};
 
 /** Ends one session: a copy of its cookie opens nothing any more. */
 export const endSession = async (token: string): Promise<void> => {

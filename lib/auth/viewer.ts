@@ -18,6 +18,12 @@ export type Viewer = Membership &
     | { kind: 'program'; actor: string; name: string }
   );
 
+/**
+ * A viewer as he was found when he asked, with the last number of his company's history at that moment: it grows with
+ * every change that an analytic answer could show.
+ */
+export type AskingViewer = Viewer & { revision: number };
+
 /** The scope with which a viewer's transactions are opened; a technician without a record of his own sees none. */
 export const scopeOf = (viewer: Viewer, reason?: string) => ({
   companyId: viewer.companyId,
