@@ -10,6 +10,7 @@ const TRACKED: Record<string, [column: string, value: string]> = {
   coaching: ['plan', 'New plan'],
   cylinders: ['name', 'New name'],
   flag_decisions: ['note', 'New note'],
+  flag_renewals: ['judging', 'another'],
   flags: ['state', 'decided'],
   memberships: ['role', 'auditor'],
   notes: ['text', 'New note'],
@@ -22,6 +23,7 @@ const TRACKED: Record<string, [column: string, value: string]> = {
 const DELETE_ORDER = [
   'flag_decisions',
   'flags',
+  'flag_renewals',
   'recoveries',
   'appliances',
   'sites',

@@ -3,6 +3,7 @@ import { addSettings, type Tx, withCompany } from '@/db/client';
 import { additionImports, chargeAdditions, siteLeakMethods } from '@/db/schema/charge-additions';
 import { coaching } from '@/db/schema/coaching';
 import { settings } from '@/db/schema/companies';
+import { flagBaselines, flagRenewals } from '@/db/schema/flag-renewal';
 import { flagDecisions, flags } from '@/db/schema/flags';
 import { importFileChunks, importMappings, importRows, imports } from '@/db/schema/imports';
 import { notes } from '@/db/schema/notes';
@@ -24,6 +25,9 @@ const ids = () => ({
   cylinderId: randomUUID(),
   importId: randomUUID(),
   flagId: randomUUID(),
+  decidedFlagId: randomUUID(),
+  othersFlagId: randomUUID(),
+  baselineId: randomUUID(),
   recoveryId: randomUUID(),
   noteId: randomUUID(),
   coachingId: randomUUID(),
@@ -67,18 +71,24 @@ const fillRecords = async (tx: Tx, companyId: string, label: string, id: Ids, ma
     massUnit: 'kg' as const,
   }));
   await tx.insert(recoveries).values(rows);
-  await tx.insert(flags).values({
-    companyId,
-    id: id.flagId,
-    recoveryId: id.recoveryId,
-    rule: 'low_unexplained',
-    certainty: 0.9,
-    evidence: {},
-    baseline: {},
-  });
+};
+
+/** An open and a decided flag on the low pull, and an open one on the other technician's record. */
+const fillFlags = async (tx: Tx, companyId: string, id: Ids): Promise<void> => {
+  const { baselineId, recoveryId } = id;
+  await tx.insert(flagBaselines).values({ companyId, id: baselineId, judging: 'test', content: {} });
+  await tx
+    .insert(flagRenewals)
+    .values({ companyId, judging: 'test', baselineId, records: JOBS, added: 3, changed: 0, gone: 0 });
+  const flag = { companyId, recoveryId, certainty: 0.9, evidence: {}, baselineId };
+  await tx.insert(flags).values([
+    { ...flag, id: id.flagId, rule: 'low_unexplained' },
+    { ...flag, id: id.decidedFlagId, rule: 'hold_missing', state: 'decided', decision: 'known_low_charge' },
+    { ...flag, id: id.othersFlagId, rule: 'unit_slip', recoveryId: id.otherRecoveryId },
+  ]);
   await tx
     .insert(flagDecisions)
-    .values({ companyId, flagId: id.flagId, decision: 'confirmed_correct', decidedBy: 'test' });
+    .values({ companyId, flagId: id.decidedFlagId, decision: 'known_low_charge', decidedBy: 'test' });
 };
 
 const fillNotes = (tx: Tx, companyId: string, label: string, id: Ids) =>
@@ -165,6 +175,7 @@ export const filledCompany = async (label: string, massKg: string) => {
   await withCompany({ ...scope, reason: `filled for ${label}` }, async (tx) => {
     await fillPlaces(tx, companyId, label, id);
     await fillRecords(tx, companyId, label, id, massKg);
+    await fillFlags(tx, companyId, id);
     await fillImports(tx, companyId, label, id);
     await fillNotes(tx, companyId, label, id);
     await fillCoaching(tx, companyId, label, id);
