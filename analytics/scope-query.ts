@@ -17,7 +17,7 @@ export const FACT_COLUMNS = {
 const PART_COLUMNS = { ...FACT_COLUMNS, appliance: f.appliance } as const satisfies Record<ScopePart, unknown>;
 
 /** Whether a column holds one of the values; `unstated` also means rows that say nothing. */
-export const isOneOf = (column: SQLWrapper, values: string[] | undefined): SQL | undefined =>
+export const isOneOf = (column: SQLWrapper, values: readonly string[] | undefined): SQL | undefined =>
   values?.length ? or(sql`${column} in ${values}`, values.includes(UNSTATED) ? isNull(column) : undefined) : undefined;
 
 // IS TRUE: of a row that says nothing the comparison is NULL, and NOT would leave it NULL.

@@ -1,12 +1,12 @@
 import 'server-only';
-import { and, eq, isNull, sql } from 'drizzle-orm';
-import { toGram } from '@/analytics/fact-figures';
+import { and, eq, sql } from 'drizzle-orm';
 import type { Dimension, Scope } from '@/analytics/scope';
 import { FACT_COLUMNS, inScope } from '@/analytics/scope-query';
 import type { Tx } from '@/db/client';
 import { recoveryFacts as f } from '@/db/views/recovery-facts';
 import { lowRecoveries as low } from '@/db/views/yield-limits';
 import type { MonthlyTrends, MonthlyTrendsQuery } from './contract';
+import { largestKeys, otherKeysOf } from './largest-keys';
 import { sumsByMonth, sumsByRecord } from './months';
 import { answeredByMonth, cutMonths, partialMonth, summedByMonth, yearBeforeScope } from './range';
 import { keyOf, rowsByMonth, rowsByRecord } from './rows';
@@ -23,12 +23,16 @@ const countFlagged = (tx: Tx, scope: Scope, by: Dimension) =>
     .where(inScope(scope))
     .groupBy(f.month, FACT_COLUMNS[by]);
 
-const massByMonth = (tx: Tx, scope: Scope) =>
-  tx
-    .select({ month: f.month, recoveredMass: toGram(sql`sum(${f.recoveredMassKg})`) })
-    .from(f)
-    .where(and(inScope(scope), isNull(f.exclusion)))
-    .groupBy(f.month);
+/** What each month in scope comes to over all keys, and the whole of it. */
+const getSums = async (tx: Tx, scope: Scope) => {
+  const sums = await (summedByMonth(scope) ? sumsByMonth : sumsByRecord)(tx, scope);
+  const months = sums.flatMap(({ month, medianYield, totalYield, excluded: _, ...figures }) =>
+    month === null || medianYield === null || totalYield === null
+      ? []
+      : [{ ...figures, month: toMonth(month), medianYield, totalYield }],
+  );
+  return { months, total: sums.find((row) => row.month === null) };
+};
 
 /** The month of the company's first record; a month before it has no figures to compare with. */
 const firstMonth = async (tx: Tx): Promise<string | null> => {
@@ -42,14 +46,15 @@ const firstMonth = async (tx: Tx): Promise<string | null> => {
  */
 export const getMonthlyTrends = async (
   tx: Tx,
-  { by, ...scope }: MonthlyTrendsQuery,
+  { by, keys, ...scope }: MonthlyTrendsQuery,
   { now, timeZone }: { now: Date; timeZone: string },
 ): Promise<MonthlyTrends> => {
-  const grouped = await (answeredByMonth(scope, by) ? rowsByMonth : rowsByRecord)(tx, scope, by);
-  const sums = await (summedByMonth(scope) ? sumsByMonth : sumsByRecord)(tx, scope);
+  const { named, others } = keys ? await largestKeys(tx, scope, by, keys) : { named: undefined, others: 0 };
+  const grouped = await (answeredByMonth(scope, by) ? rowsByMonth : rowsByRecord)(tx, scope, by, named);
+  const sums = await getSums(tx, scope);
   const flags = await countFlagged(tx, scope, by);
   const beforeScope = yearBeforeScope(scope);
-  const before = beforeScope ? await massByMonth(tx, beforeScope) : [];
+  const earlier = beforeScope ? (await getSums(tx, beforeScope)).months : [];
   const begins = await firstMonth(tx);
 
   const flagged = new Map(flags.map((row) => [`${toMonth(row.month)} ${row.key}`, row.flagged]));
@@ -57,31 +62,30 @@ export const getMonthlyTrends = async (
   for (const row of flags)
     flaggedByMonth.set(toMonth(row.month), (flaggedByMonth.get(toMonth(row.month)) ?? 0) + row.flagged);
 
-  const months = sums.flatMap(({ month, medianYield, totalYield, excluded: _, ...figures }) =>
-    month === null || medianYield === null || totalYield === null
-      ? []
-      : [{ ...figures, month: toMonth(month), medianYield, totalYield }],
-  );
-  const masses = new Map(months.map((row) => [row.month, row.recoveredMass]));
-  for (const row of before) masses.set(toMonth(row.month), row.recoveredMass);
+  // A month that the scope cuts stands in both: its year after is compared with the whole of it.
+  const masses = new Map([...sums.months, ...earlier].map((row) => [row.month, row.recoveredMass]));
   const yearBefore = (month: string): number | null => {
     const then = monthsAfter(month, -12);
     return begins !== null && then >= begins ? (masses.get(then) ?? 0) : null;
   };
 
-  const total = sums.find((row) => row.month === null);
+  const { total } = sums;
+  const rows = grouped.flatMap(({ month, medianYield, ...row }) =>
+    medianYield === null
+      ? []
+      : [{ ...row, month: toMonth(month), medianYield, flagged: flagged.get(`${toMonth(month)} ${row.key}`) ?? 0 }],
+  );
+  const months = sums.months.map((row) => ({
+    ...row,
+    flagged: flaggedByMonth.get(row.month) ?? 0,
+    yearBefore: yearBefore(row.month),
+  }));
   return {
     by,
-    rows: grouped.flatMap(({ month, medianYield, ...row }) =>
-      medianYield === null
-        ? []
-        : [{ ...row, month: toMonth(month), medianYield, flagged: flagged.get(`${toMonth(month)} ${row.key}`) ?? 0 }],
-    ),
-    months: months.map((row) => ({
-      ...row,
-      flagged: flaggedByMonth.get(row.month) ?? 0,
-      yearBefore: yearBefore(row.month),
-    })),
+    rows,
+    otherKeys: otherKeysOf({ rows, months }, others),
+    months,
+    earlier,
     totals: {
       recoveredMass: total?.recoveredMass ?? 0,
       recoveries: total?.recoveries ?? 0,

@@ -38,10 +38,24 @@ export type GroupedRow = {
 export const keyOf = (column: SQL.Aliased | (typeof FACT_COLUMNS)[Dimension]): SQL<string> =>
   sql<string>`coalesce(${column}, ${UNSTATED})`;
 
-const byKeyInC = (key: SQL): SQL => sql`${key} collate "C"`;
+/** Keys in an order that no locale changes. */
+export const byKeyInC = (key: SQL): SQL => sql`${key} collate "C"`;
 
-/** Rows out of the views that are summed by month; only for scopes that `answeredByMonth` admits. */
-export const rowsByMonth = (tx: Tx, scope: Scope, by: Dimension): Promise<GroupedRow[]> => {
+/** The rows of a view that is summed by month which a scope means; only for scopes that `answeredByMonth` admits. */
+export const monthsOfView = (scope: Scope, by: Dimension): SQL | undefined => {
+  const { month, key } = MONTHLY_VIEWS[by];
+  return and(
+    scope.from ? gte(month, firstDay(scope.from)) : undefined,
+    scope.to ? lt(month, dayAfter(scope.to)) : undefined,
+    isOneOf(key, scope[by]),
+  );
+};
+
+/** The records in scope that count. */
+export const recordsThatCount = (scope: Scope): SQL | undefined => and(inScope(scope), isNull(f.exclusion));
+
+/** Rows out of the views that are summed by month, `named` keys only if given; for scopes that `answeredByMonth` admits. */
+export const rowsByMonth = (tx: Tx, scope: Scope, by: Dimension, named?: readonly string[]): Promise<GroupedRow[]> => {
   const v = MONTHLY_VIEWS[by];
   const key = keyOf(v.key);
   return tx
@@ -54,24 +68,18 @@ export const rowsByMonth = (tx: Tx, scope: Scope, by: Dimension): Promise<Groupe
       co2e: toGram(v.co2eKg),
     })
     .from(v)
-    .where(
-      and(
-        scope.from ? gte(v.month, firstDay(scope.from)) : undefined,
-        scope.to ? lt(v.month, dayAfter(scope.to)) : undefined,
-        isOneOf(v.key, scope[by]),
-      ),
-    )
+    .where(and(monthsOfView(scope, by), isOneOf(v.key, named)))
     .orderBy(v.month, byKeyInC(key));
 };
 
 /** The same rows out of the records themselves, for any scope. */
-export const rowsByRecord = (tx: Tx, scope: Scope, by: Dimension): Promise<GroupedRow[]> => {
+export const rowsByRecord = (tx: Tx, scope: Scope, by: Dimension, named?: readonly string[]): Promise<GroupedRow[]> => {
   const { recoveredMass, recoveries, medianYield, co2e } = factFigures;
   const key = keyOf(FACT_COLUMNS[by]);
   return tx
     .select({ month: f.month, key: key.as('key'), recoveredMass, recoveries, medianYield, co2e })
     .from(f)
-    .where(and(inScope(scope), isNull(f.exclusion)))
+    .where(and(recordsThatCount(scope), isOneOf(FACT_COLUMNS[by], named)))
     .groupBy(f.month, FACT_COLUMNS[by])
     .orderBy(f.month, byKeyInC(key));
 };

@@ -1,11 +1,11 @@
 import { monthsBefore } from '@/analytics/scope-address';
 import type { MonthFigures, MonthlyTrends } from './contract';
 
-/** Most keys that a stack tells apart; the smaller ones become one. */
+/** As many keys as a stack tells apart; the smaller ones are asked for together. */
 export const MOST_KEYS = 7;
 
-/** One layer of the stacks: a key of the split, or all the smaller ones together (`key` null). */
-export type StackLayer = { id: string; key: string | null; members: string[] };
+/** One layer of the stacks: a key of the split, or all the smaller ones together (`key` null); `keys` is how many it holds. */
+export type StackLayer = { id: string; key: string | null; keys: number };
 
 /** A running month is not over yet; a cut one is narrowed by the scope's own days. Neither may be compared. */
 export type MonthState = 'whole' | 'running' | 'cut';
@@ -32,16 +32,15 @@ export const everyMonth = (first: string, last: string): string[] => {
   return months;
 };
 
-const toLayers = (rows: MonthlyTrends['rows']): StackLayer[] => {
+const REST = 'rest';
+
+const toLayers = ({ rows, otherKeys }: Pick<MonthlyTrends, 'rows' | 'otherKeys'>): StackLayer[] => {
   const totals = new Map<string, number>();
   for (const { key, recoveredMass } of rows) totals.set(key, (totals.get(key) ?? 0) + recoveredMass);
   const keys = [...totals].sort(([a, massA], [b, massB]) => massB - massA || (a < b ? -1 : 1)).map(([key]) => key);
-  // A layer of the rest that holds a single key would hide a name for nothing.
-  const shown = keys.length > MOST_KEYS + 1 ? keys.slice(0, MOST_KEYS) : keys;
-  const rest = keys.slice(shown.length);
   return [
-    ...shown.map((key, index) => ({ id: `layer-${index}`, key, members: [key] })),
-    ...(rest.length ? [{ id: 'rest', key: null, members: rest }] : []),
+    ...keys.map((key, index) => ({ id: `layer-${index}`, key, keys: 1 })),
+    ...(otherKeys ? [{ id: REST, key: null, keys: otherKeys.keys }] : []),
   ];
 };
 
@@ -62,12 +61,13 @@ const NOTHING = {
  * Bars by month out of the route's answer: every month between the first and the last one with records, every layer in
  * every month, zeros included. Layers are ordered by their mass over the whole scope, the largest first.
  */
-export const toStacks = ({ rows, months, partialMonth, cutMonths }: MonthlyTrends): Stacks => {
-  const layers = toLayers(rows);
-  const layerOf = new Map(layers.flatMap((layer) => layer.members.map((key) => [key, layer.id] as const)));
+export const toStacks = ({ rows, otherKeys, months, partialMonth, cutMonths }: MonthlyTrends): Stacks => {
+  const layers = toLayers({ rows, otherKeys });
+  const layerOf = new Map(layers.map(({ key, id }) => [key, id]));
   const masses = new Map<string, Record<string, number>>();
-  for (const { month, key, recoveredMass } of rows) {
-    const id = layerOf.get(key) ?? 'rest';
+  const others = otherKeys?.rows.map((row) => ({ ...row, key: null })) ?? [];
+  for (const { month, key, recoveredMass } of [...rows, ...others]) {
+    const id = layerOf.get(key) ?? REST;
     const ofMonth = masses.get(month) ?? {};
     ofMonth[id] = gram((ofMonth[id] ?? 0) + recoveredMass);
     masses.set(month, ofMonth);

@@ -42,7 +42,7 @@ export type ChartModel = {
   beside: readonly ChartColumn[];
   /** Notes pinned to months, by their numbers. */
   marks: readonly ChartNote[];
-  /** The figure that a value is; null for one that is computed from several, or has too many names to say. */
+  /** The figure that a value is; null for one that is computed from several. */
   open: (month: string, columnKey: string) => Figure | null;
 };
 

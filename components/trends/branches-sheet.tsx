@@ -4,12 +4,13 @@ import dynamic from 'next/dynamic';
 import { useMemo } from 'react';
 import { useMonthlyTrends } from '@/analytics/monthly-trends/hook';
 import { lastWholeMonth, type StackedMonth, type StackLayer, toStacks } from '@/analytics/monthly-trends/series';
-import { onlyOf, type ScopeQuery, type ScopeSelection } from '@/analytics/scope-address';
+import type { ScopeQuery, ScopeSelection } from '@/analytics/scope-address';
 import { useSeen } from '@/components/charts/use-seen';
 import { useWidth } from '@/components/charts/use-width';
 import { FigureLink } from '@/components/figures/figure-link';
 import { Sheet } from '@/components/ui/sheet';
 import { formatMassWithUnit, formatMonth } from '@/lib/format';
+import { layerScope } from './months-model';
 import { layerName } from './wording';
 
 const HEIGHT = 128;
@@ -19,9 +20,15 @@ const BarPanel = dynamic(() => import('@/components/charts/bar-panel').then((mod
   loading: () => <div style={{ height: HEIGHT }} />,
 });
 
-type PanelProps = { layer: StackLayer; months: readonly StackedMonth[]; highest: number; scope: ScopeSelection };
+type PanelProps = {
+  layer: StackLayer;
+  layers: readonly StackLayer[];
+  months: readonly StackedMonth[];
+  highest: number;
+  scope: ScopeSelection;
+};
 
-const Panel = ({ layer, months, highest, scope }: PanelProps) => {
+const Panel = ({ layer, layers, months, highest, scope }: PanelProps) => {
   const [measured, width] = useWidth();
   const total = months.reduce((sum, month) => sum + (month.layers[layer.id] ?? 0), 0);
   const latest = lastWholeMonth(months);
@@ -34,7 +41,7 @@ const Panel = ({ layer, months, highest, scope }: PanelProps) => {
       <figcaption className="mb-1">
         <span className="block truncate font-semibold">{name}</span>
         <span className="block text-sm text-ink-2">
-          <FigureLink measure="recoveredMass" scope={onlyOf(scope, 'branch', layer.members)}>
+          <FigureLink measure="recoveredMass" scope={layerScope(scope, 'branch', layer, layers)}>
             {formatMassWithUnit(total, scope.unit, 0)}
           </FigureLink>
           {inLatest}
@@ -80,7 +87,14 @@ export const BranchesSheet = ({ query, scope, className }: BranchesSheetProps) =
       >
         <div className="grid min-h-44 gap-x-8 gap-y-6 pb-2 sm:grid-cols-2 lg:grid-cols-3">
           {stacks?.layers.map((layer) => (
-            <Panel key={layer.id} layer={layer} months={stacks.months} highest={highest} scope={scope} />
+            <Panel
+              key={layer.id}
+              layer={layer}
+              layers={stacks.layers}
+              months={stacks.months}
+              highest={highest}
+              scope={scope}
+            />
           ))}
         </div>
       </Sheet>

@@ -1,8 +1,8 @@
 import type { Dimension } from '@/analytics/dimensions';
-import { type Figure, monthInScope } from '@/analytics/figures/figure';
+import { type Figure, type FigureScope, monthInScope } from '@/analytics/figures/figure';
 import type { Measure } from '@/analytics/figures/measures';
-import type { StackedMonth, Stacks } from '@/analytics/monthly-trends/series';
-import { onlyOf, type ScopeSelection } from '@/analytics/scope-address';
+import type { StackedMonth, StackLayer, Stacks } from '@/analytics/monthly-trends/series';
+import { allBut, onlyOf, type ScopeSelection } from '@/analytics/scope-address';
 import type { ChartColumn, ChartModel } from '@/components/charts/model';
 import { figureScopePhrase } from '@/components/figures/wording';
 import { chartNotes, type NumberedNote, notesOfMonth } from '@/components/notes/numbered';
@@ -10,9 +10,6 @@ import { layerName, monthInWords, stateWord } from './wording';
 
 /** With more months than this the line of the year before hides more than it shows. */
 const MOST_COMPARED = 37;
-
-/** More names than this do not fit an address. */
-const MOST_NAMES = 40;
 
 const comparable = ({ state, yearBefore }: StackedMonth): boolean => state === 'whole' && yearBefore !== null;
 
@@ -22,6 +19,21 @@ const changeOf = (month: StackedMonth): number | null =>
 
 const notesInWords = (notes: readonly NumberedNote[], month: string): string[] =>
   notesOfMonth(notes, month).map(({ no, text }) => `Note ${no}: ${text}`);
+
+/** The records of one layer: those of its key, or all but those of the named ones. */
+export const layerScope = <Scope extends FigureScope>(
+  scope: Scope,
+  by: Dimension,
+  layer: StackLayer,
+  layers: readonly StackLayer[],
+): Scope => {
+  if (layer.key !== null) return onlyOf(scope, by, [layer.key]);
+  return allBut(
+    scope,
+    by,
+    layers.flatMap(({ key }) => key ?? []),
+  );
+};
 
 const MEASURE_OF: Record<string, Measure> = {
   all: 'recoveredMass',
@@ -73,10 +85,7 @@ export const monthsModel = (
     open: (month, key): Figure | null => {
       const own = monthInScope(scope, month);
       const layer = layers.find(({ id }) => id === key);
-      if (layer)
-        return layer.members.length > MOST_NAMES
-          ? null
-          : { measure: 'recoveredMass', scope: onlyOf(own, by, layer.members) };
+      if (layer) return { measure: 'recoveredMass', scope: layerScope(own, by, layer, layers) };
       const measure = MEASURE_OF[key];
       return measure ? { measure, scope: own } : null;
     },

@@ -14,6 +14,7 @@ import { DIMENSION_WORDS } from '@/components/scope/wording';
 import { TextButton } from '@/components/ui/button';
 import { Sheet } from '@/components/ui/sheet';
 import { useMay } from '@/components/viewer-context';
+import { formatCount, plural } from '@/lib/format';
 import { SplitSelector } from './split-selector';
 
 type MonthsSheetProps = {
@@ -27,6 +28,12 @@ type MonthsSheetProps = {
   className?: string;
 };
 
+/** Says that only the largest are told apart, where that is so. */
+const othersNote = ({ layers }: Stacks): string => {
+  const others = layers.find(({ key }) => key === null);
+  return others ? `, the ${formatCount(layers.length - 1)} largest and ${plural(others.keys, 'other', 'others')}` : '';
+};
+
 /** The months as a chart, with the notes that explain them. */
 export const MonthsSheet = ({ stacks, shownBy, by, onSplit, model, notes, className }: MonthsSheetProps) => {
   const mayWrite = useMay('notes:write');
@@ -36,7 +43,7 @@ export const MonthsSheet = ({ stacks, shownBy, by, onSplit, model, notes, classN
   return (
     <Sheet
       title="Recovered mass by month"
-      aside={`${model.unit}, by ${DIMENSION_WORDS[shownBy].one}${model.overlays.length ? '; the line is the year before' : ''}`}
+      aside={`${model.unit}, by ${DIMENSION_WORDS[shownBy].one}${othersNote(stacks)}${model.overlays.length ? '; the line is the year before' : ''}`}
       tools={<FileButtons makeTable={() => modelFile(model)} />}
       {...(className ? { className } : {})}
     >

@@ -4,9 +4,9 @@ import { choiceName } from '@/components/scope/wording';
 import { formatMass, formatMassWithUnit, formatMonth, formatNumber, plural } from '@/lib/format';
 import type { DisplayUnit } from '@/lib/vocabulary';
 
-/** How a layer is called: the key in words, or how many smaller ones it holds. */
+/** How a layer is called: the key in words, or how many others it holds. */
 export const layerName = (by: Dimension, layer: StackLayer): string =>
-  layer.key === null ? `${layer.members.length} smaller` : choiceName(by, layer.key);
+  layer.key === null ? plural(layer.keys, 'other', 'others') : choiceName(by, layer.key);
 
 /** What stands behind a month that is not to be compared. */
 export const stateWord = (month: Pick<StackedMonth, 'state'>): string =>

@@ -1,5 +1,5 @@
 import { expect, test } from 'vitest';
-import { everyMonth, lastWholeMonth, MOST_KEYS, toStacks } from '@/analytics/monthly-trends/series';
+import { everyMonth, lastWholeMonth, toStacks } from '@/analytics/monthly-trends/series';
 import { trendsOf } from '../support/trends';
 
 test('every month between the first and the last stands there, zeros included', () => {
@@ -18,26 +18,29 @@ test('every month between the first and the last stands there, zeros included', 
   expect(months[1]?.medianYield).toBeNull();
 });
 
-test('the largest layer comes first, small ones become one, and nothing is lost', () => {
-  const rows = Array.from(
-    { length: MOST_KEYS + 3 },
-    (_, i) => ['2026-01', `key ${i}`, i + 0.001] as [string, string, number],
+test('the largest layer comes first, the others together come last, and nothing is lost', () => {
+  const { layers, months } = toStacks(
+    trendsOf(
+      [
+        ['2026-01', 'small', 2],
+        ['2026-01', 'large', 5],
+      ],
+      {
+        otherKeys: { keys: 3, rows: [{ month: '2026-01', recoveredMass: 3.003, recoveries: 4, flagged: 0, co2e: 0 }] },
+      },
+    ),
   );
-  const { layers, months } = toStacks(trendsOf(rows));
-  expect(layers).toHaveLength(MOST_KEYS + 1);
-  expect(layers[0]?.key).toBe(`key ${MOST_KEYS + 2}`);
-  expect(layers.at(-1)).toEqual({ id: 'rest', key: null, members: ['key 2', 'key 1', 'key 0'] });
+  expect(layers.map(({ key, keys }) => [key, keys])).toEqual([
+    ['large', 1],
+    ['small', 1],
+    [null, 3],
+  ]);
   expect(months[0]?.layers.rest).toBe(3.003);
-});
-
-test('one name too many keeps its own layer', () => {
-  const rows = Array.from({ length: MOST_KEYS + 1 }, (_, i) => ['2026-01', `key ${i}`, i] as [string, string, number]);
-  expect(toStacks(trendsOf(rows)).layers.every((layer) => layer.key !== null)).toBe(true);
 });
 
 test('a key that is called like the rest is not the rest', () => {
   const { layers } = toStacks(trendsOf([['2026-01', 'rest', 1]]));
-  expect(layers).toEqual([{ id: 'layer-0', key: 'rest', members: ['rest'] }]);
+  expect(layers).toEqual([{ id: 'layer-0', key: 'rest', keys: 1 }]);
 });
 
 test('running and cut months are marked, and the last whole month is neither', () => {

@@ -164,3 +164,45 @@ test('the running month is of the company’s zone', async () => {
   expect(await running('Pacific/Honolulu', { to: '2026-11' })).toBe('2026-11');
   expect(await running('Pacific/Honolulu', { from: '2026-12' })).toBeNull();
 });
+
+test('keys beyond the largest are told together, each month whole, and the records behind them open', async () => {
+  const company = await newCompany();
+  const sites = ['A', 'B', 'C', 'D', 'E'];
+  await writeRecords(company.scope, [
+    // A to E recovered 10, 8, 6, 4 and 2 kg in May; E another 0.5 kg in June.
+    ...sites.map((site, index) => ({ on: '2026-05-05', site, kg: String(10 - 2 * index) })),
+    { on: '2026-06-05', site: 'E', kg: '0.5' },
+    { on: '2026-06-06', site: 'A', kg: '1', refrigerant: 'R-22' },
+  ]);
+  const token = await company.token('owner');
+  // Out of the months that stand ready, and out of the records.
+  for (const narrowed of ['', '&from=2026-05-01&to=2026-06-29']) {
+    const { rows, otherKeys, months } = await ask(`?by=site&keys=2${narrowed}`, token);
+    expect(rows.map(({ month, key, recoveredMass }) => [month, key, recoveredMass])).toEqual([
+      ['2026-05', 'A', 10],
+      ['2026-05', 'B', 8],
+      ['2026-06', 'A', 1],
+    ]);
+    expect(otherKeys?.keys).toBe(3);
+    expect(otherKeys?.rows.map(({ month, recoveredMass, recoveries }) => [month, recoveredMass, recoveries])).toEqual([
+      ['2026-05', 12, 3],
+      ['2026-06', 0.5, 1],
+    ]);
+    expect(months[0]?.recoveredMass).toBe(30);
+  }
+  // One that would be left over is named; without the parameter all are.
+  expect((await ask('?by=site&keys=4', token)).otherKeys).toBeNull();
+  expect((await ask('?by=site', token)).rows).toHaveLength(7);
+  expect((await ask('?by=site&keys=1&site=C&site=D&site=E', token)).otherKeys?.keys).toBe(2);
+  // The records of the others, as the picture opens them.
+  const others = await ask('?by=site&site=A&site=B&except=site', token);
+  expect(others.totals).toMatchObject({ recoveredMass: 12.5, recoveries: 4 });
+  expect((await problem('?keys=0', token)).status).toBe(400);
+});
+
+test('the year before the scope is told with the figures that its months are compared with', async () => {
+  const { earlier, months } = await ask('?from=2026-02&to=2026-04');
+  expect(earlier.map(({ month, recoveredMass }) => [month, recoveredMass])).toEqual([['2025-03', 4]]);
+  expect(months.find(({ month }) => month === '2026-03')?.yearBefore).toBe(4);
+  expect((await ask()).earlier).toEqual([]);
+});

@@ -58,7 +58,7 @@ test('no two layers of a picture share a colour', () => {
   const layers = ['R-410A', 'R-22', 'R-401A', 'R-402A', 'R-408A', 'R-409A', 'R-502'].map((key, index) => ({
     id: `layer-${index}`,
     key,
-    members: [key],
+    keys: 1,
   }));
   const colours = Object.values(layerColours('refrigerant', layers));
   expect(new Set(colours).size).toBe(layers.length);

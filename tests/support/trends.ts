@@ -23,6 +23,8 @@ export const trendsOf = (rows: readonly Row[], rest: Partial<MonthlyTrends> = {}
       yearBefore: byMonth.get(yearEarlier(month)) ?? null,
     })),
     totals: { ...plain, recoveredMass: 0, totalYield: 0.85 },
+    otherKeys: null,
+    earlier: [],
     partialMonth: null,
     cutMonths: [],
     excluded: 0,
