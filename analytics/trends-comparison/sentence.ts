@@ -34,7 +34,7 @@ export const certaintyWords = ({ ratio, clear, now, before }: Comparison): strin
   const range = `between ${signed(ratio.low)} and ${signed(ratio.high)}`;
   if (clear) return `Jobs of such sizes would not differ so much by chance: the change lies ${range}.`;
   const few = Math.min(now.recoveries, before.recoveries) < 30 ? 'So few jobs say little' : 'Jobs differ much in size';
-  return `${few}: it may lie ${range}, which is no clear change.`;
+  return `${few}: the change may lie ${range}, which is no clear change.`;
 };
 
 /** Which key makes more than half of the difference, as a sentence; empty when none does, or when it is of people. */

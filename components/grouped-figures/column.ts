@@ -3,6 +3,7 @@ import { MEASURE_UNITS, type Measure } from '@/analytics/figures/measures';
 import type { GroupFigures } from '@/analytics/grouped-figures/contract';
 import type { ScopeSelection } from '@/analytics/scope-address';
 import type { FileColumn } from '@/components/files/file-table';
+import type { TermId } from '@/lib/glossary/terms';
 
 /**
  * One column of a table of groups: its heading and its value, from which come the table, its order and the file. Masses
@@ -17,6 +18,8 @@ export type GroupedColumn<Row> = {
   measure?: Measure;
   /** Draws the value otherwise than as plain text. */
   draw?: (row: Row, scope: ScopeSelection) => ReactNode;
+  /** What the heading means, in the glossary. */
+  term?: TermId;
   /** Names the row. */
   heads?: boolean;
   /** Said with another column on the screen; files have it as a column of its own. */
@@ -28,21 +31,22 @@ type FigureName<Row> = { [Name in keyof Row]: Row[Name] extends number | null ? 
 const KINDS = { kg: 'mass', count: 'count', share: 'share' } as const;
 
 /** A column of a figure that is called in the answer as its measure is. */
-export const measured = <Row>(name: FigureName<Row> & Measure, label: string): GroupedColumn<Row> => ({
+export const measured = <Row>(name: FigureName<Row> & Measure, label: string, term?: TermId): GroupedColumn<Row> => ({
   id: name,
   label,
   kind: KINDS[MEASURE_UNITS[name]],
   measure: name,
+  ...(term ? { term } : {}),
   // The type of `name` sees to it that a number or nothing stands there.
   value: (row) => row[name] as number | null,
 });
 
 /** What every table of groups says, in the order in which it is read. */
 export const MASS_COLUMNS: readonly GroupedColumn<GroupFigures>[] = [
-  measured<GroupFigures>('recoveredMass', 'Recovered'),
-  measured<GroupFigures>('fullCharge', 'Full charge'),
-  measured<GroupFigures>('totalYield', 'Total yield'),
-  measured<GroupFigures>('medianYield', 'Median yield'),
+  measured<GroupFigures>('recoveredMass', 'Recovered', 'recovered-mass'),
+  measured<GroupFigures>('fullCharge', 'Full charge', 'full-charge'),
+  measured<GroupFigures>('totalYield', 'Total yield', 'total-yield'),
+  measured<GroupFigures>('medianYield', 'Median yield', 'median-yield'),
 ];
 export const RECOVERIES: GroupedColumn<GroupFigures> = measured<GroupFigures>('recoveries', 'Recoveries');
 export const FIRST: GroupedColumn<GroupFigures> = {
@@ -64,5 +68,6 @@ export const LOW: GroupedColumn<{ lowRecoveries: number }> = {
   label: 'Far below',
   kind: 'count',
   measure: 'flagged',
+  term: 'far-below-like-jobs',
   value: ({ lowRecoveries }) => lowRecoveries,
 };

@@ -2,6 +2,7 @@
 
 import { useMemo } from 'react';
 import type { ScopeSelection } from '@/analytics/scope-address';
+import { Term } from '@/components/glossary/term';
 import { columnsFor, SortableTable } from '@/components/ui/sortable-table';
 import { useMay } from '@/components/viewer-context';
 import type { GroupedColumn } from './column';
@@ -31,7 +32,11 @@ export const GroupedTable = <Row extends object>(props: GroupedTableProps<Row>) 
           id: column.id,
           header: column.kind === 'mass' ? `${column.label}, ${scope.unit}` : column.label,
           ...(column.kind === 'text' ? { sortFn: 'alphanumeric' as const } : {}),
-          meta: { numeric: column.kind !== 'text', rowHeader: column.heads ?? false },
+          meta: {
+            numeric: column.kind !== 'text',
+            rowHeader: column.heads ?? false,
+            ...(column.term ? { aside: <Term id={column.term} /> } : {}),
+          },
           cell: ({ row }) => (
             <GroupedCell column={column} row={row.original} own={ownScope(scope, row.original)} mayLook={mayLook} />
           ),

@@ -1,3 +1,4 @@
+import { Term } from '@/components/glossary/term';
 import { Sheet } from '@/components/ui/sheet';
 import { LEAST_LIKE_JOBS } from '@/lib/like-jobs';
 import { YieldStrip } from './yield-strip';
@@ -8,9 +9,10 @@ export const LowRule = () => (
     <div className="grid gap-x-10 gap-y-4 md:grid-cols-2">
       <div className="max-w-prose space-y-3">
         <p>
-          Like jobs are recoveries of the same refrigerant from the same category of appliance, over the company’s whole
-          record. Put in order by yield, the middle half of them lies between the lower and the upper quartile. A
-          recovery is listed when its yield lies more than one and a half times that distance below the lower quartile.
+          <Term id="like-jobs">Like jobs</Term> are recoveries of the same refrigerant from the same category of
+          appliance, over the company’s whole record. Put in order by yield, the middle half of them lies between the
+          lower and the upper <Term id="quartiles">quartile</Term>. A recovery is listed when its yield lies more than
+          one and a half times that distance below the lower quartile.
         </p>
         <p>
           Quartiles hold still even when some of the records are wrong, which a mean would not. Where fewer than{' '}
@@ -27,9 +29,10 @@ export const LowRule = () => (
           it is their median, the dashes are the fence, and the dot is this recovery.
         </p>
         <p>
-          Yield is recovered mass over full charge, and full charge is the nameplate charge plus what was added for long
-          lines. A system that leaked before anyone came, a nameplate read from the wrong unit and pounds written as
-          ounces all look the same here: only the record and the person tell them apart.
+          <Term id="yield">Yield</Term> is recovered mass over full charge, and
+          <Term id="full-charge">full charge</Term> is the nameplate charge plus what was added for long lines. A system
+          that leaked before anyone came, a nameplate read from the wrong unit and pounds written as ounces all look the
+          same here: only the record and the person tell them apart.
         </p>
       </div>
     </div>

@@ -1,4 +1,5 @@
 import type { SortKey } from '@/analytics/records/constants';
+import type { TermId } from '@/lib/glossary/terms';
 
 /** Columns of the table of records; each is a key to sort by. */
 export const COLUMN_IDS = [
@@ -32,6 +33,15 @@ export const COLUMN_NAMES: Record<ColumnId, string> = {
   fullCharge: 'Full charge',
   yield: 'Yield',
   cylinder: 'Cylinder',
+};
+
+/** Headings whose word is explained in the glossary. */
+export const COLUMN_TERMS: Partial<Record<ColumnId, TermId>> = {
+  category: 'appliance-category',
+  jobType: 'job-type',
+  recoveredMass: 'recovered-mass',
+  fullCharge: 'full-charge',
+  yield: 'yield',
 };
 
 /** What stands in the table before anybody chooses. The ref leads to the record and always stands. */

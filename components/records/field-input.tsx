@@ -1,9 +1,10 @@
 'use client';
 
 import { useId } from 'react';
+import { Term } from '@/components/glossary/term';
 import { Field, Select, TextArea, TextInput } from '@/components/ui/field';
 import { FIELD_LABELS, type RecordField } from '@/lib/recoveries/fields';
-import { ALWAYS_CHOSEN, CHOICES, HINTS, NEEDED, NUMBERS } from './field-kinds';
+import { ALWAYS_CHOSEN, CHOICES, FIELD_TERMS, HINTS, NEEDED, NUMBERS } from './field-kinds';
 import { WhenInput } from './when-input';
 
 type FieldInputProps = {
@@ -69,14 +70,18 @@ const Control = ({
 };
 
 /** One field of a record with its label, hint and what is wrong with it. */
-export const FieldInput = ({ error, unit, ...rest }: FieldInputProps) => (
-  <Field
-    label={unit ? `${FIELD_LABELS[rest.field]}, ${unit}` : FIELD_LABELS[rest.field]}
-    hint={HINTS[rest.field]}
-    error={error}
-    required={NEEDED.has(rest.field)}
-    className={rest.field === 'notes' ? 'sm:col-span-2' : 'sm:justify-end'}
-  >
-    <Control {...rest} />
-  </Field>
-);
+export const FieldInput = ({ error, unit, ...rest }: FieldInputProps) => {
+  const term = FIELD_TERMS[rest.field];
+  return (
+    <Field
+      label={unit ? `${FIELD_LABELS[rest.field]}, ${unit}` : FIELD_LABELS[rest.field]}
+      hint={HINTS[rest.field]}
+      aside={term ? <Term id={term} /> : undefined}
+      error={error}
+      required={NEEDED.has(rest.field)}
+      className={rest.field === 'notes' ? 'sm:col-span-2' : 'sm:justify-end'}
+    >
+      <Control {...rest} />
+    </Field>
+  );
+};

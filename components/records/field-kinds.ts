@@ -1,3 +1,4 @@
+import type { TermId } from '@/lib/glossary/terms';
 import type { RecordField } from '@/lib/recoveries/fields';
 import {
   APPLIANCE_CATEGORIES,
@@ -63,6 +64,21 @@ export const FORM_PARTS: readonly { title: string; fields: readonly RecordField[
   { title: 'Vacuum and hold', fields: ['finalVacuum', 'vacuumUnit', 'holdMinutes', 'holdRise'] },
   { title: 'Afterwards', fields: ['disposition', 'technicianCertification', 'manufacturedOn', 'notes'] },
 ];
+
+/** Fields whose word is explained in the glossary. */
+export const FIELD_TERMS: Partial<Record<RecordField, TermId>> = {
+  jobType: 'job-type',
+  category: 'appliance-category',
+  nameplateCharge: 'nameplate-charge',
+  addedCharge: 'added-charge',
+  cylinder: 'cylinder',
+  recoveredMass: 'recovered-mass',
+  finalVacuum: 'final-vacuum',
+  holdMinutes: 'hold',
+  holdRise: 'hold-rise',
+  disposition: 'disposition',
+  technicianCertification: 'technician-certification',
+};
 
 export const HINTS: Partial<Record<RecordField, string>> = {
   recordRef: 'The number on the ticket',

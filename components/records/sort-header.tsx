@@ -1,6 +1,7 @@
 import { readSort, type Sort } from '@/analytics/records/constants';
+import { Term } from '@/components/glossary/term';
 import { Th } from '@/components/ui/table';
-import type { ColumnId } from './column-list';
+import { COLUMN_TERMS, type ColumnId } from './column-list';
 import { NUMERIC_COLUMNS } from './columns';
 
 type SortHeaderProps = { id: ColumnId; sort: Sort; onSort: (sort: Sort) => void; children: string };
@@ -11,6 +12,7 @@ export const SortHeader = ({ id, sort, onSort, children }: SortHeaderProps) => {
   const sorted = key === id;
   const numeric = NUMERIC_COLUMNS.has(id);
   const startsDown = numeric || id === 'recoveredOn';
+  const term = COLUMN_TERMS[id];
   const next: Sort = (sorted ? !descending : startsDown) ? `-${id}` : id;
   return (
     <Th
@@ -29,6 +31,7 @@ export const SortHeader = ({ id, sort, onSort, children }: SortHeaderProps) => {
           {sorted && !descending ? '↑' : '↓'}
         </span>
       </button>
+      {term ? <Term id={term} /> : null}
     </Th>
   );
 };

@@ -5,8 +5,10 @@ import type { MonthFigures, Start } from '@/analytics/start/contract';
 import { wholeScope } from '@/analytics/start/sentence';
 import { FigureLink } from '@/components/figures/figure-link';
 import { formatCo2e } from '@/components/figures/wording';
+import { Term } from '@/components/glossary/term';
 import { Ticket, type TicketRow } from '@/components/ui/ticket';
 import { formatCount, formatMass, formatMonth, formatPercent } from '@/lib/format';
+import type { TermId } from '@/lib/glossary/terms';
 import type { DisplayUnit } from '@/lib/vocabulary';
 
 type MonthBesideProps = {
@@ -17,22 +19,28 @@ type MonthBesideProps = {
   className?: string;
 };
 
-type Line = { label: string; measure: Measure; text: (month: MonthFigures) => string };
+type Line = { label: string; term?: TermId; measure: Measure; text: (month: MonthFigures) => string };
 
 const share = (value: number | null, digits: number): string => (value === null ? '—' : formatPercent(value, digits));
 const part = (count: number, of: number): string => share(of > 0 ? count / of : null, 0);
 
 const LINES: readonly Line[] = [
   { label: 'Recoveries', measure: 'recoveries', text: ({ recoveries }) => formatCount(recoveries) },
-  { label: 'Total yield', measure: 'totalYield', text: ({ totalYield }) => share(totalYield, 1) },
-  { label: 'Median yield', measure: 'medianYield', text: ({ medianYield }) => share(medianYield, 0) },
-  { label: 'Held', measure: 'heldShare', text: ({ held, holdStated }) => part(held, holdStated) },
+  { label: 'Total yield', term: 'total-yield', measure: 'totalYield', text: ({ totalYield }) => share(totalYield, 1) },
+  {
+    label: 'Median yield',
+    term: 'median-yield',
+    measure: 'medianYield',
+    text: ({ medianYield }) => share(medianYield, 0),
+  },
+  { label: 'Held', term: 'hold', measure: 'heldShare', text: ({ held, holdStated }) => part(held, holdStated) },
   {
     label: 'Down to level',
+    term: 'down-to-level',
     measure: 'downToLevelShare',
     text: ({ downToLevel, vacuumStated }) => part(downToLevel, vacuumStated),
   },
-  { label: 'Kept from the air, CO₂e', measure: 'co2e', text: ({ co2e }) => formatCo2e(co2e) },
+  { label: 'CO₂-equivalent', term: 'co2-equivalent', measure: 'co2e', text: ({ co2e }) => formatCo2e(co2e) },
 ];
 
 /** The latest month as a weigh ticket, each figure with the same of a year before under it; all of them open. */
@@ -45,8 +53,8 @@ export const MonthBeside = ({ latest, unit, own, className }: MonthBesideProps) 
     </FigureLink>
   );
   const rows = LINES.map(
-    ({ label, measure, text }): TicketRow => ({
-      label,
+    ({ label, term, measure, text }): TicketRow => ({
+      label: term ? <Term id={term}>{label}</Term> : label,
       value: opens(month, measure, text(now)),
       small: yearBefore ? <>a year before {opens(before, measure, text(yearBefore))}</> : undefined,
     }),

@@ -5,6 +5,7 @@ import { startAnswer } from '@/analytics/start/sentence';
 import { FigurePage } from '@/components/figures/figure-page';
 import { FigureSentence } from '@/components/figures/figure-sentence';
 import { useScope } from '@/components/scope/use-scope';
+import { LinkButton } from '@/components/ui/button';
 import { PageHead } from '@/components/ui/page-head';
 import { Failed, Loading } from '@/components/ui/states';
 import { useViewer } from '@/components/viewer-context';
@@ -13,6 +14,16 @@ import { FirstSteps } from './first-steps';
 import { MonthBeside } from './month-beside';
 import { WaitingList } from './waiting-list';
 import { WhatChanged } from './what-changed';
+
+/** What a technician comes for. */
+const OwnVerbs = () => (
+  <>
+    <LinkButton tone="primary" href="/records/new">
+      New record
+    </LinkButton>
+    <LinkButton href="/records">Your records</LinkButton>
+  </>
+);
 
 /** The first page of the day: the answer of the role, what waits, what changed. */
 export const StartScreen = () => {
@@ -33,7 +44,11 @@ export const StartScreen = () => {
       {answer && data.latest ? (
         <div className="grid gap-x-12 gap-y-8 lg:grid-cols-[minmax(0,1fr)_20rem]">
           <div className="flex min-w-0 flex-col gap-8">
-            <PageHead title={<FigureSentence {...answer} />} sub={answer.sub || undefined} />
+            <PageHead
+              title={<FigureSentence {...answer} />}
+              sub={answer.sub || undefined}
+              actions={role === 'technician' ? <OwnVerbs /> : undefined}
+            />
             <WaitingList items={data.waiting} />
             <WhatChanged start={data} unit={unit} />
           </div>

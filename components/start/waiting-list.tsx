@@ -12,8 +12,8 @@ export const WaitingList = ({ items }: { items: readonly WaitingItem[] }) => (
       <ul>
         {items.map(({ kind, count, what, why, verb, href }) => (
           <li key={kind} className="flex items-baseline gap-x-4 border-b border-rule py-4 sm:gap-x-6">
-            <span className="w-16 shrink-0 text-right font-mono text-xl font-medium sm:w-20 sm:text-2xl">
-              {formatCount(count)}
+            <span className="w-16 shrink-0 font-mono text-xl font-medium">
+              <span className="marked">{formatCount(count)}</span>
             </span>
             <div className="min-w-0">
               <p className="font-semibold">{what}</p>

@@ -3,7 +3,7 @@ import type { Start } from '@/analytics/start/contract';
 import { certaintyWords, moverNote, periodWords } from '@/analytics/trends-comparison/sentence';
 import { choiceName } from '@/components/scope/wording';
 import { searchString } from '@/lib/api/client';
-import { formatMonth } from '@/lib/format';
+import { formatMassWithUnit, formatMonth } from '@/lib/format';
 import type { DisplayUnit } from '@/lib/vocabulary';
 
 type WhatChangedProps = { start: Start; unit: DisplayUnit };
@@ -13,6 +13,7 @@ export const WhatChanged = ({ start: { comparison, notes, latest }, unit }: What
   if (!latest || (!comparison && !notes.length)) return null;
   const told = comparison
     ? [
+        `${periodWords(comparison.before)} had brought in ${formatMassWithUnit(comparison.before.recoveredMass, unit, 0)}.`,
         moverNote(comparison, 'refrigerant', unit, (key) => choiceName('refrigerant', key)),
         certaintyWords(comparison),
       ].filter(Boolean)

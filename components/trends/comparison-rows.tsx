@@ -2,12 +2,15 @@ import type { ReactNode } from 'react';
 import type { Measure } from '@/analytics/figures/measures';
 import type { Comparison, PeriodFigures } from '@/analytics/trends-comparison/contract';
 import { formatChange, formatCount, formatMass, formatNumber, formatPercent, plural } from '@/lib/format';
+import type { TermId } from '@/lib/glossary/terms';
 import type { DisplayUnit } from '@/lib/vocabulary';
 import { pointsWords } from './wording';
 
 /** One line of the comparison: the figure of each side, how it changed, and what is said in small. */
 export type ComparisonRow = {
   label: ReactNode;
+  /** What the label means, in the glossary. */
+  term?: TermId;
   /** What a side's figure measures, where it opens. */
   measure?: Measure;
   figure: (side: PeriodFigures) => string;
@@ -33,6 +36,7 @@ export const comparisonRows = (
 ): ComparisonRow[] => [
   {
     label: `Recovered mass, ${unit}`,
+    term: 'recovered-mass',
     measure: 'recoveredMass',
     figure: ({ recoveredMass }) => formatMass(recoveredMass, unit, 0),
     change: ratioChange(now.recoveredMass, before.recoveredMass),
@@ -46,18 +50,21 @@ export const comparisonRows = (
   },
   {
     label: 'Total yield',
+    term: 'total-yield',
     measure: 'totalYield',
     figure: ({ totalYield }) => share(totalYield, 1),
     change: pointsChange(now.totalYield, before.totalYield),
   },
   {
     label: 'Median yield',
+    term: 'median-yield',
     measure: 'medianYield',
     figure: ({ medianYield }) => share(medianYield, 1),
     change: pointsChange(now.medianYield, before.medianYield),
   },
   {
     label: 'Held',
+    term: 'hold',
     measure: 'heldShare',
     figure: ({ heldShare }) => share(heldShare),
     small: ({ holdStated }) => `of ${formatCount(holdStated)} that state it`,
@@ -65,6 +72,7 @@ export const comparisonRows = (
   },
   {
     label: 'Down to level',
+    term: 'down-to-level',
     measure: 'downToLevelShare',
     figure: ({ downToLevelShare }) => share(downToLevelShare),
     small: ({ vacuumStated }) => `of ${formatCount(vacuumStated)} that state a vacuum`,
@@ -72,6 +80,7 @@ export const comparisonRows = (
   },
   {
     label: 'Far below like jobs',
+    term: 'far-below-like-jobs',
     figure: ({ flaggedShare }) => share(flaggedShare, 1),
     small: ({ flagged }) => plural(flagged, 'recovery', 'recoveries'),
     change: pointsChange(now.flaggedShare, before.flaggedShare),

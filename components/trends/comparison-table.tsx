@@ -4,6 +4,7 @@ import type { ScopeSelection } from '@/analytics/scope-address';
 import type { Comparison, PeriodFigures } from '@/analytics/trends-comparison/contract';
 import { periodWords } from '@/analytics/trends-comparison/sentence';
 import { FigureLink } from '@/components/figures/figure-link';
+import { Term } from '@/components/glossary/term';
 import { Table, Td, Th } from '@/components/ui/table';
 import { comparisonRows } from './comparison-rows';
 
@@ -45,12 +46,12 @@ export const ComparisonTable = ({ comparison, scope, co2eLabel }: ComparisonTabl
       </thead>
       <tbody>
         {comparisonRows(comparison, scope.unit, co2eLabel).map(
-          ({ label, measure, figure, small, change, changeSmall }, index) => (
+          ({ label, term, measure, figure, small, change, changeSmall }, index) => (
             // Rows are told in a fixed order.
             // biome-ignore lint/suspicious/noArrayIndexKey: labels are nodes, and the order never changes.
             <tr key={index}>
               <Th scope="row" className="align-baseline">
-                {label}
+                {term ? <Term id={term}>{label}</Term> : label}
               </Th>
               {side(now, measure, figure(now), small?.(now))}
               {side(before, measure, figure(before), small?.(before))}

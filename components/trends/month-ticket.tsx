@@ -5,6 +5,7 @@ import { monthsAfter, type StackedMonth } from '@/analytics/monthly-trends/serie
 import type { ScopeSelection } from '@/analytics/scope-address';
 import { FigureLink } from '@/components/figures/figure-link';
 import { formatCo2e } from '@/components/figures/wording';
+import { Term } from '@/components/glossary/term';
 import { Ticket, type TicketRow } from '@/components/ui/ticket';
 import { useMay } from '@/components/viewer-context';
 import { formatCount, formatMass, formatMonth, formatPercent } from '@/lib/format';
@@ -49,23 +50,26 @@ export const MonthTicket = ({ month, months, scope, className }: MonthTicketProp
   const rows: TicketRow[] = [
     { label: 'Recoveries', value: opens('recoveries', formatCount(month.recoveries)) },
     {
-      label: 'Total yield',
+      label: <Term id="total-yield">Total yield</Term>,
       value: opens('totalYield', share(month.totalYield, 1)),
       small: then?.state === 'whole' ? `a year before ${share(then.totalYield, 1)}` : undefined,
     },
-    { label: 'Median yield', value: opens('medianYield', share(month.medianYield, 0)) },
-    { label: 'Held', ...habit(month, then, 'held', 'holdStated', (text) => opens('heldShare', text)) },
+    { label: <Term id="median-yield">Median yield</Term>, value: opens('medianYield', share(month.medianYield, 0)) },
     {
-      label: 'Down to level',
+      label: <Term id="hold">Held</Term>,
+      ...habit(month, then, 'held', 'holdStated', (text) => opens('heldShare', text)),
+    },
+    {
+      label: <Term id="down-to-level">Down to level</Term>,
       ...habit(month, then, 'downToLevel', 'vacuumStated', (text) => opens('downToLevelShare', text)),
     },
     {
-      label: 'Kept from the air',
+      label: <Term id="co2-equivalent">Kept from the air</Term>,
       value: opens('co2e', formatCo2e(month.co2e)),
       small: 'CO₂e, AR4',
     },
     {
-      label: 'Far below like jobs',
+      label: <Term id="far-below-like-jobs">Far below like jobs</Term>,
       value: mayLook ? opens('flagged', flagged) : flagged,
     },
   ];

@@ -13,6 +13,7 @@ import {
 import type { ScopeSelection } from '@/analytics/scope-address';
 import { MonthsFigure } from '@/components/charts/months-figure';
 import { useSeen } from '@/components/charts/use-seen';
+import { Term } from '@/components/glossary/term';
 import { Sheet } from '@/components/ui/sheet';
 import { Loading } from '@/components/ui/states';
 import { formatMass, formatMassWithUnit, formatMonth } from '@/lib/format';
@@ -71,7 +72,12 @@ const SeasonFigure = ({ pattern, scope }: { pattern: ShownPattern; scope: ScopeS
           return month ? inWords(month, scope.unit) : '';
         }}
         figureOf={(month) => ({ measure: 'routineMass', scope: { ...scope, from: month, to: month } })}
-        legend={<p className="mt-2 text-sm text-ink-2">Points: recovered. Line: trend. Band: usual.</p>}
+        legend={
+          <p className="mt-2 text-sm text-ink-2">
+            Points: recovered in <Term id="routine-jobs">routine jobs</Term>. Line: <Term id="season">trend</Term>.
+            Band: <Term id="control-limits">usual</Term>.
+          </p>
+        }
         draw={({ months: shown, ...canvas }) =>
           seen ? <SeasonMonths {...canvas} months={drawn.slice(-shown.length)} /> : null
         }

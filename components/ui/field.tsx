@@ -9,6 +9,8 @@ const FieldContext = createContext<FieldIds | null>(null);
 type FieldProps = {
   label: ReactNode;
   hint?: ReactNode;
+  /** Stands beside the label without being part of it: what its word means. */
+  aside?: ReactNode;
   error?: ReactNode;
   required?: boolean;
   /** Keeps the label for screen readers only, where a heading already says it. */
@@ -18,15 +20,27 @@ type FieldProps = {
 };
 
 /** A label, one control, a hint and what is wrong with what was typed, tied together for every reader. */
-export const Field = ({ label, hint, error, required = false, labelHidden, className, children }: FieldProps) => {
+export const Field = ({
+  label,
+  hint,
+  aside,
+  error,
+  required = false,
+  labelHidden,
+  className,
+  children,
+}: FieldProps) => {
   const id = useId();
   const describedBy = [hint ? `${id}-hint` : '', error ? `${id}-error` : ''].filter(Boolean).join(' ') || undefined;
   return (
     <FieldContext value={{ id, describedBy, invalid: Boolean(error), required }}>
       <div className={clsx('flex min-w-0 flex-col gap-1', className)}>
-        <label htmlFor={id} className={labelHidden ? 'sr-only' : 'font-medium'}>
-          {label}
-        </label>
+        <div className={labelHidden ? 'sr-only' : 'flex items-center gap-1'}>
+          <label htmlFor={id} className="font-medium">
+            {label}
+          </label>
+          {aside}
+        </div>
         {hint ? (
           <p id={`${id}-hint`} className="text-sm text-ink-2">
             {hint}

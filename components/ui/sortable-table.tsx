@@ -11,7 +11,7 @@ import {
   tableFeatures,
   useTable,
 } from '@tanstack/react-table';
-import { useState } from 'react';
+import { type ReactNode, useState } from 'react';
 import { formatCount } from '@/lib/format';
 import { TextButton } from './button';
 import { Table, Td, Th } from './table';
@@ -20,6 +20,8 @@ type ColumnLook = {
   numeric?: boolean;
   /** Names the row for who cannot see the table; one column of a table has it. */
   rowHeader?: boolean;
+  /** Stands beside the heading: what its word means. */
+  aside?: ReactNode;
 };
 
 const features = tableFeatures({
@@ -81,6 +83,7 @@ export const SortableTable = <Row extends RowData>({ label, columns, data, rowId
                       </span>
                       <table.FlexRender header={header} />
                     </button>
+                    {header.column.columnDef.meta?.aside}
                   </Th>
                 );
               })}

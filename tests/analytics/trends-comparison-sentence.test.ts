@@ -83,7 +83,7 @@ test.each([
 describe('says how far a change can be believed', () => {
   test('not at all clear', () => {
     expect(certaintyWords(comparison(112, 100))).toBe(
-      'Jobs differ much in size: it may lie between 23% less and 64% more, which is no clear change.',
+      'Jobs differ much in size: the change may lie between 23% less and 64% more, which is no clear change.',
     );
     const few = { ...comparison(112, 100), before: side('2025-01-01', '2025-12-09', 100, 29) };
     expect(certaintyWords(few)).toMatch(/^So few jobs say little: /);
