@@ -1,10 +1,12 @@
 'use client';
 
+import Link from 'next/link';
 import { signOut } from 'next-auth/react';
 import { useTransition } from 'react';
-import { Button } from '@/components/ui/button';
+import { Button, TextButton } from '@/components/ui/button';
 import { useViewer } from '@/components/viewer-context';
 import { ROLE_NAMES } from '@/lib/wording';
+import { useKeySheet } from './key-sheet';
 import { ThemeChoice } from './theme-choice';
 
 /** What the shell asks the server to do. */
@@ -13,6 +15,7 @@ export type AccountActions = { switchCompany: (companyId: string) => Promise<boo
 /** Who is signed in, where, and the ways out: another company, another theme, sign out. */
 export const AccountPanel = ({ switchCompany }: AccountActions) => {
   const viewer = useViewer();
+  const askForKeys = useKeySheet();
   const [switching, startSwitch] = useTransition();
   const others = viewer.memberships.filter((membership) => membership.companyId !== viewer.companyId);
   const switchTo = (companyId: string) =>
@@ -39,6 +42,12 @@ export const AccountPanel = ({ switchCompany }: AccountActions) => {
         </div>
       ) : null}
       <ThemeChoice />
+      <p className="flex flex-wrap gap-x-6">
+        <TextButton onClick={askForKeys}>Keys</TextButton>
+        <Link href="/glossary" className="link inline-flex items-center pointer-coarse:min-h-11">
+          Glossary
+        </Link>
+      </p>
       <Button onClick={() => signOut({ callbackUrl: '/sign-in' })}>Sign out</Button>
     </div>
   );

@@ -7,19 +7,21 @@ export type Screen = {
   action: Action;
   /** The scope in the address means something here, so links carry it along. */
   scoped: boolean;
+  /** The key that leads here after `g`. */
+  goKey?: string;
 };
 
 /** All screens in the order in which they are offered. */
 export const SCREENS: readonly Screen[] = [
-  { path: '/', name: 'Today', action: 'records:read', scoped: false },
-  { path: '/trends', name: 'Trends', action: 'trends:read', scoped: true },
-  { path: '/low-recoveries', name: 'Low recoveries', action: 'flags:read', scoped: true },
-  { path: '/technicians', name: 'Technicians', action: 'technicians:read', scoped: true },
-  { path: '/sites', name: 'Sites', action: 'sites:read', scoped: true },
-  { path: '/appliances', name: 'Appliances', action: 'appliances:read', scoped: true },
-  { path: '/records', name: 'Records', action: 'records:read', scoped: true },
-  { path: '/imports', name: 'Imports', action: 'imports:manage', scoped: false },
-  { path: '/settings', name: 'Settings', action: 'company:manage', scoped: false },
+  { path: '/', name: 'Today', action: 'records:read', scoped: false, goKey: 'd' },
+  { path: '/trends', name: 'Trends', action: 'trends:read', scoped: true, goKey: 't' },
+  { path: '/low-recoveries', name: 'Low recoveries', action: 'flags:read', scoped: true, goKey: 'l' },
+  { path: '/technicians', name: 'Technicians', action: 'technicians:read', scoped: true, goKey: 'c' },
+  { path: '/sites', name: 'Sites', action: 'sites:read', scoped: true, goKey: 's' },
+  { path: '/appliances', name: 'Appliances', action: 'appliances:read', scoped: true, goKey: 'a' },
+  { path: '/records', name: 'Records', action: 'records:read', scoped: true, goKey: 'r' },
+  { path: '/imports', name: 'Imports', action: 'imports:manage', scoped: false, goKey: 'i' },
+  { path: '/settings', name: 'Settings', action: 'company:manage', scoped: false, goKey: 'e' },
 ];
 
 /** The screens that somebody with these actions may open. */

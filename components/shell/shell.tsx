@@ -3,6 +3,8 @@ import type { ReactNode } from 'react';
 import { AccountMenu } from './account-menu';
 import type { AccountActions } from './account-panel';
 import { BottomBar } from './bottom-bar';
+import { Foot } from './foot';
+import { KeySheet } from './key-sheet';
 import { MainNavigation } from './main-navigation';
 import { Wordmark } from './mark';
 
@@ -10,7 +12,7 @@ type ShellProps = AccountActions & { companyName: string; children: ReactNode };
 
 /** The frame of every signed-in screen: yellow shoulder, grey body, the screens, who is here. */
 export const Shell = ({ companyName, switchCompany, children }: ShellProps) => (
-  <>
+  <KeySheet>
     <a
       href="#main"
       className="absolute top-2 left-2 z-50 -translate-y-20 bg-sheet px-4 py-3 font-medium text-ink focus:translate-y-0"
@@ -29,13 +31,10 @@ export const Shell = ({ companyName, switchCompany, children }: ShellProps) => (
         </div>
       </div>
     </header>
-    <main
-      id="main"
-      tabIndex={-1}
-      className="mx-auto max-w-page px-4 pt-4 pb-28 outline-none sm:px-8 lg:pb-16 print:p-0"
-    >
+    <main id="main" tabIndex={-1} className="mx-auto max-w-page px-4 pt-4 pb-12 outline-none sm:px-8 print:p-0">
       {children}
     </main>
+    <Foot />
     <BottomBar switchCompany={switchCompany} />
-  </>
+  </KeySheet>
 );
