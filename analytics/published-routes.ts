@@ -10,6 +10,7 @@ import { monthlyPattern } from './monthly-pattern/contract';
 import { monthlyTrends } from './monthly-trends/contract';
 import { notesList } from './notes/contract';
 import { recordHistorySchema, recordListContract, recordSchema } from './records/contract';
+import { cylinderContentContract } from './records/cylinder-content-contract';
 import { knownNamesContract } from './records/known-names-contract';
 import { scopeOptions } from './scope-options/contract';
 import { siteRecoveries } from './sites/contract';
@@ -37,6 +38,7 @@ export const PUBLISHED_ROUTES: readonly PublishedRoute[] = [
   published(lowRecoveriesList, 'Recoveries far below like jobs'),
   published(recordListContract, 'Records, page by page; with format=csv all of them as a recovery file'),
   published(knownNamesContract, 'Names that a new record can use'),
+  published(cylinderContentContract, 'What a cylinder holds, as far as the records tell'),
   published(scopeOptions, 'What a scope can be narrowed to'),
   published(coachingList, 'Coachings of technicians'),
   published(notesList, 'Notes pinned to days'),

@@ -4,6 +4,7 @@ import type { ScopeQuery } from '@/analytics/scope-address';
 import { apiFetch, searchString } from '@/lib/api/client';
 import type { Exclusion, Sort } from './constants';
 import type { RecordList } from './contract';
+import type { CylinderContent } from './cylinder-content-contract';
 import type { KnownNames } from './known-names-contract';
 
 // The contracts' paths as text: importing a contract would bring zod into the browser.
@@ -50,4 +51,13 @@ export const useKnownNames = (site: string) =>
     queryFn: ({ signal }) => apiFetch<KnownNames>(`${PATH}/names${searchString({ site })}`, { signal }),
     staleTime: FIVE_MINUTES,
     placeholderData: keepPreviousData,
+  });
+
+/** What a cylinder holds, as far as the records tell; null asks nothing. */
+export const useCylinderContent = (name: string | null) =>
+  useQuery({
+    queryKey: ['cylinder-content', name] as const,
+    queryFn: ({ signal }) =>
+      apiFetch<CylinderContent>(`${PATH}/cylinder${searchString({ name: name ?? '' })}`, { signal }),
+    enabled: name !== null,
   });

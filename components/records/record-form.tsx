@@ -8,6 +8,7 @@ import { Button, TextButton } from '@/components/ui/button';
 import { useViewer } from '@/components/viewer-context';
 import type { RecordField, RecordTexts } from '@/lib/recoveries/fields';
 import { Cautions } from './cautions';
+import { CylinderCaution } from './cylinder-caution';
 import { FaultSummary } from './fault-summary';
 import { withApplianceFilledIn } from './fill-in';
 import { LiveYieldLine } from './live-yield';
@@ -64,7 +65,12 @@ export const RecordForm = ({ empty, ownName }: RecordFormProps) => {
         ownName={ownName}
         before={{
           'The scale': <Cautions />,
-          'Vacuum and hold': <LiveYieldLine texts={texts} unit={viewer.massUnit} />,
+          'Vacuum and hold': (
+            <>
+              <CylinderCaution texts={texts} known={names?.cylinders ?? []} />
+              <LiveYieldLine texts={texts} unit={viewer.massUnit} />
+            </>
+          ),
         }}
       />
       <NewNames texts={texts} fields={unknown} confirmed={confirmed} onConfirm={setConfirmed} />

@@ -136,6 +136,7 @@ export const ROUTES: Record<string, RouteRule> = {
     colleagues: otherRecoveryId,
     status: 200,
   },
+  'GET /api/recoveries/cylinder': { action: 'records:write', search: '?name=C-1', status: 200 },
   'GET /api/recoveries/names': { action: 'records:write', status: 200 },
   'GET /api/scope-options': {
     action: 'records:read',
