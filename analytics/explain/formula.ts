@@ -20,6 +20,8 @@ const WORDS: Record<Measure, string> = {
   totalYield: 'Total yield = recovered mass ÷ full charge, each added up over all recoveries first.',
   medianYield: 'The yields (recovered mass ÷ full charge) put in order; the median is the one in the middle.',
   co2e: 'The recovered mass of each refrigerant times its global warming potential, added up.',
+  co2eAr6:
+    'The recovered mass of each refrigerant times its global warming potential, added up; refrigerants without one in AR6 count as nothing.',
   appliances: 'The appliances with at least one of these recoveries, counted.',
   flagged:
     'Recoveries whose yield lies below Q1 − 1.5 × (Q3 − Q1) of their like jobs, counted. Q1 and Q3 are the lower and the upper quartile.',
@@ -36,6 +38,7 @@ const SOURCES: Partial<Record<Measure, string>> = {
     '“Full charge” in 40 CFR 82.152; the ratio of the sums, so that a large system weighs more than a small one.',
   medianYield: '“Full charge” in 40 CFR 82.152.',
   co2e: 'Global warming potentials over 100 years of the IPCC’s Fourth Assessment Report (AR4), as in 40 CFR 98, Table A‑1.',
+  co2eAr6: 'Global warming potentials over 100 years of the IPCC’s Sixth Assessment Report (AR6), Table 7.SM.7.',
   downToLevelShare:
     '40 CFR 82.156, Table 1 (machines made since November 15, 1993); small appliances by paragraph (b).',
   flagged: 'J. W. Tukey, Exploratory Data Analysis, Addison-Wesley 1977, chapter 2 (the lower fence).',

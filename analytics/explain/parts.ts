@@ -1,5 +1,5 @@
 import 'server-only';
-import { and, eq, isNull, lt, sql } from 'drizzle-orm';
+import { and, eq, isNotNull, isNull, lt, sql } from 'drizzle-orm';
 import { factFigures, toGram } from '@/analytics/fact-figures';
 import type { Figure } from '@/analytics/figures/figure';
 import { getJudged } from '@/analytics/low-recoveries/query';
@@ -33,19 +33,35 @@ const getMiddleYields = async (tx: Tx, scope: Scope) => {
   return { lower: middle?.lower ?? null, upper: middle?.upper ?? null };
 };
 
-const getGwpTerms = (tx: Tx, scope: Scope) =>
-  tx
+const GWP = {
+  co2e: { potential: refrigerants.gwpAr4, co2eKg: f.co2eKg },
+  co2eAr6: { potential: refrigerants.gwpAr6, co2eKg: f.co2eAr6Kg },
+} as const;
+
+/** What each refrigerant adds to a CO2-equivalent; those without a potential in the report add nothing. */
+const getGwpTerms = (tx: Tx, scope: Scope, measure: keyof typeof GWP) => {
+  const { potential, co2eKg } = GWP[measure];
+  return tx
     .select({
       refrigerant: f.refrigerant,
       recoveredMass: factFigures.recoveredMass,
-      gwp: refrigerants.gwpAr4,
-      co2e: toGram(sql`sum(${f.co2eKg})`),
+      gwp: sql<number>`${potential}`.mapWith(Number),
+      co2e: toGram(sql`sum(${co2eKg})`),
     })
     .from(f)
     .innerJoin(refrigerants, eq(refrigerants.designation, f.refrigerant))
-    .where(and(inScope(scope), isNull(f.exclusion)))
-    .groupBy(f.refrigerant, refrigerants.gwpAr4)
-    .orderBy(sql`sum(${f.co2eKg}) desc, ${f.refrigerant}`);
+    .where(and(inScope(scope), isNull(f.exclusion), isNotNull(potential)))
+    .groupBy(f.refrigerant, potential)
+    .orderBy(sql`sum(${co2eKg}) desc, ${f.refrigerant}`);
+};
+
+const getCo2eAr6 = async (tx: Tx, scope: Scope): Promise<number> => {
+  const [row] = await tx
+    .select({ co2e: toGram(sql`coalesce(sum(${f.co2eAr6Kg}), 0)`) })
+    .from(f)
+    .where(and(inScope(scope), isNull(f.exclusion)));
+  return row?.co2e ?? 0;
+};
 
 const getAppliances = async (tx: Tx, scope: Scope): Promise<number> => {
   const [row] = await tx
@@ -98,7 +114,11 @@ export const computeMeasure = async (
     case 'medianYield':
       return { value: medianYield, parts: { kind: 'median', recoveries, ...(await getMiddleYields(tx, scope)) } };
     case 'co2e':
-      return { value: co2e, parts: { kind: 'gwp', refrigerants: await getGwpTerms(tx, scope) } };
+      return { value: co2e, parts: { kind: 'gwp', refrigerants: await getGwpTerms(tx, scope, measure) } };
+    case 'co2eAr6': {
+      const terms = await getGwpTerms(tx, scope, measure);
+      return { value: await getCo2eAr6(tx, scope), parts: { kind: 'gwp', refrigerants: terms } };
+    }
     case 'routineMass':
       return getRoutine(tx, scope);
     case 'heldShare':

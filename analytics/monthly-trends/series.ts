@@ -1,5 +1,5 @@
 import { monthsBefore } from '@/analytics/scope-address';
-import type { MonthFigures, MonthlyTrends } from './contract';
+import type { EarlierMonth, MonthFigures, MonthlyTrends } from './contract';
 
 /** As many keys as a stack tells apart; the smaller ones are asked for together. */
 export const MOST_KEYS = 7;
@@ -88,6 +88,22 @@ export const toStacks = ({ rows, otherKeys, months, partialMonth, cutMonths }: M
       layers: Object.fromEntries(layers.map(({ id }) => [id, masses.get(month)?.[id] ?? 0])),
     })),
   };
+};
+
+/** What a month can be compared with. */
+export type ComparedMonth = Omit<EarlierMonth, 'medianYield' | 'totalYield'> & {
+  medianYield: number | null;
+  totalYield: number | null;
+};
+
+/** The whole month a year before another one, of the scope or of before it; undefined where nothing is recorded of it. */
+export const yearBeforeOf = (
+  month: string,
+  { months, earlier }: { months: readonly StackedMonth[]; earlier: readonly EarlierMonth[] },
+): ComparedMonth | undefined => {
+  const then = monthsAfter(month, -12);
+  const outside = earlier.find((other) => other.month === then);
+  return outside ?? months.find((other) => other.month === then && other.state === 'whole' && other.recoveries > 0);
 };
 
 /** The latest month that is neither running nor cut; undefined when there is none. */

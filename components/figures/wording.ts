@@ -13,6 +13,7 @@ export const MEASURE_NAMES: Record<Measure, string> = {
   totalYield: 'Total yield',
   medianYield: 'Median yield',
   co2e: 'CO₂-equivalent kept from the air',
+  co2eAr6: 'CO₂-equivalent kept from the air, by AR6',
   appliances: 'Appliances',
   flagged: 'Far below like jobs',
   judged: 'Judged by like jobs',
@@ -37,6 +38,7 @@ export const formatMeasure = (measure: Measure, value: number | null, unit: Disp
     case 'routineMass':
       return formatMassWithUnit(value, unit);
     case 'co2e':
+    case 'co2eAr6':
       return formatCo2e(value);
     case 'totalYield':
     case 'medianYield':

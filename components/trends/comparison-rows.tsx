@@ -1,7 +1,7 @@
 import type { ReactNode } from 'react';
 import type { Measure } from '@/analytics/figures/measures';
-import type { Comparison, PeriodFigures } from '@/analytics/trends-comparison/contract';
-import { formatChange, formatCount, formatMass, formatNumber, formatPercent, plural } from '@/lib/format';
+import type { Comparison, PeriodFigures, TrendsComparison } from '@/analytics/trends-comparison/contract';
+import { formatChange, formatCount, formatMass, formatNumber, formatPercent } from '@/lib/format';
 import type { TermId } from '@/lib/glossary/terms';
 import type { DisplayUnit } from '@/lib/vocabulary';
 import { pointsWords } from './wording';
@@ -28,11 +28,18 @@ const share = (value: number | null, digits = 0): string => (value === null ? NO
 const pointsChange = (now: number | null, before: number | null): string =>
   now === null || before === null ? NOTHING : pointsWords(now - before);
 
+/** How the figures are read: the unit, whose GWP, and whether like jobs may be looked into. */
+export type ComparisonLook = {
+  unit: DisplayUnit;
+  gwp: TrendsComparison['gwp'];
+  co2eLabel: ReactNode;
+  mayLook: boolean;
+};
+
 /** Every figure of the two periods, in the order in which they are asked for. */
 export const comparisonRows = (
   { now, before, ratio }: Comparison,
-  unit: DisplayUnit,
-  co2eLabel: ReactNode,
+  { unit, gwp, co2eLabel, mayLook }: ComparisonLook,
 ): ComparisonRow[] => [
   {
     label: `Recovered mass, ${unit}`,
@@ -81,12 +88,14 @@ export const comparisonRows = (
   {
     label: 'Far below like jobs',
     term: 'far-below-like-jobs',
-    figure: ({ flaggedShare }) => share(flaggedShare, 1),
-    small: ({ flagged }) => plural(flagged, 'recovery', 'recoveries'),
+    ...(mayLook ? { measure: 'flagged' as const } : {}),
+    figure: ({ flagged }) => formatCount(flagged),
+    small: ({ flaggedShare }) => `${share(flaggedShare, 1)} of the recoveries`,
     change: pointsChange(now.flaggedShare, before.flaggedShare),
   },
   {
     label: co2eLabel,
+    measure: gwp === 'ar4' ? 'co2e' : 'co2eAr6',
     figure: ({ co2e }) => formatNumber(co2e / KG_PER_TONNE, co2e < 100 * KG_PER_TONNE ? 1 : 0),
     small: ({ massWithoutGwp }) =>
       massWithoutGwp > 0 ? `without ${formatMass(massWithoutGwp, unit, 0)} ${unit} of no known GWP` : '',

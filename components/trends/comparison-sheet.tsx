@@ -57,6 +57,7 @@ export const ComparisonSheet = ({ data, error, scope, address, className }: Comp
             <ComparisonTable
               comparison={comparison}
               scope={scope}
+              gwp={data.gwp}
               co2eLabel={
                 <>
                   Kept from the air, t CO₂e

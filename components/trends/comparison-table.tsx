@@ -1,17 +1,24 @@
 import type { ReactNode } from 'react';
 import type { Measure } from '@/analytics/figures/measures';
 import type { ScopeSelection } from '@/analytics/scope-address';
-import type { Comparison, PeriodFigures } from '@/analytics/trends-comparison/contract';
+import type { Comparison, PeriodFigures, TrendsComparison } from '@/analytics/trends-comparison/contract';
 import { periodWords } from '@/analytics/trends-comparison/sentence';
 import { FigureLink } from '@/components/figures/figure-link';
 import { Term } from '@/components/glossary/term';
 import { Table, Td, Th } from '@/components/ui/table';
+import { useMay } from '@/components/viewer-context';
 import { comparisonRows } from './comparison-rows';
 
-type ComparisonTableProps = { comparison: Comparison; scope: ScopeSelection; co2eLabel: ReactNode };
+type ComparisonTableProps = {
+  comparison: Comparison;
+  scope: ScopeSelection;
+  gwp: TrendsComparison['gwp'];
+  co2eLabel: ReactNode;
+};
 
 /** Both periods side by side; every figure opens the records of its days. */
-export const ComparisonTable = ({ comparison, scope, co2eLabel }: ComparisonTableProps) => {
+export const ComparisonTable = ({ comparison, scope, gwp, co2eLabel }: ComparisonTableProps) => {
+  const mayLook = useMay('flags:read');
   const { now, before } = comparison;
   const side = (one: PeriodFigures, measure: Measure | undefined, text: string, small = '') => (
     <Td numeric className="align-baseline">
@@ -45,7 +52,7 @@ export const ComparisonTable = ({ comparison, scope, co2eLabel }: ComparisonTabl
         </tr>
       </thead>
       <tbody>
-        {comparisonRows(comparison, scope.unit, co2eLabel).map(
+        {comparisonRows(comparison, { unit: scope.unit, gwp, co2eLabel, mayLook }).map(
           ({ label, term, measure, figure, small, change, changeSmall }, index) => (
             // Rows are told in a fixed order.
             // biome-ignore lint/suspicious/noArrayIndexKey: labels are nodes, and the order never changes.

@@ -4,7 +4,7 @@ import { clsx } from 'clsx';
 import { useMemo } from 'react';
 import type { Dimension } from '@/analytics/dimensions';
 import type { MonthlyTrends } from '@/analytics/monthly-trends/contract';
-import { lastWholeMonth, toStacks } from '@/analytics/monthly-trends/series';
+import { lastWholeMonth, toStacks, yearBeforeOf } from '@/analytics/monthly-trends/series';
 import type { ScopeSelection } from '@/analytics/scope-address';
 import { modelFile } from '@/components/charts/model-file';
 import { ModelTable } from '@/components/charts/model-table';
@@ -69,7 +69,16 @@ export const TrendsReport = ({ trends, figures, scope, by, onSplit }: TrendsRepo
         notes={notes}
         className="lg:min-h-28 lg:content-start"
       />
-      <MonthTicket month={ticketMonth} months={stacks.months} scope={scope} className="lg:row-span-2 lg:self-start" />
+      <MonthTicket
+        month={ticketMonth}
+        then={
+          ticketMonth.state === 'whole'
+            ? yearBeforeOf(ticketMonth.month, { months: stacks.months, earlier: trends.earlier })
+            : undefined
+        }
+        scope={scope}
+        className="lg:row-span-2 lg:self-start"
+      />
       <MonthsSheet
         stacks={stacks}
         shownBy={shownBy}

@@ -8,7 +8,7 @@ type TicketProps = {
   heading: ReactNode;
   /** Which period, which scope. */
   of?: ReactNode;
-  net?: { figure: ReactNode; unit: ReactNode };
+  net?: { figure: ReactNode; unit: ReactNode; small?: ReactNode };
   rows: readonly TicketRow[];
   className?: string;
 };
@@ -24,6 +24,7 @@ export const Ticket = ({ heading, of, net, rows, className }: TicketProps) => (
         <span className="shrink-0 text-base text-ink-2">{net.unit}</span>
       </p>
     ) : null}
+    {net?.small ? <p className="border-b border-rule-2 py-2 font-mono text-xs text-ink-3">{net.small}</p> : null}
     <dl className={clsx('text-sm', !net && 'mt-3 border-t-2 border-ink')}>
       {rows.map((row, index) => (
         // Rows of a ticket are told in a fixed order.

@@ -6,12 +6,14 @@ import { type Figure, type FigureScope, figureRecords, monthInScope } from '@/an
 import { MEASURES, type Measure } from '@/analytics/figures/measures';
 import type { RecordList, RecordRow } from '@/analytics/records/contract';
 import { EVERY_RECORD, onlyOf, scopeQuery } from '@/analytics/scope-address';
+import type { TrendsComparison } from '@/analytics/trends-comparison/contract';
 import { GET as appliancesRoute } from '@/app/api/appliances/route';
 import { GET as explainRoute } from '@/app/api/explain/route';
 import { GET as lowRoute } from '@/app/api/low-recoveries/route';
 import { GET as recordsRoute } from '@/app/api/recoveries/route';
 import { GET as sitesRoute } from '@/app/api/sites/route';
 import { GET as techniciansRoute } from '@/app/api/technicians/route';
+import { GET as comparisonRoute } from '@/app/api/trends/comparison/route';
 import { GET as trendsRoute } from '@/app/api/trends/monthly/route';
 import { searchString } from '@/lib/api/client';
 import { asRole } from '../support/as-role';
@@ -63,9 +65,12 @@ const byHand = (measure: Measure, rows: RecordRow[], { parts }: Explained): numb
       return middleOf(rows);
     case 'appliances':
       return new Set(rows.map((row) => `${row.site} ${row.appliance}`)).size;
-    case 'co2e': {
+    case 'co2e':
+    case 'co2eAr6': {
       const gwps = new Map(parts.kind === 'gwp' ? parts.refrigerants.map((one) => [one.refrigerant, one.gwp]) : []);
-      return rows.reduce((sum, row) => sum + row.recoveredMass * (gwps.get(row.refrigerant) ?? Number.NaN), 0);
+      // AR4 has a potential for every refrigerant of the records, AR6 not.
+      const missing = measure === 'co2e' ? Number.NaN : 0;
+      return rows.reduce((sum, row) => sum + row.recoveredMass * (gwps.get(row.refrigerant) ?? missing), 0);
     }
     case 'heldShare':
     case 'downToLevelShare':
@@ -78,7 +83,7 @@ const byHand = (measure: Measure, rows: RecordRow[], { parts }: Explained): numb
 
 /** How far two computations of a measure may lie apart: a CO2-equivalent, not exact itself, by the half gram of its rounding. */
 const within = (measure: Measure): number => {
-  if (measure === 'co2e') return 0.000501;
+  if (measure === 'co2e' || measure === 'co2eAr6') return 0.000501;
   return measure === 'totalYield' || measure === 'medianYield' ? 1e-12 : 0;
 };
 const same = (measure: Measure, actual: number | null, expected: number | null, what: string) => {
@@ -151,6 +156,21 @@ const SCREENS: Record<string, Screen> = {
         flagged: row.lowRecoveries,
       }),
     ),
+  comparison: async (scope, by) => {
+    const versus = '2025-01..2025-12';
+    const of = async (gwp: 'ar4' | 'ar6') =>
+      (
+        await ask<TrendsComparison>(
+          comparisonRoute,
+          `/api/trends/comparison${searchString({ ...scopeQuery(scope), by, versus, gwp })}`,
+        )
+      ).comparison;
+    const [ar4, ar6] = [await of('ar4'), await of('ar6')];
+    return [ar4?.now, ar4?.before].flatMap((side, index) => {
+      const other = index === 0 ? ar6?.now : ar6?.before;
+      return side ? [cell({ ...scope, from: side.from, to: side.to }, { ...side, co2eAr6: other?.co2e })] : [];
+    });
+  },
   season: async (scope) => {
     const list = await ask<RecordList>(
       recordsRoute,

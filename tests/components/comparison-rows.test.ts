@@ -1,6 +1,6 @@
 import { expect, test } from 'vitest';
 import type { Comparison, PeriodFigures } from '@/analytics/trends-comparison/contract';
-import { comparisonRows } from '@/components/trends/comparison-rows';
+import { type ComparisonLook, comparisonRows } from '@/components/trends/comparison-rows';
 
 const side = (figures: Partial<PeriodFigures>): PeriodFigures => ({
   from: '2026-01-01',
@@ -36,8 +36,10 @@ const comparison: Comparison = {
   otherKeys: { keys: 0, difference: 0 },
 };
 
+const look: ComparisonLook = { unit: 'lb', gwp: 'ar4', co2eLabel: 'CO2e', mayLook: true };
+
 test('figures are in the viewer’s unit, shares change by points, and what cannot be said is not', () => {
-  const rows = comparisonRows(comparison, 'lb', 'CO2e').map((row) =>
+  const rows = comparisonRows(comparison, look).map((row) =>
     [row.label, row.figure(comparison.now), row.figure(comparison.before), row.change].map((text) =>
       String(text).replaceAll('\u00a0', ' '),
     ),
@@ -50,14 +52,23 @@ test('figures are in the viewer’s unit, shares change by points, and what cann
     ['Median yield', '90.0%', '90.0%', '0.0 points'],
     ['Held', '80%', '75%', '+5.0 points'],
     ['Down to level', '—', '—', '—'],
-    ['Far below like jobs', '3.0%', '3.0%', '0.0 points'],
+    ['Far below like jobs', '3', '3', '0.0 points'],
     ['CO2e', '90.0', '0.0', '—'],
   ]);
 });
 
 test('the range of a change and the mass without a GWP are said in small', () => {
-  const rows = comparisonRows(comparison, 'lb', 'CO2e');
+  const rows = comparisonRows(comparison, look);
   expect(rows[0]?.changeSmall).toBe('likely −10% to +60%');
   expect(rows.at(-1)?.small?.(comparison.now)).toBe('without 10 lb of no known GWP');
   expect(rows.at(-1)?.small?.(comparison.before)).toBe('');
+});
+
+test('every figure opens what it measures, standing among like jobs only for who may look', () => {
+  const opened = (changed: Partial<ComparisonLook>) =>
+    comparisonRows(comparison, { ...look, ...changed }).map(({ measure }) => measure);
+  expect(opened({})).not.toContain(undefined);
+  expect(opened({ mayLook: false }).filter((measure) => measure === undefined)).toHaveLength(1);
+  expect(opened({}).at(-1)).toBe('co2e');
+  expect(opened({ gwp: 'ar6' }).at(-1)).toBe('co2eAr6');
 });
