@@ -23,7 +23,7 @@ export const modelFile = (model: ChartModel): FileTable => {
     ],
     rows: months.map(({ month, stateWord, notes: pinned }, index) => [
       month,
-      stateWord || 'whole',
+      stateWord || model.plainState,
       ...columns.map(({ kind, values }) => {
         const value = values[index] ?? null;
         return value === null || kind !== 'mass' ? value : massCell(value, unit);

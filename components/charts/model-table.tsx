@@ -1,8 +1,9 @@
+import { clsx } from 'clsx';
 import type { ReactNode } from 'react';
 import { FigureLink } from '@/components/figures/figure-link';
 import { NoteNumber } from '@/components/notes/note-number';
 import { Table, Td, Th } from '@/components/ui/table';
-import { formatChange, formatCount, formatMass, formatMonth, formatPercent } from '@/lib/format';
+import { formatChange, formatCount, formatMass, formatMonth, formatNumber, formatPercent } from '@/lib/format';
 import { type ChartColumn, type ChartModel, tableColumns } from './model';
 
 /** A heading with its unit on a line of its own, so that many columns fit. */
@@ -37,6 +38,8 @@ const textOf = (value: number, kind: ChartColumn['kind'], unit: ChartModel['unit
       return formatPercent(value);
     case 'change':
       return formatChange(value);
+    case 'factor':
+      return formatNumber(value, 2);
   }
 };
 
@@ -82,7 +85,11 @@ export const ModelTable = ({ model, label }: { model: ChartModel; label: string 
                   <NoteNumber note={note} />
                 </span>
               ))}
-              {state === 'whole' ? null : <span className="ml-2 bg-sheet-2 px-1.5 py-0.5 text-xs">{stateWord}</span>}
+              {stateWord ? (
+                <span className={clsx('ml-2 px-1.5 py-0.5 text-xs', state === 'whole' ? 'marked' : 'bg-sheet-2')}>
+                  {stateWord}
+                </span>
+              ) : null}
             </Th>
             {columns.map((column) => (
               <Td key={column.key} numeric className={column.key === model.total.key ? 'font-semibold' : undefined}>

@@ -4,15 +4,15 @@ import { kgToUnit } from '@/lib/units';
 import type { DisplayUnit } from '@/lib/vocabulary';
 import type { ChartNote } from './layer';
 
-/** What the values of a column are: kilograms, numbers of things, shares (0.84), or changes (−0.03). */
-export type ColumnKind = 'mass' | 'count' | 'share' | 'change';
+/** What the values of a column are: kilograms, numbers of things, shares (0.84), changes (−0.03), or factors (1.20). */
+export type ColumnKind = 'mass' | 'count' | 'share' | 'change' | 'factor';
 
 /** One value a month; null where there is none to tell. */
 export type ChartColumn = { key: string; label: string; kind: ColumnKind; values: readonly (number | null)[] };
 
 /**
- * A month of the chart: `stateWord` says why it is not to be compared, `words` what it holds, `notes` what is
- * pinned to it.
+ * A month of the chart: `stateWord` says why it is not to be compared or what is special about it, `words` what it
+ * holds, `notes` what is pinned to it.
  */
 export type ModelMonth = {
   month: string;
@@ -32,6 +32,8 @@ export type ChartModel = {
   scopeWords: string;
   unit: DisplayUnit;
   months: readonly ModelMonth[];
+  /** What files call a month of which nothing special is to be said. */
+  plainState: string;
   /** Stacked in the picture, the first at the bottom. */
   series: readonly (ChartColumn & { colour: string })[];
   /** What the series of a month come to. */

@@ -1,8 +1,14 @@
 import { kgToUnit } from '@/lib/units';
 import type { DisplayUnit } from '@/lib/vocabulary';
 
-/** What the cells of a column are: text, `YYYY-MM`, `YYYY-MM-DD`, masses in the table's unit, counts, shares, changes. */
-export type FileColumn = { label: string; kind: 'text' | 'month' | 'day' | 'mass' | 'count' | 'share' | 'change' };
+/**
+ * What the cells of a column are: text, `YYYY-MM`, `YYYY-MM-DD`, masses in the table's unit, counts, shares, changes,
+ * factors.
+ */
+export type FileColumn = {
+  label: string;
+  kind: 'text' | 'month' | 'day' | 'mass' | 'count' | 'share' | 'change' | 'factor';
+};
 export type FileCell = string | number | null;
 
 /** A table as it leaves in a file: finished values, in the unit that its heads name. */

@@ -2,16 +2,19 @@
 
 import { parseAsStringLiteral, useQueryState } from 'nuqs';
 import { useMemo } from 'react';
+import { fetchAllLow } from '@/analytics/low-recoveries/all-pages';
 import { useLowRecoveries } from '@/analytics/low-recoveries/hook';
 import { LOW_ORDERS } from '@/analytics/low-recoveries/orders';
 import { lowAnswer, unjudgedNote } from '@/analytics/low-recoveries/sentence';
 import { scopeQuery } from '@/analytics/scope-address';
 import { FigureSentence } from '@/components/figures/figure-sentence';
+import { FileButtons } from '@/components/files/file-buttons';
 import { ScopedReport } from '@/components/scope/scoped-report';
 import { useScope } from '@/components/scope/use-scope';
 import { Button } from '@/components/ui/button';
 import { PageHead } from '@/components/ui/page-head';
 import { Sheet } from '@/components/ui/sheet';
+import { lowFile } from './low-file';
 import { LowList } from './low-list';
 import { LowRule } from './low-rule';
 import { OrderChoice } from './order-choice';
@@ -47,7 +50,11 @@ export const LowRecoveriesScreen = () => {
               }
             />
             {items.length ? (
-              <Sheet title="To look at" aside={<OrderChoice order={order} onChange={setOrder} />}>
+              <Sheet
+                title="To look at"
+                aside={<OrderChoice order={order} onChange={setOrder} />}
+                tools={<FileButtons makeTable={async () => lowFile(await fetchAllLow(query, order), scope)} />}
+              >
                 <LowList items={items} unit={scope.unit} />
                 {low.hasNextPage ? (
                   <Button className="mt-4 mb-2" disabled={low.isFetchingNextPage} onClick={() => low.fetchNextPage()}>

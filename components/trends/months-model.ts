@@ -63,6 +63,7 @@ export const monthsModel = (
     title: 'Recovered mass by month',
     scopeWords: figureScopePhrase(scope),
     unit: scope.unit,
+    plainState: 'whole',
     months: months.map((month) => ({
       month: month.month,
       state: month.state,
