@@ -5,6 +5,6 @@ export const register = async (): Promise<void> => {
   await refuseStrongRole();
   const { env } = await import('./lib/env');
   if (env().TAREBOOK_WORKER !== 'inside') return;
-  const { startWorker } = await import('./lib/jobs/worker');
-  startWorker();
+  const { startAllWork } = await import('./analytics/tasks');
+  startAllWork();
 };

@@ -4,6 +4,7 @@ import { drizzle, type NodePgDatabase } from 'drizzle-orm/node-postgres';
 import type { PgTransactionConfig } from 'drizzle-orm/pg-core';
 import pg from 'pg';
 import { env } from '@/lib/env';
+import { companies } from './schema/companies';
 
 /** A transaction that already knows whose rows it may see. Only the doors below make one. */
 export type Tx = Parameters<Parameters<NodePgDatabase['transaction']>[0]>[0];
@@ -22,7 +23,8 @@ type Settings = Partial<
     | 'session_hash'
     | 'token_hash'
     | 'link_hash'
-    | 'company_name',
+    | 'company_name'
+    | 'upkeep',
     string
   >
 >;
@@ -90,6 +92,14 @@ export const readCompany = <T>(scope: CompanyScope, work: (tx: Tx) => Promise<T>
 /** The same door for background work, under the job role's longer time limits. */
 export const withCompanyJob = <T>(scope: CompanyScope, work: (tx: Tx) => Promise<T>): Promise<T> =>
   withSettings(companySettings(scope), work, jobPool());
+
+/** The companies there are, for background work that looks after each of them. The job role alone may ask. */
+export const companyIds = (): Promise<string[]> =>
+  withSettings(
+    { upkeep: 'companies' },
+    async (tx) => (await tx.select({ id: companies.id }).from(companies)).map(({ id }) => id),
+    jobPool(),
+  );
 
 /** A person's own rows: sessions, memberships, password. */
 export const withPerson = <T>(personId: string, work: (tx: Tx) => Promise<T>): Promise<T> =>

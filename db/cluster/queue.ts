@@ -18,15 +18,17 @@ export const prepareQueue = async (urls: DatabaseUrls): Promise<void> => {
         if payload->>'companyId' is distinct from nullif(current_setting('app.company_id', true), '') then
           raise exception 'work must belong to the company of the transaction';
         end if;
-        -- One queue a company: its jobs follow one another, other companies do not wait. Every start counts as an
-        -- attempt, also one that a power cut ended; faults of the work itself give up much sooner (lib/jobs/task.ts).
-        perform graphile_worker.add_job(task, payload, queue_name => payload->>'companyId', job_key => key, max_attempts => 25);
+        -- One queue a company for its imports, and one more for each other kind of work: what is in one queue follows one
+        -- another, and nobody waits for another company or at the screen for a renewal. Every start counts as an attempt,
+        -- also one that a power cut ended; faults of the work itself give up much sooner (lib/jobs/task.ts).
+        perform graphile_worker.add_job(task, payload, job_key => key, max_attempts => 25, queue_name =>
+          concat_ws(' ', payload->>'companyId', case when task not in ('take-in-file', 'undo-import') then task end));
       end $$`);
     await job.query(`
       create or replace function work.pending() returns bigint
       language sql stable security definer set search_path = pg_catalog, pg_temp as $$
         select count(*) from graphile_worker.jobs
-        where queue_name = nullif(current_setting('app.company_id', true), '') and attempts < max_attempts
+        where split_part(queue_name, ' ', 1) = nullif(current_setting('app.company_id', true), '') and attempts < max_attempts
       $$`);
     await job.query('revoke all on all functions in schema work from public');
     await job.query(`grant execute on all functions in schema work to ${DATABASE_ROLES.server}`);

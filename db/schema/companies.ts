@@ -1,5 +1,6 @@
 import { sql } from 'drizzle-orm';
 import { jsonb, pgPolicy, pgTable, primaryKey, text, uuid } from 'drizzle-orm/pg-core';
+import { DATABASE_ROLES } from '@/db/cluster/urls';
 import { DISPLAY_UNITS } from '@/lib/vocabulary';
 import { companyId, companyPolicy, createdAt, setting } from './columns';
 
@@ -26,6 +27,12 @@ export const companies = pgTable(
     pgPolicy('of_member', {
       for: 'select',
       using: sql`id in (select m.company_id from memberships m where m.person_id = ${setting('person_id')}::uuid)`,
+    }),
+    // Background work asks at its start which companies there are; requests cannot. A name of a role that does not exist
+    // is only a text that nobody is called.
+    pgPolicy('for_upkeep', {
+      for: 'select',
+      using: sql`${setting('upkeep')} = 'companies' and current_user = ${sql.raw(`'${DATABASE_ROLES.job}'`)}`,
     }),
   ],
 );

@@ -12,6 +12,8 @@ export const flagBaselines = pgTable(
     /** Version and settings of the judging; another one judges everything anew. */
     judging: text('judging').notNull(),
     content: jsonb('content').notNull(),
+    /** Records judged one by one since: many of them move what is usual, and everything is judged anew. */
+    judgedSingly: integer('judged_singly').notNull().default(0),
     madeAt: instant('made_at').notNull().defaultNow(),
   },
   (t) => [primaryKey({ columns: [t.companyId, t.id] }), companyPolicy()],
@@ -33,8 +35,6 @@ export const flagRenewals = pgTable(
     added: integer('added').notNull(),
     changed: integer('changed').notNull(),
     gone: integer('gone').notNull(),
-    /** Records judged singly since everything was judged. */
-    judgedSingly: integer('judged_singly').notNull().default(0),
     renewedAt: instant('renewed_at').notNull().defaultNow(),
   },
   (t) => [primaryKey({ columns: [t.companyId] }), companyPolicy()],

@@ -2,6 +2,7 @@ import 'server-only';
 import type { PoolClient } from 'pg';
 import { withCompanyConnection } from '@/db/pool-client';
 import { unreadable } from '@/lib/errors';
+import { REQUEST_ALL_FLAGS } from '@/lib/flags/request';
 import type { ImportPayload } from '@/lib/jobs/task';
 import { keptFile } from './file-chunks';
 import { type ImportWork, loadImportWork } from './import-work';
@@ -88,6 +89,7 @@ const takeRows = (work: ImportWork, plan: FilePlan): Promise<void> =>
       await write(client, work, plan, stated);
       const { added = 0, updated = 0 } = counts.rows[0] ?? {};
       if (added + updated >= REFRESH_FROM_ROWS) await client.query(REFRESH_STATISTICS);
+      if (added + updated > 0) await client.query(REQUEST_ALL_FLAGS, [scope.companyId]);
     }
     await client.query(FINISH_IMPORT, [...owner, counts.rows[0], summary]);
   });

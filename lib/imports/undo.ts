@@ -6,12 +6,14 @@ import { withCompanyConnection } from '@/db/pool-client';
 import { imports } from '@/db/schema/imports';
 import { scopeOf, type Viewer } from '@/lib/auth/viewer';
 import { AppError, conflict } from '@/lib/errors';
+import { REQUEST_ALL_FLAGS } from '@/lib/flags/request';
 import type { ImportPayload } from '@/lib/jobs/task';
 import { LOCK_IMPORT } from './sql/finish';
 import { FOR_MANY_ROWS, REFRESH_FROM_ROWS, REFRESH_STATISTICS } from './sql/settings';
 import {
   CREATE_TAKEN_ROWS,
   DELETE_ADDED,
+  DELETE_FLAGS,
   DELETE_NAMES,
   FINISH_UNDO,
   KEPT_RECORDS,
@@ -37,11 +39,12 @@ export const undoImport = ({ companyId, importId, actor }: ImportPayload): Promi
     await client.query(CREATE_TAKEN_ROWS, owner);
     await client.query('analyze taken_rows');
     const kept = await client.query<{ recordRef: string; reason: string }>(KEPT_RECORDS, [importId]);
-    for (const statement of [DELETE_ADDED, RESTORE_UPDATED, RENEW_EARLIER_LEDGER])
+    for (const statement of [DELETE_FLAGS, DELETE_ADDED, RESTORE_UPDATED, RENEW_EARLIER_LEDGER])
       await client.query(statement, [companyId]);
     for (const statement of DELETE_NAMES) await client.query(statement, owner);
     const { rows: taken } = await client.query<{ count: number }>('select count(*)::int as count from taken_rows');
     if ((taken[0]?.count ?? 0) >= REFRESH_FROM_ROWS) await client.query(REFRESH_STATISTICS);
+    await client.query(REQUEST_ALL_FLAGS, [companyId]);
     await client.query(FINISH_UNDO, [...owner, JSON.stringify(kept.rows)]);
   });
 

@@ -5,7 +5,7 @@ import { takeIn } from '@/lib/imports/take-in';
 import { failUndo, undoImport } from '@/lib/imports/undo';
 import { importPayload, jobHandler } from './task';
 
-/** All background work by the name under which `work.enqueue` takes it. */
+/** The work on imports, by the name under which `work.enqueue` takes it. */
 export const TASKS: TaskList = {
   'take-in-file': jobHandler({ payload: importPayload, run: takeIn, giveUp: failImport }),
   'undo-import': jobHandler({ payload: importPayload, run: undoImport, giveUp: failUndo }),

@@ -1,6 +1,6 @@
 import 'server-only';
 import { setTimeout as sleep } from 'node:timers/promises';
-import { Logger, type Runner, run } from 'graphile-worker';
+import { Logger, type Runner, run, type TaskList } from 'graphile-worker';
 import { jobPool } from '@/db/client';
 import { log } from '@/lib/log';
 import { freeJobsOfDeadWorkers, type Liveness, openLiveness, shortenWaits } from './liveness';
@@ -21,10 +21,10 @@ const queueLogger = new Logger(() => (level, message) => {
 /** A worker that goes on until it is told to stop. */
 export type RunningWorker = { stop: () => Promise<void> };
 
-const startRunner = (liveness: Liveness): Promise<Runner> =>
+const startRunner = (liveness: Liveness, taskList: TaskList): Promise<Runner> =>
   run({
     pgPool: jobPool(),
-    taskList: TASKS,
+    taskList,
     concurrency: CONCURRENCY,
     pollInterval: 1_000,
     noHandleSignals: true,
@@ -59,10 +59,10 @@ const sweepUntil = async (ended: Promise<unknown>) => {
 };
 
 /** One life of a runner: from a database that answers to one that is gone, or to the wish to stop. */
-const workUntil = async (stopWanted: Promise<void>) => {
+const workUntil = async (stopWanted: Promise<void>, taskList: TaskList) => {
   const liveness = await openLiveness();
   try {
-    const runner = await startRunner(liveness);
+    const runner = await startRunner(liveness, taskList);
     const broken = runner.promise.catch(() => undefined);
     try {
       await sweepUntil(Promise.race([stopWanted, liveness.lost, broken]));
@@ -75,10 +75,10 @@ const workUntil = async (stopWanted: Promise<void>) => {
 };
 
 /**
- * Works the queue until stopped. A restarted database ends the runner; a new one begins as soon as the database
+ * Works the queue until stopped: the given tasks, and leaves others lie. A restarted database ends the runner; a new one begins as soon as the database
  * answers again, and frees what the old one (or a killed process) had locked.
  */
-export const startWorker = (): RunningWorker => {
+export const startWorker = (taskList: TaskList = TASKS): RunningWorker => {
   let stopping = false;
   let wantStop = () => {};
   const stopWanted = new Promise<void>((resolve) => {
@@ -86,7 +86,9 @@ export const startWorker = (): RunningWorker => {
   });
   const work = async () => {
     while (!stopping) {
-      await workUntil(stopWanted).catch((error: unknown) => log.warn({ err: error }, 'the queue is out of reach'));
+      await workUntil(stopWanted, taskList).catch((error: unknown) =>
+        log.warn({ err: error }, 'the queue is out of reach'),
+      );
       if (!stopping) await sleep(TRY_AGAIN_AFTER_MS);
     }
   };

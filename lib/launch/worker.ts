@@ -5,8 +5,8 @@ const main = async () => {
   const database = await openDatabase();
   Object.assign(process.env, serverEnvironment(database, 'http://127.0.0.1:3000'));
   // Loaded only now: the modules of the server read the environment when they load.
-  const { startWorker } = await import('@/lib/jobs/worker');
-  const worker = startWorker();
+  const { startAllWork } = await import('@/analytics/tasks');
+  const worker = startAllWork();
   say('working the queue');
   const stop = async () => {
     await worker.stop();

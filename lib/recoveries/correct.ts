@@ -4,6 +4,7 @@ import { type Tx, withCompany } from '@/db/client';
 import { recoveries } from '@/db/schema/recoveries';
 import { scopeOf, type Viewer } from '@/lib/auth/viewer';
 import { badInput, conflict, notFound } from '@/lib/errors';
+import { requestFlags } from '@/lib/flags/request';
 import { type CorrectionBody, correctedTexts } from './body';
 import { keepCertification } from './certification';
 import { recordColumns } from './columns';
@@ -60,4 +61,5 @@ export const correctRecovery = (viewer: Viewer, id: string, body: CorrectionBody
         .set(recordColumns(read.row, ids))
         .where(and(eq(recoveries.companyId, viewer.companyId), eq(recoveries.id, id))),
     );
+    await requestFlags(tx, viewer.companyId);
   });

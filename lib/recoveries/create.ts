@@ -7,6 +7,7 @@ import { history } from '@/db/schema/history';
 import { recoveries } from '@/db/schema/recoveries';
 import { scopeOf, type Viewer } from '@/lib/auth/viewer';
 import { AppError, badInput } from '@/lib/errors';
+import { requestFlags } from '@/lib/flags/request';
 import type { RecoveryRow } from '@/lib/imports/rows';
 import { newTexts, type RecordBody } from './body';
 import { keepCertification } from './certification';
@@ -83,5 +84,6 @@ export const createRecovery = (
     );
     // Another request with the same key was faster.
     if (written.length === 0) await refuseOtherRecord(tx, id, row);
+    else await requestFlags(tx, viewer.companyId);
     return { id, replayed: written.length === 0 };
   });

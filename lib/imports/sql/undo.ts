@@ -16,6 +16,11 @@ export const KEPT_RECORDS = `
               else 'Somebody changed this record after the import.' end as reason
   from taken_rows where not untouched order by line`;
 
+/** Flags go with their record; all at once here, because the foreign key would look record by record. $1 company. */
+export const DELETE_FLAGS = `
+  delete from flags f using taken_rows t
+  where f.company_id = $1 and f.recovery_id = t.recovery_id and t.outcome = 'added' and t.untouched`;
+
 /** $1 company. */
 export const DELETE_ADDED = `
   delete from recoveries r using taken_rows t

@@ -1,0 +1,25 @@
+import 'server-only';
+import type { TaskList } from 'graphile-worker';
+import { renewalPayload, renewFlags } from '@/analytics/flag-renewal/renew';
+import { requestDueFlags } from '@/analytics/flag-renewal/request-due';
+import { jobHandler } from '@/lib/jobs/task';
+import { TASKS } from '@/lib/jobs/tasks';
+import { type RunningWorker, startWorker } from '@/lib/jobs/worker';
+import { log } from '@/lib/log';
+
+/** All background work, by the name under which `work.enqueue` takes it: imports, and what is computed from records. */
+export const ALL_TASKS: TaskList = {
+  ...TASKS,
+  'renew-flags': jobHandler({
+    payload: renewalPayload,
+    run: renewFlags,
+    // What is due stays noted, so the next change or start takes it up again.
+    giveUp: async ({ companyId }) => log.error({ companyId }, 'the flags were not renewed'),
+  }),
+};
+
+/** Works the queue, all of it, and asks for the work that a new version of the product makes due. */
+export const startAllWork = (): RunningWorker => {
+  requestDueFlags().catch((error: unknown) => log.warn({ err: error }, 'could not ask for the flags that are due'));
+  return startWorker(ALL_TASKS);
+};
