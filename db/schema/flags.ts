@@ -13,7 +13,7 @@ import {
   uuid,
 } from 'drizzle-orm/pg-core';
 import { FLAG_DECISIONS, FLAG_RULES } from '@/lib/vocabulary';
-import { companyId, companyPolicy, createdAt } from './columns';
+import { companyId, companyPolicy, createdAt, massKg } from './columns';
 import { flagBaselines } from './flag-renewal';
 import { recoveries } from './recoveries';
 
@@ -39,6 +39,8 @@ export const flags = pgTable(
     rule: text('rule', { enum: FLAG_RULES }).notNull(),
     /** Probability that the record is bad in this way, 0 to 1. */
     certainty: doublePrecision('certainty').notNull(),
+    /** What like jobs, or the likely meaning of the ticket, would have given; NULL where nothing says so. */
+    expectedMassKg: massKg('expected_mass_kg'),
     /** The numbers that speak for it, by the name the rule gives them. */
     evidence: jsonb('evidence').$type<Record<string, unknown>>().notNull(),
     baselineId: uuid('baseline_id').notNull(),

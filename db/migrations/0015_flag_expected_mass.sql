@@ -1,0 +1,1 @@
+ALTER TABLE "flags" ADD COLUMN "expected_mass_kg" numeric(16, 9);
