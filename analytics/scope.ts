@@ -57,6 +57,9 @@ export type Scope = z.output<typeof scopeSchema>;
 export const isNarrowed = (scope: Scope, besides?: Dimension): boolean =>
   Boolean(scope.except?.length) || SCOPE_PARTS.some((part) => part !== besides && scope[part]?.length);
 
+/** Whether a scope leaves nothing out: every record of every time. */
+export const isWhole = (scope: Scope): boolean => !scope.from && !scope.to && !isNarrowed(scope);
+
 /** First day of an inclusive `from`, `YYYY-MM-DD`. */
 export const firstDay = (from: string): string => (month.test(from) ? `${from}-01` : from);
 

@@ -1,9 +1,10 @@
 import 'server-only';
 import { and, eq, isNull, type SQL, type SQLWrapper, sql } from 'drizzle-orm';
-import { factFigures } from '@/analytics/fact-figures';
+import { factFigures, toGram } from '@/analytics/fact-figures';
 import type { Scope } from '@/analytics/scope';
 import { inScope } from '@/analytics/scope-query';
 import type { Tx } from '@/db/client';
+import type { recoveredBySite, recoveredByTechnician } from '@/db/views/recovered-by-group';
 import { recoveryFacts as f } from '@/db/views/recovery-facts';
 import { lowRecoveries as low } from '@/db/views/yield-limits';
 
@@ -19,6 +20,17 @@ export const groupFigures = {
   firstRecoveredOn: sql<string>`min(${f.recoveredOn})`,
   lastRecoveredOn: sql<string>`max(${f.recoveredOn})`,
 };
+
+/** The same figures of a group over all of its records, out of what stands ready. */
+export const readyFigures = (v: typeof recoveredByTechnician | typeof recoveredBySite) => ({
+  recoveries: v.recoveries,
+  recoveredMass: toGram(v.recoveredMassKg),
+  fullCharge: toGram(v.fullChargeKg),
+  totalYield: v.totalYield,
+  medianYield: v.medianYield,
+  firstRecoveredOn: v.firstRecoveredOn,
+  lastRecoveredOn: v.lastRecoveredOn,
+});
 
 /** The records that groups are made of: those in scope that count. */
 export const countedInScope = (scope: Scope): SQL | undefined => and(inScope(scope), isNull(f.exclusion));

@@ -1,9 +1,10 @@
 import 'server-only';
-import { and, gte, lt, type SQLWrapper, sql } from 'drizzle-orm';
+import { and, gte, isNotNull, lt, type SQLWrapper, sql } from 'drizzle-orm';
 import { factFigures, habitFigures, toGram } from '@/analytics/fact-figures';
-import { dayAfter, firstDay, type Scope } from '@/analytics/scope';
+import { dayAfter, firstDay, isWhole, type Scope } from '@/analytics/scope';
 import { inScope } from '@/analytics/scope-query';
 import type { Tx } from '@/db/client';
+import { middleYields as m } from '@/db/schema/summaries';
 import { monthlyRecoveredMass as v } from '@/db/views/monthly-recovered-mass';
 import { recoveryFacts as f } from '@/db/views/recovery-facts';
 
@@ -25,6 +26,24 @@ export type MonthSums = {
 
 const counted = (column: SQLWrapper) => sql<number>`coalesce(sum(${column}), 0)`.mapWith(Number);
 
+/** The middle of all yields in scope; that of every record stands ready. */
+const medianYieldOf = async (tx: Tx, scope: Scope): Promise<number | null> => {
+  if (!isWhole(scope)) {
+    const [row] = await tx.select({ medianYield: factFigures.medianYield }).from(f).where(inScope(scope));
+    return row?.medianYield ?? null;
+  }
+  const [middle] = await tx.select({ lower: m.lower, upper: m.upper }).from(m);
+  return middle ? middle.lower + 0.5 * (middle.upper - middle.lower) : null;
+};
+
+const countExcluded = async (tx: Tx, scope: Scope): Promise<number> => {
+  const [row] = await tx
+    .select({ excluded: sql<number>`count(*)`.mapWith(Number) })
+    .from(f)
+    .where(and(inScope(scope), isNotNull(f.exclusion)));
+  return row?.excluded ?? 0;
+};
+
 /** Sums out of the months that stand ready; only for whole months narrowed by nothing. */
 export const sumsByMonth = async (tx: Tx, scope: Scope): Promise<MonthSums[]> => {
   const sums = await tx
@@ -32,7 +51,7 @@ export const sumsByMonth = async (tx: Tx, scope: Scope): Promise<MonthSums[]> =>
       month: sql<string | null>`${v.month}`,
       recoveredMass: toGram(sql`coalesce(sum(${v.recoveredMassKg}), 0)`),
       recoveries: counted(v.recoveries),
-      // Of one month there is one median; that of the whole scope needs the records.
+      // Of one month there is one median; that of the whole scope follows below.
       medianYield: sql<number | null>`min(${v.medianYield})`,
       totalYield: sql<number | null>`(sum(${v.recoveredMassKg}) / sum(${v.fullChargeKg}))::double precision`,
       co2e: toGram(sql`coalesce(sum(${v.co2eKg}), 0)`),
@@ -50,13 +69,9 @@ export const sumsByMonth = async (tx: Tx, scope: Scope): Promise<MonthSums[]> =>
     )
     .groupBy(sql`rollup(${v.month})`)
     .orderBy(v.month);
-  const { medianYield, excluded } = factFigures;
-  const [whole] = await tx.select({ medianYield, excluded }).from(f).where(inScope(scope));
-  return sums.map((row) =>
-    row.month === null
-      ? { ...row, medianYield: whole?.medianYield ?? null, excluded: whole?.excluded ?? 0 }
-      : { ...row, excluded: 0 },
-  );
+  const medianYield = await medianYieldOf(tx, scope);
+  const excluded = await countExcluded(tx, scope);
+  return sums.map((row) => (row.month === null ? { ...row, medianYield, excluded } : { ...row, excluded: 0 }));
 };
 
 /** The same sums out of the records themselves, for any scope. */

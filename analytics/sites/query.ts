@@ -1,14 +1,20 @@
 import 'server-only';
 import { sql } from 'drizzle-orm';
-import { byName, countedInScope, countLow, groupFigures } from '@/analytics/grouped-figures/query';
-import type { Scope } from '@/analytics/scope';
+import { byName, countedInScope, countLow, groupFigures, readyFigures } from '@/analytics/grouped-figures/query';
+import { isWhole, type Scope } from '@/analytics/scope';
 import type { Tx } from '@/db/client';
+import { recoveredBySite as ready } from '@/db/views/recovered-by-group';
 import { recoveryFacts as f } from '@/db/views/recovery-facts';
 import type { SiteRecoveries } from './contract';
 
-/** Each site with a record that counts in scope, by name. */
-export const getSiteRecoveries = async (tx: Tx, scope: Scope): Promise<SiteRecoveries> => {
-  const sites = await tx
+const ofEveryRecord = (tx: Tx) =>
+  tx
+    .select({ site: ready.name, siteId: ready.groupId, appliances: ready.appliances, ...readyFigures(ready) })
+    .from(ready)
+    .orderBy(byName(ready.name), ready.groupId);
+
+const inScope = (tx: Tx, scope: Scope) =>
+  tx
     .select({
       site: f.site,
       siteId: f.siteId,
@@ -19,6 +25,10 @@ export const getSiteRecoveries = async (tx: Tx, scope: Scope): Promise<SiteRecov
     .where(countedInScope(scope))
     .groupBy(f.siteId, f.site)
     .orderBy(byName(f.site), f.siteId);
+
+/** Each site with a record that counts in scope, by name. */
+export const getSiteRecoveries = async (tx: Tx, scope: Scope): Promise<SiteRecoveries> => {
+  const sites = await (isWhole(scope) ? ofEveryRecord(tx) : inScope(tx, scope));
   const low = await countLow(tx, scope, f.siteId);
   return { items: sites.map((site) => ({ ...site, lowRecoveries: low.get(site.siteId) ?? 0 })) };
 };

@@ -103,13 +103,13 @@ export const recoveries = pgTable(
     foreignKey({ columns: [t.companyId, t.branchId], foreignColumns: [branches.companyId, branches.id] }),
     foreignKey({ columns: [t.companyId, t.cylinderId], foreignColumns: [cylinders.companyId, cylinders.id] }),
     index('recoveries_by_date').on(t.companyId, t.recoveredOn, t.id),
-    index('recoveries_by_technician').on(t.companyId, t.technicianId, t.recoveredOn),
-    index('recoveries_by_site').on(t.companyId, t.siteId, t.recoveredOn),
     index('recoveries_by_appliance').on(t.companyId, t.applianceId, t.recoveredOn),
     index('recoveries_by_cylinder').on(t.companyId, t.cylinderId),
     index('recoveries_by_import').on(t.companyId, t.importId),
-    // The covering indexes of the monthly views (recoveries_by_month) and of the like jobs (recoveries_by_kind) stand in
-    // the migrations: Drizzle 0.45 cannot write INCLUDE.
+    index('recoveries_by_yield').on(t.companyId, t.recoveryYield).where(sql`exclusion is null`),
+    index('recoveries_left_out').on(t.companyId, t.recoveredOn).where(sql`exclusion is not null`),
+    // The covering indexes of what is kept ready (recoveries_by_month, recoveries_by_technician, recoveries_by_site) and
+    // of the like jobs (recoveries_by_kind) stand in the migrations: Drizzle 0.45 cannot write INCLUDE.
     check('recoveries_masses', sql`nameplate_charge_kg > 0 and added_charge_kg >= 0 and recovered_mass_kg >= 0`),
     companyPolicy(),
     pgPolicy('of_technician', { as: 'restrictive', for: 'all', using: ofTechnician, withCheck: ofTechnician }),

@@ -11,6 +11,9 @@ const TABLES = [
   'technician_certifications',
   'import_mappings',
   'monthly_summary',
+  'group_summary',
+  'like_jobs',
+  'middle_yields',
 ] as const;
 
 /**
