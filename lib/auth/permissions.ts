@@ -15,6 +15,8 @@ export const ACTIONS = [
   'notes:write',
   'coaching:read',
   'coaching:write',
+  'leaks:read',
+  'leaks:write',
   'company:manage',
 ] as const;
 export type Action = (typeof ACTIONS)[number];
@@ -39,6 +41,8 @@ export const PERMISSIONS: Record<Role, readonly Action[]> = {
     'notes:write',
     'coaching:read',
     'coaching:write',
+    'leaks:read',
+    'leaks:write',
   ],
   trainer: [
     'trends:read',
@@ -52,6 +56,7 @@ export const PERMISSIONS: Record<Role, readonly Action[]> = {
     'notes:write',
     'coaching:read',
     'coaching:write',
+    'leaks:read',
   ],
   technician: ['records:read', 'records:write', 'records:export', 'coaching:read'],
   office: [
@@ -63,8 +68,10 @@ export const PERMISSIONS: Record<Role, readonly Action[]> = {
     'records:export',
     'imports:manage',
     'notes:read',
+    'leaks:read',
+    'leaks:write',
   ],
-  auditor: ['records:read', 'records:export'],
+  auditor: ['records:read', 'records:export', 'leaks:read'],
 };
 
 /** Whether a role includes an action. */
