@@ -1,10 +1,13 @@
 import { z } from 'zod';
 import type { Contract } from '@/lib/api/contract';
 import type { PublishedRoute } from '@/lib/api/openapi';
+import { additionImportListSchema } from '@/lib/charge-additions/file/contract';
 import { importListSchema, importSchema } from '@/lib/imports/contract';
 import { applianceRecoveries } from './appliances/contract';
+import { additionChanges, additionsList } from './charge-additions/contract';
 import { coachingList } from './coaching/contract';
 import { explain } from './explain/contract';
+import { applianceLeaksSchema, siteLeaksSchema } from './leak-rate/contract';
 import { lowRecoveriesList } from './low-recoveries/contract';
 import { monthlyPattern } from './monthly-pattern/contract';
 import { monthlyTrends } from './monthly-trends/contract';
@@ -42,6 +45,26 @@ export const PUBLISHED_ROUTES: readonly PublishedRoute[] = [
   published(scopeOptions, 'What a scope can be narrowed to'),
   published(coachingList, 'Coachings of technicians'),
   published(notesList, 'Notes pinned to days'),
+  published(additionsList, 'Refrigerant put into appliances'),
+  published(additionChanges, 'Every change of the additions of an appliance'),
+  {
+    path: '/api/charge-additions/imports',
+    summary: 'Files of charge additions that were taken in',
+    action: 'leaks:read',
+    answer: additionImportListSchema,
+  },
+  {
+    path: '/api/appliances/{id}/leaks',
+    summary: 'Additions, leak rates and suspicion of an appliance',
+    action: 'leaks:read',
+    answer: applianceLeaksSchema,
+  },
+  {
+    path: '/api/sites/{id}/leaks',
+    summary: 'Leak rate method of a site, and its appliances',
+    action: 'leaks:read',
+    answer: siteLeaksSchema,
+  },
   {
     path: '/api/recoveries/{id}',
     summary: 'One record',

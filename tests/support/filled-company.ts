@@ -33,7 +33,7 @@ const ids = () => ({
   coachingId: randomUUID(),
   otherCoachingId: randomUUID(),
   additionId: randomUUID(),
-  additionImportId: randomUUID(),
+  undoneAdditionImportId: randomUUID(),
   otherRecoveryId: randomUUID(),
 });
 type Ids = ReturnType<typeof ids>;
@@ -112,13 +112,14 @@ const fillCoaching = (tx: Tx, companyId: string, label: string, id: Ids) => {
 const fillAdditions = async (tx: Tx, companyId: string, label: string, id: Ids, massKg: string): Promise<void> => {
   await tx.insert(additionImports).values({
     companyId,
-    id: id.additionImportId,
+    id: id.undoneAdditionImportId,
     fileName: `${label}.csv`,
     fileSha256: label,
     ...{ rowsRead: 1, added: 0, updated: 0, unchanged: 0, rejected: 1 },
     refused: [],
     ledger: [],
     createdBy: 'test',
+    undoneAt: '2025-05-01T12:00:00Z',
   });
   await tx.insert(chargeAdditions).values({
     companyId,

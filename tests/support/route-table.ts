@@ -31,6 +31,14 @@ const recoveryFile = () => {
   return { body: form };
 };
 
+const additionFile = () => {
+  const form = new FormData();
+  const text = 'addition_ref,added_on,site,appliance,added_charge,mass_unit\nA-1,2025-01-02,Nowhere,RTU-1,5.0,lb\n';
+  form.set('file', new File([text], 'additions.csv', { type: 'text/csv' }));
+  form.set('dryRun', 'true');
+  return { body: form };
+};
+
 const takenRecord = ({ label }: FilledCompany) =>
   asJson({
     recordRef: `${label}-0`,
@@ -47,6 +55,9 @@ const recoveryId = ({ ids }: FilledCompany) => ids.recoveryId;
 const otherRecoveryId = ({ ids }: FilledCompany) => ids.otherRecoveryId;
 const noteId = ({ ids }: FilledCompany) => ids.noteId;
 const coachingId = ({ ids }: FilledCompany) => ids.coachingId;
+const additionId = ({ ids }: FilledCompany) => ids.additionId;
+const applianceId = ({ ids }: FilledCompany) => ids.applianceId;
+const siteId = ({ ids }: FilledCompany) => ids.siteId;
 const importId = ({ ids }: FilledCompany) => ids.importId;
 const sumOf = (items: { recoveries: number }[]) => items.reduce((sum, { recoveries }) => sum + recoveries, 0);
 
@@ -55,6 +66,53 @@ const sumOf = (items: { recoveries: number }[]) => items.reduce((sum, { recoveri
  * comes back.
  */
 export const ROUTES: Record<string, RouteRule> = {
+  'GET /api/appliances/[id]/leaks': { action: 'leaks:read', id: applianceId, status: 200 },
+  'PUT /api/appliances/[id]/subsector': {
+    action: 'leaks:write',
+    id: applianceId,
+    send: () => asJson({ lightCommercial: true }),
+    status: 200,
+  },
+  'GET /api/charge-additions': { action: 'leaks:read', status: 200 },
+  'POST /api/charge-additions': {
+    action: 'leaks:write',
+    send: ({ ids }) =>
+      asJson({ applianceId: ids.applianceId, addedOn: '2025-05-01', addedCharge: '2', reason: 'leak_top_up' }),
+    status: 201,
+  },
+  'GET /api/charge-additions/changes': {
+    action: 'leaks:read',
+    search: '?appliance=00000000-0000-4000-8000-000000000000',
+    status: 200,
+  },
+  // A version that nobody has seen yet.
+  'PATCH /api/charge-additions/[id]': {
+    action: 'leaks:write',
+    id: additionId,
+    send: () => asJson({ version: 999, why: 'a typing error', notes: 'mended' }),
+    status: 409,
+  },
+  'DELETE /api/charge-additions/[id]': {
+    action: 'leaks:write',
+    id: additionId,
+    search: '?version=999&why=a+typing+error',
+    status: 409,
+  },
+  'GET /api/charge-additions/imports': { action: 'leaks:read', status: 200 },
+  'POST /api/charge-additions/imports': { action: 'leaks:write', send: additionFile, status: 200 },
+  'POST /api/charge-additions/imports/[id]/undo': {
+    action: 'leaks:write',
+    id: ({ ids }) => ids.undoneAdditionImportId,
+    status: 409,
+  },
+  'GET /api/sites/[id]/leaks': { action: 'leaks:read', id: siteId, status: 200 },
+  // The method of a filled company is chosen already.
+  'PUT /api/sites/[id]/leak-method': {
+    action: 'leaks:write',
+    id: siteId,
+    send: () => asJson({ method: 'rolling_average', version: 0 }),
+    status: 409,
+  },
   'GET /api/appliances': {
     action: 'appliances:read',
     status: 200,
