@@ -20,6 +20,7 @@ import { siteRecoveries } from './sites/contract';
 import { start } from './start/contract';
 import { technicianRecoveries } from './technicians/contract';
 import { trendsComparison } from './trends-comparison/contract';
+import { applianceHistorySchema, siteHistorySchema } from './visits/contract';
 
 const published = (
   { path, action, query, response }: Contract<z.ZodType, z.ZodType>,
@@ -64,6 +65,18 @@ export const PUBLISHED_ROUTES: readonly PublishedRoute[] = [
     summary: 'Leak rate method of a site, and its appliances',
     action: 'leaks:read',
     answer: siteLeaksSchema,
+  },
+  {
+    path: '/api/sites/{id}',
+    summary: 'One site and its recoveries of all time',
+    action: 'sites:read',
+    answer: siteHistorySchema,
+  },
+  {
+    path: '/api/appliances/{id}',
+    summary: 'One appliance and its recoveries of all time',
+    action: 'appliances:read',
+    answer: applianceHistorySchema,
   },
   {
     path: '/api/recoveries/{id}',

@@ -30,6 +30,8 @@ export const APPLIANCE_COLUMNS: readonly GroupedColumn<ApplianceRow>[] = [
     ),
   },
   { id: 'site', label: 'Site', kind: 'text', value: ({ site }) => site, onlyInFile: true },
+  LOW,
+  RECOVERIES,
   {
     id: 'refrigerant',
     label: 'Refrigerant',
@@ -44,8 +46,6 @@ export const APPLIANCE_COLUMNS: readonly GroupedColumn<ApplianceRow>[] = [
   },
   { id: 'category', label: 'Category', kind: 'text', value: ({ category }) => category, onlyInFile: true },
   { id: 'unitCharge', label: 'Unit holds', kind: 'mass', value: ({ unitCharge }) => unitCharge },
-  RECOVERIES,
-  LOW,
   ...[recovered, totalYield, medianYield].filter((column) => column !== undefined),
   FIRST,
   LAST,

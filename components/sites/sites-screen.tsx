@@ -3,7 +3,7 @@
 import Link from 'next/link';
 import { useMemo } from 'react';
 import { spreadNote } from '@/analytics/group-sentence';
-import { onlyOf, scopeQuery, scopeSearch } from '@/analytics/scope-address';
+import { onlyOf, scopeQuery } from '@/analytics/scope-address';
 import type { SiteRow } from '@/analytics/sites/contract';
 import { useSiteRecoveries } from '@/analytics/sites/hook';
 import { LAST, LOW, MASS_COLUMNS, measured, RECOVERIES } from '@/components/grouped-figures/column';
@@ -23,8 +23,8 @@ const SITES: GroupedKind<SiteRow> = {
       kind: 'text',
       heads: true,
       value: ({ site }) => site,
-      draw: ({ site }, own) => (
-        <Link href={`/records${scopeSearch(own)}`} className="link">
+      draw: ({ siteId, site }) => (
+        <Link href={`/sites/${siteId}`} className="link">
           {site}
         </Link>
       ),

@@ -13,6 +13,14 @@ const findFaults = async (page: Page): Promise<string[]> => {
   );
 };
 
+/** Where the ids of pages about one thing come from. */
+const LISTS: Record<string, { list: string; idOf: string }> = {
+  '/records': { list: '/api/recoveries?limit=1', idOf: 'id' },
+  '/imports': { list: '/api/imports?limit=1', idOf: 'id' },
+  '/sites': { list: '/api/sites', idOf: 'siteId' },
+  '/appliances': { list: '/api/appliances', idOf: 'applianceId' },
+};
+
 /** The address of a page, ids taken from the demo company. Of the hundreds of sites and appliances a month's are enough. */
 const addressOf = async (page: Page, path: string): Promise<string> => {
   if (path === '/sites' || path === '/appliances') {
@@ -20,9 +28,9 @@ const addressOf = async (page: Page, path: string): Promise<string> => {
     return `${path}?from=${lastMonth}&to=${lastMonth}`;
   }
   if (!path.includes('[')) return path;
-  const list = path.startsWith('/records') ? '/api/recoveries?limit=1' : '/api/imports?limit=1';
+  const { list, idOf } = LISTS[path.slice(0, path.indexOf('/', 1))] ?? { list: '', idOf: 'id' };
   const { items } = await (await page.request.get(list)).json();
-  return path.replace(/\[\w+\]/, items[0].id);
+  return path.replace(/\[\w+\]/, items[0][idOf]);
 };
 
 /** Goes to a page and waits until its figures are there. */

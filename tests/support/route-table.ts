@@ -118,6 +118,11 @@ export const ROUTES: Record<string, RouteRule> = {
     status: 200,
     records: (answer: { items: { recoveries: number }[] }) => sumOf(answer.items),
   },
+  'GET /api/appliances/[id]': {
+    action: 'appliances:read',
+    id: ({ ids }) => ids.applianceId,
+    status: 200,
+  },
   'GET /api/auth/[...nextauth]': { open: 'signing in is for those who are not signed in' },
   'POST /api/auth/[...nextauth]': { open: 'signing in is for those who are not signed in' },
   'GET /api/coaching': {
@@ -211,6 +216,7 @@ export const ROUTES: Record<string, RouteRule> = {
     status: 200,
     records: (answer: { recoveries: number }) => answer.recoveries,
   },
+  'GET /api/sites/[id]': { action: 'sites:read', id: ({ ids }) => ids.siteId, status: 200 },
   'GET /api/technicians': {
     action: 'technicians:read',
     status: 200,
