@@ -1,5 +1,6 @@
 import { z } from 'zod';
 import { groupFigures } from '@/analytics/grouped-figures/contract';
+import { applianceSuspicion } from '@/analytics/leak-suspicion/contract';
 import { scopeSchema, UNSTATED } from '@/analytics/scope';
 import { defineContract } from '@/lib/api/contract';
 import { APPLIANCE_CATEGORIES } from '@/lib/vocabulary';
@@ -25,6 +26,7 @@ export const applianceRecoveries = defineContract({
         unitCharge: z.number().nonnegative(),
         /** Recoveries far below like jobs; more than one is a unit that came back low again. */
         lowRecoveries: z.int().nonnegative(),
+        ...applianceSuspicion,
         ...groupFigures,
       }),
     ),

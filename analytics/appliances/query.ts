@@ -2,6 +2,7 @@ import 'server-only';
 import { type SQL, type SQLWrapper, sql } from 'drizzle-orm';
 import { toGram } from '@/analytics/fact-figures';
 import { byName, countedInScope, countLow, groupFigures } from '@/analytics/grouped-figures/query';
+import { type CompanySuspicion, toldOfAppliance } from '@/analytics/leak-suspicion/company';
 import { type Scope, UNSTATED } from '@/analytics/scope';
 import type { Tx } from '@/db/client';
 import { recoveryFacts as f } from '@/db/views/recovery-facts';
@@ -12,7 +13,11 @@ const last = <Value>(column: SQLWrapper): SQL<Value> =>
   sql<Value>`(array_agg(${column} order by ${f.recoveredOn} desc, ${f.recoveredAt} desc nulls last, ${f.id} desc))[1]`;
 
 /** Each appliance with a record that counts in scope, by site and name. */
-export const getApplianceRecoveries = async (tx: Tx, scope: Scope): Promise<ApplianceRecoveries> => {
+export const getApplianceRecoveries = async (
+  tx: Tx,
+  scope: Scope,
+  suspicion: CompanySuspicion,
+): Promise<ApplianceRecoveries> => {
   const appliances = await tx
     .select({
       appliance: f.appliance,
@@ -29,5 +34,11 @@ export const getApplianceRecoveries = async (tx: Tx, scope: Scope): Promise<Appl
     .groupBy(f.applianceId, f.appliance, f.siteId, f.site)
     .orderBy(byName(f.site), f.siteId, byName(f.appliance), f.applianceId);
   const low = await countLow(tx, scope, f.applianceId);
-  return { items: appliances.map((one) => ({ ...one, lowRecoveries: low.get(one.applianceId) ?? 0 })) };
+  return {
+    items: appliances.map((one) => ({
+      ...one,
+      lowRecoveries: low.get(one.applianceId) ?? 0,
+      ...toldOfAppliance(suspicion, one.applianceId),
+    })),
+  };
 };

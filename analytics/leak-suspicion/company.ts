@@ -53,3 +53,23 @@ export const companySuspicion = (records: readonly PulledAtSite[]): CompanySuspi
     sites: new Map(sites.map((site, index) => [site.siteId, { ...site, excess: excess[index] ?? none }])),
   };
 };
+
+/** Probabilities are told to a tenth of a per cent: what they rest on is not finer. */
+const told = (chance: number | null): number | null => (chance === null ? null : Number(chance.toFixed(3)));
+
+/** What a list tells of one appliance. */
+export const toldOfAppliance = ({ appliances }: CompanySuspicion, applianceId: string) => {
+  const suspicion = appliances.get(applianceId);
+  return { lowAgain: suspicion ? lowAgainOf(suspicion) : 0, leakSuspicion: told(chanceOf(suspicion)) };
+};
+
+/** What a list tells of one site. */
+export const toldOfSite = ({ sites }: CompanySuspicion, siteId: string) => {
+  const site = sites.get(siteId);
+  return {
+    lowAgain: site?.lowAgain ?? 0,
+    leakSuspicion: told(site?.chance ?? null),
+    suspected: site?.suspected ?? 0,
+    moreThanChance: site?.excess.look ?? false,
+  };
+};

@@ -1,5 +1,6 @@
 import { z } from 'zod';
 import { groupFigures } from '@/analytics/grouped-figures/contract';
+import { siteSuspicion } from '@/analytics/leak-suspicion/contract';
 import { scopeSchema } from '@/analytics/scope';
 import { defineContract } from '@/lib/api/contract';
 
@@ -17,6 +18,7 @@ export const siteRecoveries = defineContract({
         appliances: z.int().positive(),
         /** Recoveries far below like jobs: a reason to look. */
         lowRecoveries: z.int().nonnegative(),
+        ...siteSuspicion,
         ...groupFigures,
       }),
     ),

@@ -95,7 +95,7 @@ const keptResponse = (request: Request, { etag, body, gzipped }: KeptAnswer): Re
  */
 export const getKeptRoute = <Query extends z.ZodType, Answer extends z.ZodType>(
   contract: Contract<Query, Answer>,
-  load: (query: z.output<Query>, viewer: Viewer) => Promise<z.input<Answer>>,
+  load: (query: z.output<Query>, viewer: AskingViewer) => Promise<z.input<Answer>>,
 ) =>
   withViewer(contract.action, async (request, viewer) => {
     const query = contract.query.safeParse(searchInput(request.url));

@@ -1,3 +1,4 @@
+import { keptSuspicion } from '@/analytics/leak-suspicion/kept';
 import { siteRecoveries } from '@/analytics/sites/contract';
 import { getSiteRecoveries } from '@/analytics/sites/query';
 import { readCompany } from '@/db/client';
@@ -5,6 +6,7 @@ import { getKeptRoute } from '@/lib/api/route';
 import { scopeOf } from '@/lib/auth/viewer';
 
 /** What was recovered at each site. */
-export const GET = getKeptRoute(siteRecoveries, (scope, viewer) =>
-  readCompany(scopeOf(viewer), (tx) => getSiteRecoveries(tx, scope)),
-);
+export const GET = getKeptRoute(siteRecoveries, async (scope, viewer) => {
+  const suspicion = await keptSuspicion(viewer);
+  return readCompany(scopeOf(viewer), (tx) => getSiteRecoveries(tx, scope, suspicion));
+});
