@@ -1,10 +1,9 @@
 'use client';
 
-import { type FormEvent, useState } from 'react';
+import { useState } from 'react';
 import { monthOf, monthsBefore, type ScopeSelection } from '@/analytics/scope-address';
-import { Button } from '@/components/ui/button';
-import { Field, TextInput } from '@/components/ui/field';
 import { useViewer } from '@/components/viewer-context';
+import { PeriodForm } from './period-form';
 import { isPeriodPart } from './wording';
 
 type Period = { from: string | null; to: string | null };
@@ -43,8 +42,7 @@ export const PeriodEditor = ({ scope, firstMonth, onApply, close }: PeriodEditor
     onApply(period);
     close();
   };
-  const submit = (event: FormEvent) => {
-    event.preventDefault();
+  const submit = () => {
     const found = fault(from, to);
     setError(found);
     if (!found) apply({ from: from || null, to: to || null });
@@ -52,34 +50,15 @@ export const PeriodEditor = ({ scope, firstMonth, onApply, close }: PeriodEditor
   // A day in the address is kept as a day; months are picked as months.
   const typeOf = (part: string) => (part.length > 7 ? 'date' : 'month');
   return (
-    <div className="flex flex-col gap-4">
-      <ul className="flex flex-col">
-        {presets(running, firstMonth).map(({ name, period }) => (
-          <li key={name}>
-            <button
-              type="button"
-              onClick={() => apply(period)}
-              className="flex min-h-11 w-full items-center px-2 text-left hover:bg-act-weak pointer-fine:min-h-9"
-            >
-              {name}
-            </button>
-          </li>
-        ))}
-      </ul>
-      <form onSubmit={submit} noValidate className="flex flex-col gap-3 border-t border-rule pt-3">
-        <div className="grid grid-cols-2 gap-3">
-          <Field label="From">
-            <TextInput type={typeOf(scope.from ?? '')} value={from} onChange={(e) => setFrom(e.target.value)} />
-          </Field>
-          <Field label="To, included" error={error}>
-            <TextInput type={typeOf(scope.to ?? '')} value={to} onChange={(e) => setTo(e.target.value)} />
-          </Field>
-        </div>
-        <p className="text-sm text-ink-2">Leave “To” empty to see up to today.</p>
-        <Button type="submit" tone="primary">
-          Show
-        </Button>
-      </form>
-    </div>
+    <PeriodForm
+      presets={presets(running, firstMonth).map(({ name, period }) => ({ name, choose: () => apply(period) }))}
+      from={{ value: from, type: typeOf(scope.from ?? ''), onChange: setFrom }}
+      to={{ value: to, type: typeOf(scope.to ?? ''), onChange: setTo }}
+      error={error}
+      onSubmit={submit}
+      submitName="Show"
+    >
+      <p className="text-sm text-ink-2">Leave “To” empty to see up to today.</p>
+    </PeriodForm>
   );
 };

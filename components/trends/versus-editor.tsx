@@ -1,10 +1,9 @@
 'use client';
 
-import { type FormEvent, useState } from 'react';
+import { useState } from 'react';
 import { monthsBefore } from '@/analytics/scope-address';
 import { parseVersus, versusText } from '@/analytics/trends-comparison/versus';
-import { Button } from '@/components/ui/button';
-import { Field, TextInput } from '@/components/ui/field';
+import { PeriodForm } from '@/components/scope/period-form';
 
 type Days = { from: string; to: string };
 
@@ -32,8 +31,7 @@ export const VersusEditor = ({ now, versus, onApply, close }: VersusEditorProps)
     onApply(text);
     close();
   };
-  const submit = (event: FormEvent) => {
-    event.preventDefault();
+  const submit = () => {
     const text = `${from}..${to || from}`;
     if (parseVersus(text)) apply(text);
     else setError(from && to && from > to ? 'The end lies before the beginning.' : 'Write months as 2024-01.');
@@ -48,33 +46,13 @@ export const VersusEditor = ({ now, versus, onApply, close }: VersusEditorProps)
       : []),
   ];
   return (
-    <div className="flex flex-col gap-4">
-      <ul className="flex flex-col">
-        {presets.map(({ name, text }) => (
-          <li key={name}>
-            <button
-              type="button"
-              onClick={() => apply(text)}
-              className="flex min-h-11 w-full items-center px-2 text-left hover:bg-act-weak pointer-fine:min-h-9"
-            >
-              {name}
-            </button>
-          </li>
-        ))}
-      </ul>
-      <form onSubmit={submit} noValidate className="flex flex-col gap-3 border-t border-rule pt-3">
-        <div className="grid grid-cols-2 gap-3">
-          <Field label="From">
-            <TextInput type="month" value={from} onChange={(event) => setFrom(event.target.value)} />
-          </Field>
-          <Field label="To, included" error={error}>
-            <TextInput type="month" value={to} onChange={(event) => setTo(event.target.value)} />
-          </Field>
-        </div>
-        <Button type="submit" tone="primary">
-          Compare
-        </Button>
-      </form>
-    </div>
+    <PeriodForm
+      presets={presets.map(({ name, text }) => ({ name, choose: () => apply(text) }))}
+      from={{ value: from, onChange: setFrom }}
+      to={{ value: to, onChange: setTo }}
+      error={error}
+      onSubmit={submit}
+      submitName="Compare"
+    />
   );
 };
