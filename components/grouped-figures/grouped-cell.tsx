@@ -19,6 +19,9 @@ const textOf = (value: string | number, kind: GroupedColumn<never>['kind'], { un
   }
 };
 
+/** Among figures of which each opens, lines under all of them would say nothing. */
+const QUIET = 'figure-link decoration-transparent hover:decoration-current';
+
 type GroupedCellProps<Row> = {
   column: GroupedColumn<Row>;
   row: Row;
@@ -37,13 +40,13 @@ export const GroupedCell = <Row,>({ column, row, own, mayLook }: GroupedCellProp
   const text = textOf(cell, kind, own);
   if (kind === 'day')
     return (
-      <FigureLink measure="recoveries" scope={{ ...own, from: String(cell), to: String(cell) }}>
+      <FigureLink measure="recoveries" scope={{ ...own, from: String(cell), to: String(cell) }} className={QUIET}>
         {text}
       </FigureLink>
     );
   if (!measure || (isJudgement(measure) && (!mayLook || cell === 0))) return text;
   return (
-    <FigureLink measure={measure} scope={own}>
+    <FigureLink measure={measure} scope={own} className={QUIET}>
       {text}
     </FigureLink>
   );

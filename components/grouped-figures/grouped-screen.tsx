@@ -60,7 +60,7 @@ export const GroupedScreen = <Row extends GroupFigures>({ kind, scope, answer }:
         />
         <Sheet
           title={kind.title}
-          aside={`${kind.order}; choose a heading to put them in another order`}
+          aside={`${kind.order}; a heading puts them in another order, every figure opens its records`}
           tools={<FileButtons makeTable={() => groupedFile(kind.label, kind.columns, items, scope)} />}
         >
           <GroupedTable {...kind} items={items} scope={scope} />

@@ -4,7 +4,7 @@ import { withCompany } from '@/db/client';
 import { cylinders } from '@/db/schema/places';
 import { recoveries } from '@/db/schema/recoveries';
 import { apiRequest, newCompany } from '../support/company';
-import { newPlaces, recoveryRow } from '../support/recoveries';
+import { newPlaces, recoveryRow } from '../support/records';
 
 const ours = await newCompany();
 const theirs = await newCompany();

@@ -4,7 +4,7 @@ import { GET } from '@/app/api/scope-options/route';
 import { withCompany } from '@/db/client';
 import { recoveries } from '@/db/schema/recoveries';
 import { apiRequest, newCompany } from '../support/company';
-import { newPlaces, recoveryRow } from '../support/recoveries';
+import { newPlaces, recoveryRow } from '../support/records';
 
 const companyWithRecords = async () => {
   const company = await newCompany();

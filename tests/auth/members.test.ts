@@ -14,7 +14,7 @@ import {
 import { addMember } from '@/lib/auth/provision';
 import { openSession, viewerOfSession } from '@/lib/auth/sessions';
 import { newCompany } from '../support/company';
-import { newPlaces } from '../support/recoveries';
+import { newPlaces } from '../support/records';
 
 const address = () => `${randomUUID()}@people.test`;
 

@@ -7,7 +7,7 @@ import { recoveries } from '@/db/schema/recoveries';
 import { asRole, type DatabaseUser, rowsAs } from '../support/as-role';
 import { newCompany } from '../support/company';
 import { firstBroken } from '../support/history';
-import { newPlaces, recoveryRow } from '../support/recoveries';
+import { newPlaces, recoveryRow } from '../support/records';
 
 /** Six entries: six branches, each in a transaction of its own. */
 const withSixEntries = async () => {

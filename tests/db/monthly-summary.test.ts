@@ -7,7 +7,7 @@ import { recoveries } from '@/db/schema/recoveries';
 import { groupSummary, likeJobs, middleYields } from '@/db/schema/summaries';
 import { newCompany } from '../support/company';
 import { summaryDifferences } from '../support/kept-summaries';
-import { newPlaces, type Places, recoveryRow } from '../support/recoveries';
+import { newPlaces, type Places, recoveryRow } from '../support/records';
 
 /** The same months worked out from the records, each dimension by a plain GROUP BY of its own. */
 const fromRecords = (dimension: string, key: string) => `

@@ -1,7 +1,50 @@
-import { type CompanyScope, withCompany } from '@/db/client';
+import { randomUUID } from 'node:crypto';
+import { type CompanyScope, type Tx, withCompany } from '@/db/client';
 import { appliances, branches, sites, technicians } from '@/db/schema/places';
 import { recoveries } from '@/db/schema/recoveries';
 import type { ApplianceCategory, JobType } from '@/lib/vocabulary';
+
+type RecoveryRow = typeof recoveries.$inferInsert;
+
+/** What a record says that a test does not speak of. */
+const PLAIN = {
+  recoveredOn: '2025-06-15',
+  refrigerant: 'R-410A',
+  nameplateChargeKg: '5',
+  recoveredMassKg: '4',
+  massUnit: 'kg',
+} as const satisfies Partial<RecoveryRow>;
+
+/** A small crew with its places, for suites that write records directly. */
+export const newPlaces = async (tx: Tx, companyId: string) => {
+  const place = (name: string) => ({ companyId, id: randomUUID(), name });
+  const north = place('North');
+  const south = place('South');
+  const crew = [place('Ada Moss'), place('Ben Oyelaran'), place('Cleo Frei')];
+  const places = [place('Mill Street'), place('Harbour Hall')];
+  const units = places.map((site) => ({ ...place('RTU-1'), siteId: site.id }));
+  await tx.insert(branches).values([north, south]);
+  await tx.insert(technicians).values(crew);
+  await tx.insert(sites).values(places);
+  await tx.insert(appliances).values(units);
+  return {
+    branchIds: [north.id, south.id],
+    technicianIds: crew.map(({ id }) => id),
+    units: units.map(({ id, siteId }) => ({ applianceId: id, siteId })),
+  };
+};
+export type Places = Awaited<ReturnType<typeof newPlaces>>;
+
+/** One record's row with sensible values; pass what the suite is about. */
+export const recoveryRow = (companyId: string, places: Places, row: Partial<RecoveryRow> = {}): RecoveryRow => ({
+  ...PLAIN,
+  companyId,
+  recordRef: randomUUID(),
+  technicianId: places.technicianIds[0] ?? '',
+  siteId: places.units[0]?.siteId ?? '',
+  applianceId: places.units[0]?.applianceId ?? '',
+  ...row,
+});
 
 /** What a test says about a record; names are made on the way, everything else has a plain value. */
 export type TestRecord = {
@@ -44,9 +87,9 @@ export const writeRecords = (scope: CompanyScope, records: readonly TestRecord[]
       site: 'North Yard',
       appliance: 'RTU-1',
       branch: null,
-      refrigerant: 'R-410A',
+      refrigerant: PLAIN.refrigerant,
       chargeKg: '10',
-      ref: `${record.on}/${index}/${Math.random()}`,
+      ref: `${record.on}/${index}/${randomUUID()}`,
       ...record,
     }));
     const technicianId = await idsOf(
@@ -73,6 +116,7 @@ export const writeRecords = (scope: CompanyScope, records: readonly TestRecord[]
       .insert(recoveries)
       .values(
         full.map((r) => ({
+          ...PLAIN,
           companyId,
           recordRef: r.ref,
           recoveredOn: r.on,
@@ -85,7 +129,6 @@ export const writeRecords = (scope: CompanyScope, records: readonly TestRecord[]
           refrigerant: r.refrigerant,
           nameplateChargeKg: r.chargeKg,
           recoveredMassKg: r.kg,
-          massUnit: 'kg' as const,
           holdMinutes: r.holdMinutes ?? null,
           finalVacuumKpaAbs: r.vacuumKpaAbs ?? null,
           exclusion: r.excluded ? ('entry_error' as const) : null,
