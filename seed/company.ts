@@ -1,3 +1,4 @@
+import { additionsBook, type DemoAddition } from './additions';
 import { makePlaces } from './appliances';
 import { monthsUntil } from './calendar';
 import { type Cylinder, cylinderPool } from './cylinders';
@@ -16,6 +17,7 @@ export type DemoCompany = {
   sites: readonly Site[];
   cylinders: readonly Cylinder[];
   tickets: readonly Ticket[];
+  additions: readonly DemoAddition[];
   truth: DemoTruth;
 };
 
@@ -35,11 +37,18 @@ export const makeCompany = (plan: Plan): DemoCompany => {
     monthlyMassKg: {},
     chronicLeaks: [],
   };
-  const world = { plan, months, crew: technicians, places, pool, truth };
+  const book = additionsBook(plan.endMonth, random.fork('additions'));
+  const world = { plan, months, crew: technicians, places, pool, book, truth };
   const tickets = playRecoveries(world, random.fork('recoveries'));
+  for (const place of places) book.atInstall(place, months[0] ?? plan.endMonth);
   truth.chronicLeaks = places
     .flatMap(({ units }) => units)
     .filter(({ leaksAgain }) => leaksAgain)
     .map((unit) => `${unit.site.name} / ${unit.name}`);
-  return { plan, technicians, sites, cylinders: pool.all, tickets, truth };
+  // An addition is written down for units that are on record.
+  const onRecord = new Set(tickets.map(({ site, appliance }) => `${site} / ${appliance}`));
+  const additions = book.additions
+    .filter(({ site, appliance }) => onRecord.has(`${site} / ${appliance}`))
+    .sort((a, b) => a.addedOn.localeCompare(b.addedOn));
+  return { plan, technicians, sites, cylinders: pool.all, tickets, additions, truth };
 };

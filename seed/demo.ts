@@ -5,7 +5,9 @@ import { companiesNamed, createCompany } from '@/lib/auth/provision';
 import type { Viewer } from '@/lib/auth/viewer';
 import { monthBefore } from './calendar';
 import { type DemoCompany, makeCompany } from './company';
+import { importAdditions } from './import-additions';
 import { importTickets } from './import-tickets';
+import { stateLeakSettings } from './leak-settings';
 import { loadPlaces } from './load-places';
 import { demoStateOf, markDemo } from './marker';
 import { COMPANY_NAME, SMALL_COMPANY_NAME } from './names';
@@ -34,6 +36,8 @@ const makeOne = async (
     ...{ role: 'office', technicianId: null, timeZone: TIME_ZONE, massUnit: 'lb' },
   };
   await importTickets(viewer, company.tickets, `recovery tickets until ${plan.endMonth}.csv`);
+  await importAdditions(viewer, company);
+  await stateLeakSettings(viewer, company);
   return companyId;
 };
 

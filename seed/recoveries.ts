@@ -1,4 +1,5 @@
 import type { Disposition, JobType } from '@/lib/vocabulary';
+import type { AdditionsBook } from './additions';
 import { type Appliance, type Place, replaceUnit, unitAt } from './appliances';
 import { assign } from './assign';
 import type { CylinderPool } from './cylinders';
@@ -33,11 +34,12 @@ export const playRecoveries = (
     crew: readonly Technician[];
     places: readonly Place[];
     pool: CylinderPool;
+    book: AdditionsBook;
     truth: DemoTruth;
   },
   random: Random,
 ): Ticket[] => {
-  const { plan, months, crew, places, pool, truth } = world;
+  const { plan, months, crew, places, pool, book, truth } = world;
   const cylinders = openCylinders(pool, random.fork('cylinders'));
   const done = new Map<string, { pulls: number; efficiency: number }>();
   const drifting = crew.find(({ habit }) => habit === 'drifting_scale');
@@ -68,6 +70,7 @@ export const playRecoveries = (
     const ticket = writeTicket(job, pull, draw);
     const past = cylinders.fill(filling, pull.recoveredLb, disposition);
 
+    book.afterPull(unit, { type, day }, pull);
     if (pull.stoppedEarly) truth.faults.push({ recordRef, fault: 'stopped_early' });
     if (filling.fault === 'mixed_cylinder') truth.faults.push({ recordRef, fault: 'mixed_cylinder' });
     if (filling.fault === 'overfilled' && past) truth.faults.push({ recordRef, fault: 'overfilled' });

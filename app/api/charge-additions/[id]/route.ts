@@ -1,7 +1,7 @@
-import { z } from 'zod';
 import { additionSchema } from '@/analytics/charge-additions/contract';
 import { getAddition } from '@/analytics/charge-additions/query';
 import { withCompany } from '@/db/client';
+import { idOf } from '@/lib/api/id-of';
 import { throwBadInput } from '@/lib/api/problem';
 import { json, jsonBody, searchInput, withViewer } from '@/lib/api/route';
 import { scopeOf } from '@/lib/auth/viewer';
@@ -11,15 +11,9 @@ import { notFound } from '@/lib/errors';
 
 type Context = RouteContext<'/api/charge-additions/[id]'>;
 
-const idOf = async ({ params }: Context): Promise<string> => {
-  const id = z.uuid().safeParse((await params).id);
-  if (!id.success) throw notFound('This addition');
-  return id.data;
-};
-
 /** Corrects an addition: { version, why, … }. */
 export const PATCH = withViewer('leaks:write', async (request, viewer, context: Context) => {
-  const id = await idOf(context);
+  const id = await idOf(context, 'This addition');
   await correctAddition(viewer, id, await jsonBody(request, additionChange));
   const addition = await withCompany(scopeOf(viewer), (tx) => getAddition(tx, id));
   if (!addition) throw notFound('This addition');
@@ -28,7 +22,7 @@ export const PATCH = withViewer('leaks:write', async (request, viewer, context: 
 
 /** Takes an addition out of the figures, in the version that was seen: ?version=2&why=… */
 export const DELETE = withViewer('leaks:write', async (request, viewer, context: Context) => {
-  const id = await idOf(context);
+  const id = await idOf(context, 'This addition');
   const query = additionRemoval.safeParse(searchInput(request.url));
   if (!query.success) return throwBadInput(query.error);
   await removeAddition(viewer, id, query.data);

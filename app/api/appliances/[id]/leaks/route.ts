@@ -1,16 +1,16 @@
 import { applianceLeaksSchema } from '@/analytics/leak-rate/contract';
 import { getApplianceLeaks } from '@/analytics/leak-rate/places-query';
 import { keptSuspicion } from '@/analytics/leak-suspicion/kept';
-import { placeIdOf } from '@/app/api/place-id';
 import { readCompany } from '@/db/client';
+import { idOf } from '@/lib/api/id-of';
 import { json, withViewer } from '@/lib/api/route';
 import { scopeOf } from '@/lib/auth/viewer';
 
 type Context = RouteContext<'/api/appliances/[id]/leaks'>;
 
 /** What one appliance took in, lost and is suspected of. */
-export const GET = withViewer('leaks:read', async (_request, viewer, { params }: Context) => {
-  const id = await placeIdOf(params, 'This appliance');
+export const GET = withViewer('leaks:read', async (_request, viewer, context: Context) => {
+  const id = await idOf(context, 'This appliance');
   const suspicion = await keptSuspicion(viewer);
   return json(
     applianceLeaksSchema.parse(await readCompany(scopeOf(viewer), (tx) => getApplianceLeaks(tx, id, suspicion))),
