@@ -7,6 +7,7 @@ import { applianceRecoveries } from './appliances/contract';
 import { additionChanges, additionsList } from './charge-additions/contract';
 import { coachingList } from './coaching/contract';
 import { explain } from './explain/contract';
+import { assignableList, flagSchema, flagsList } from './flags/contract';
 import { applianceLeaksSchema, siteLeaksSchema } from './leak-rate/contract';
 import { lowRecoveriesList } from './low-recoveries/contract';
 import { monthlyPattern } from './monthly-pattern/contract';
@@ -39,6 +40,14 @@ export const PUBLISHED_ROUTES: readonly PublishedRoute[] = [
   published(technicianRecoveries, 'What each technician recovered'),
   published(siteRecoveries, 'What was recovered at each site'),
   published(applianceRecoveries, 'What was recovered from each appliance'),
+  published(flagsList, 'Reasons to look at a record, the surest first; with format=csv as a file'),
+  published(assignableList, 'Who may be asked to look at a flag'),
+  {
+    path: '/api/flags/{id}',
+    summary: 'One flag, with what was decided on it and the other reasons of its record',
+    action: 'flags:read',
+    answer: flagSchema,
+  },
   published(lowRecoveriesList, 'Recoveries far below like jobs'),
   published(recordListContract, 'Records, page by page; with format=csv all of them as a recovery file'),
   published(knownNamesContract, 'Names that a new record can use'),

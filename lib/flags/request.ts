@@ -1,6 +1,7 @@
 import 'server-only';
 import { sql } from 'drizzle-orm';
 import type { Tx } from '@/db/client';
+import { flagsDue } from '@/db/schema/flag-renewal';
 
 /**
  * Asks for a renewal of all flags, as part of the transaction that took a file in or back: many records at once may move
@@ -18,4 +19,16 @@ export const requestFlags = async (tx: Tx, companyId: string): Promise<void> => 
   await tx.execute(
     sql`select work.enqueue('renew-flags', ${JSON.stringify({ companyId })}::json, ${`renew-flags:${companyId}`})`,
   );
+};
+
+/** Asks for a record to be judged again: what was decided about it, or taken back, may change what is said of it. */
+export const judgeAgain = async (tx: Tx, companyId: string, recoveryId: string): Promise<void> => {
+  await tx
+    .insert(flagsDue)
+    .values({ companyId, recoveryId })
+    .onConflictDoUpdate({
+      target: [flagsDue.companyId, flagsDue.recoveryId],
+      set: { touches: sql`${flagsDue.touches} + 1` },
+    });
+  await requestFlags(tx, companyId);
 };

@@ -53,6 +53,8 @@ const takenRecord = ({ label }: FilledCompany) =>
 
 const recoveryId = ({ ids }: FilledCompany) => ids.recoveryId;
 const otherRecoveryId = ({ ids }: FilledCompany) => ids.otherRecoveryId;
+const flagId = ({ ids }: FilledCompany) => ids.flagId;
+const decidedFlagId = ({ ids }: FilledCompany) => ids.decidedFlagId;
 const noteId = ({ ids }: FilledCompany) => ids.noteId;
 const coachingId = ({ ids }: FilledCompany) => ids.coachingId;
 const additionId = ({ ids }: FilledCompany) => ids.additionId;
@@ -148,6 +150,23 @@ export const ROUTES: Record<string, RouteRule> = {
     status: 200,
     records: (answer: { value: number }) => answer.value,
   },
+  'GET /api/flags': { action: 'flags:read', status: 200 },
+  'GET /api/flags/[id]': { action: 'flags:read', id: flagId, status: 200 },
+  'GET /api/flags/people': { action: 'flags:decide', status: 200 },
+  // Decided already: the flag stays as it is for whoever asks next.
+  'POST /api/flags/[id]/decision': {
+    action: 'flags:decide',
+    id: decidedFlagId,
+    send: () => asJson({ decision: 'leaked_before' }),
+    status: 409,
+  },
+  'POST /api/flags/[id]/assign': {
+    action: 'flags:decide',
+    id: flagId,
+    send: () => asJson({ note: 'ask about the hold' }),
+    status: 200,
+  },
+  'POST /api/flags/[id]/reopen': { action: 'flags:decide', id: flagId, status: 409 },
   'GET /api/health': { open: 'whoever watches the server has no account; it says nothing about a company' },
   'GET /api/imports': { action: 'imports:manage', status: 200 },
   'POST /api/imports': { action: 'imports:manage', send: recoveryFile, status: 202 },
