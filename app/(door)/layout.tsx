@@ -1,6 +1,6 @@
 import type { ReactNode } from 'react';
+import { DoorPicture } from '@/components/shell/door-picture';
 import { Wordmark } from '@/components/shell/mark';
-import { TicketPicture } from '@/components/shell/ticket-picture';
 
 /** The way in: the form on the left, what stands behind the door on the right. */
 export default function DoorLayout({ children }: { children: ReactNode }) {
@@ -14,18 +14,17 @@ export default function DoorLayout({ children }: { children: ReactNode }) {
         aria-label="What Tarebook is"
         className="flex flex-1 flex-col justify-center gap-10 px-5 py-12 sm:px-10 lg:px-16 xl:px-24"
       >
-        <TicketPicture />
-        <div className="max-w-xl">
-          <p className="text-xl font-semibold tracking-tight text-balance">
-            Every recovery is a number on a scale. Tarebook is the book of what the scale said.
+        <div className="max-w-2xl">
+          <p className="text-2xl font-semibold tracking-tight text-balance">
+            Every recovery is a number on a scale. Tarebook says whether it is any good.
           </p>
           <p className="mt-3 text-ink-2">
-            It reads a contractor’s recovery tickets and answers the questions nobody can see from them: how much of
-            each refrigerant came in, which pulls were low and why, and whether it is the season, the leak, the cylinder
-            or the work.
+            It reads a contractor’s recovery tickets and answers what nobody can see from them: how much of each
+            refrigerant came in, which pulls were low, and whether it was the season, a leak, the cylinder or the work.
+            Every figure opens the records that make it.
           </p>
-          <p className="mt-3 text-ink-2">Every figure opens the records that make it.</p>
         </div>
+        <DoorPicture />
       </aside>
     </div>
   );
