@@ -8,7 +8,7 @@ import type { DisplayUnit, Role } from '@/lib/vocabulary';
 import type { Start } from './contract';
 
 /** A sentence whose figures open, the records they are about, and what is said under it. */
-export type StartAnswer = { pieces: Piece[]; scope: FigureScope; sub: string };
+export type StartAnswer = { pieces: Piece[]; scope: FigureScope; sub: Piece[] };
 
 /** Everything the viewer sees between two days or months, both included; null is open. */
 export const wholeScope = (from: string | null, to: string | null): FigureScope => ({ ...EVERY_RECORD, from, to });
@@ -42,10 +42,13 @@ const logPieces = ({ recoveries, firstOn, lastOn }: Start): Piece[] => [
   firstOn && lastOn ? ` from ${formatDay(firstOn)} to ${formatDay(lastOn)}.` : '.',
 ];
 
-const shortfallWords = ({ shortfall }: Start, unit: DisplayUnit): string =>
+const shortfallWords = ({ shortfall }: Start, unit: DisplayUnit): Piece[] =>
   shortfall?.recoveries
-    ? `${plural(shortfall.recoveries, 'recovery', 'recoveries')} far below like jobs came to ${formatMassWithUnit(shortfall.mass, unit, 0)} less than the middle of like jobs would have been, whatever the reason.`
-    : '';
+    ? [
+        { measure: 'flagged', figure: plural(shortfall.recoveries, 'recovery', 'recoveries') },
+        ` far below like jobs came to ${formatMassWithUnit(shortfall.mass, unit, 0)} less than the middle of like jobs would have been, whatever the reason.`,
+      ]
+    : [];
 
 const leftOutWords = ({ excluded }: Start): string =>
   excluded ? `${formatCount(excluded)} more ${excluded === 1 ? 'is' : 'are'} left out of figures as entry errors.` : '';
@@ -55,7 +58,7 @@ const latelyAnswer = ({ lately }: Start): StartAnswer | null =>
     ? {
         pieces: lowAnswer(lately.judged),
         scope: wholeScope(lately.from, lately.to),
-        sub: 'In the last 30 days. A reason to look, not a finding.',
+        sub: ['In the last 30 days. A reason to look, not a finding.'],
       }
     : null;
 
@@ -72,16 +75,20 @@ export const startAnswer = (start: Start, role: Role, unit: DisplayUnit): StartA
   if (!latest) return null;
   const monthScope = wholeScope(latest.month, latest.month);
   const everything = wholeScope(firstOn, lastOn);
-  const month = { pieces: monthPieces(latest, unit), scope: monthScope, sub: '' };
+  const month = { pieces: monthPieces(latest, unit), scope: monthScope, sub: [] };
   switch (role) {
     case 'technician':
-      return { pieces: ownPieces(latest, unit), scope: monthScope, sub: 'Your own records; nobody else’s stand here.' };
+      return {
+        pieces: ownPieces(latest, unit),
+        scope: monthScope,
+        sub: ['Your own records; nobody else’s stand here.'],
+      };
     case 'trainer':
       return latelyAnswer(start) ?? month;
     case 'auditor':
-      return { pieces: logPieces(start), scope: everything, sub: leftOutWords(start) };
+      return { pieces: logPieces(start), scope: everything, sub: [leftOutWords(start)] };
     case 'office':
-      return { pieces: logPieces(start), scope: everything, sub: fileWords(start) };
+      return { pieces: logPieces(start), scope: everything, sub: [fileWords(start)] };
     case 'owner':
       return { ...month, sub: shortfallWords(start, unit) };
     case 'operations':

@@ -36,7 +36,7 @@ export const Term = ({ id, children, className }: TermProps) => {
           onPointerLeave={leave}
           className={clsx(
             marked
-              ? 'inline-flex size-6 shrink-0 items-center justify-center align-middle text-xs font-normal text-ink-3 hover:text-act pointer-coarse:size-11 print:hidden'
+              ? '-my-1.5 inline-flex size-6 shrink-0 items-center justify-center align-middle text-xs font-normal text-ink-3 hover:text-act pointer-coarse:size-11 print:hidden'
               : 'inline text-left text-inherit underline decoration-ink-3 decoration-dotted decoration-[1.5px] underline-offset-[0.25em] hover:text-act hover:decoration-act hover:decoration-solid print:no-underline',
             className,
           )}

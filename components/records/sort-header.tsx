@@ -19,6 +19,7 @@ export const SortHeader = ({ id, sort, onSort, children }: SortHeaderProps) => {
       numeric={numeric}
       {...(sorted ? { 'aria-sort': descending ? ('descending' as const) : ('ascending' as const) } : {})}
     >
+      {numeric && term ? <Term id={term} /> : null}
       <button
         type="button"
         onClick={() => onSort(next)}
@@ -31,7 +32,7 @@ export const SortHeader = ({ id, sort, onSort, children }: SortHeaderProps) => {
           {sorted && !descending ? '↑' : '↓'}
         </span>
       </button>
-      {term ? <Term id={term} /> : null}
+      {!numeric && term ? <Term id={term} /> : null}
     </Th>
   );
 };

@@ -22,7 +22,8 @@ export const DoorPicture = () => (
     />
     <div className="min-w-0">
       <p className="text-xl leading-tight font-semibold tracking-tight text-balance">
-        {PULL.netLb} lb came out. Like jobs give {(LIKE_JOBS.median * PULL.fullLb).toFixed(1)} lb of such a charge.
+        {PULL.netLb}&nbsp;lb came out. Like jobs give {(LIKE_JOBS.median * PULL.fullLb).toFixed(1)}&nbsp;lb of such a
+        charge.
       </p>
       <div className="mt-4 bg-sheet px-4 pt-3 pb-4">
         <LikeJobs recoveryYield={PULL.netLb / PULL.fullLb} likeJobs={LIKE_JOBS} />

@@ -40,7 +40,7 @@ const LINES: readonly Line[] = [
     measure: 'downToLevelShare',
     text: ({ downToLevel, vacuumStated }) => part(downToLevel, vacuumStated),
   },
-  { label: 'CO₂-equivalent', term: 'co2-equivalent', measure: 'co2e', text: ({ co2e }) => formatCo2e(co2e) },
+  { label: 'CO₂e', term: 'co2-equivalent', measure: 'co2e', text: ({ co2e }) => formatCo2e(co2e) },
 ];
 
 /** The latest month as a weigh ticket, each figure with the same of a year before under it; all of them open. */

@@ -45,8 +45,8 @@ export const StartScreen = () => {
         <div className="grid gap-x-12 gap-y-8 lg:grid-cols-[minmax(0,1fr)_20rem]">
           <div className="flex min-w-0 flex-col gap-8">
             <PageHead
-              title={<FigureSentence {...answer} />}
-              sub={answer.sub || undefined}
+              title={<FigureSentence pieces={answer.pieces} scope={answer.scope} />}
+              sub={answer.sub.some(Boolean) ? <FigureSentence pieces={answer.sub} scope={answer.scope} /> : undefined}
               actions={role === 'technician' ? <OwnVerbs /> : undefined}
             />
             <WaitingList items={data.waiting} />

@@ -1,6 +1,8 @@
 import Link from 'next/link';
 import type { Start } from '@/analytics/start/contract';
+import { wholeScope } from '@/analytics/start/sentence';
 import { certaintyWords, moverNote, periodWords } from '@/analytics/trends-comparison/sentence';
+import { FigureLink } from '@/components/figures/figure-link';
 import { choiceName } from '@/components/scope/wording';
 import { searchString } from '@/lib/api/client';
 import { formatMassWithUnit, formatMonth } from '@/lib/format';
@@ -13,7 +15,6 @@ export const WhatChanged = ({ start: { comparison, notes, latest }, unit }: What
   if (!latest || (!comparison && !notes.length)) return null;
   const told = comparison
     ? [
-        `${periodWords(comparison.before)} had brought in ${formatMassWithUnit(comparison.before.recoveredMass, unit, 0)}.`,
         moverNote(comparison, 'refrigerant', unit, (key) => choiceName('refrigerant', key)),
         certaintyWords(comparison),
       ].filter(Boolean)
@@ -25,7 +26,14 @@ export const WhatChanged = ({ start: { comparison, notes, latest }, unit }: What
       </h2>
       {comparison ? (
         <p className="max-w-prose py-4">
-          {told.join(' ')}{' '}
+          {periodWords(comparison.before)} had brought in{' '}
+          <FigureLink
+            measure="recoveredMass"
+            scope={wholeScope(comparison.before.from.slice(0, 7), comparison.before.to.slice(0, 7))}
+          >
+            {formatMassWithUnit(comparison.before.recoveredMass, unit, 0)}
+          </FigureLink>
+          . {told.join(' ')}{' '}
           <Link href={`/trends${searchString({ from: latest.month, to: latest.month })}`} className="link">
             {formatMonth(latest.month)} in full
           </Link>

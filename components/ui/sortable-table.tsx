@@ -72,6 +72,8 @@ export const SortableTable = <Row extends RowData>({ label, columns, data, rowId
                     data-numeric={header.column.columnDef.meta?.numeric || undefined}
                     aria-sort={sorted ? ARIA[sorted] : 'none'}
                   >
+                    {/* In a column of figures the mark goes first: the heading ends where the figures do. */}
+                    {header.column.columnDef.meta?.numeric ? header.column.columnDef.meta.aside : null}
                     <button
                       type="button"
                       onClick={header.column.getToggleSortingHandler()}
@@ -83,7 +85,7 @@ export const SortableTable = <Row extends RowData>({ label, columns, data, rowId
                       </span>
                       <table.FlexRender header={header} />
                     </button>
-                    {header.column.columnDef.meta?.aside}
+                    {header.column.columnDef.meta?.numeric ? null : header.column.columnDef.meta?.aside}
                   </Th>
                 );
               })}
