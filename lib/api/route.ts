@@ -11,7 +11,7 @@ import { env } from '@/lib/env';
 import { AppError, forbidden, unauthorized } from '@/lib/errors';
 import { log } from '@/lib/log';
 import type { Contract } from './contract';
-import { type KeptAnswer, keptAnswer } from './kept-answers';
+import { keptJson } from './kept-response';
 import { problemResponse, throwBadInput } from './problem';
 
 const viewerOf = async (request: Request): Promise<AskingViewer> => {
@@ -79,16 +79,6 @@ export const searchInput = (url: string): Record<string, string | string[]> => {
 export const json = (body: unknown, status = 200): Response =>
   Response.json(body, { status, headers: { 'cache-control': 'private, no-store' } });
 
-/** A kept answer, compressed where that is taken; 304 without a body to whoever says that he holds it already. */
-const keptResponse = (request: Request, { etag, body, gzipped }: KeptAnswer): Response => {
-  const headers = new Headers({ etag, 'cache-control': 'private, no-store', vary: 'accept-encoding' });
-  if (request.headers.get('if-none-match')?.includes(etag)) return new Response(null, { status: 304, headers });
-  headers.set('content-type', 'application/json');
-  if (!/\bgzip\b/.test(request.headers.get('accept-encoding') ?? '')) return new Response(body, { headers });
-  headers.set('content-encoding', 'gzip');
-  return new Response(gzipped, { headers });
-};
-
 /**
  * A reading route from its contract: parse the query, load, check the answer against the promise. For answers that
  * follow from the company's tracked records alone and cost something to compute: kept until one of them changes.
@@ -100,8 +90,8 @@ export const getKeptRoute = <Query extends z.ZodType, Answer extends z.ZodType>(
   withViewer(contract.action, async (request, viewer) => {
     const query = contract.query.safeParse(searchInput(request.url));
     if (!query.success) return throwBadInput(query.error);
-    const compute = async () => JSON.stringify(contract.response.parse(await load(query.data, viewer)));
-    return keptResponse(request, await keptAnswer(viewer, `${contract.path} ${JSON.stringify(query.data)}`, compute));
+    const compute = async () => contract.response.parse(await load(query.data, viewer));
+    return keptJson(request, viewer, `${contract.path} ${JSON.stringify(query.data)}`, compute);
   });
 
 /** A reading route from its contract: parse the query, load, check the answer against the promise. */

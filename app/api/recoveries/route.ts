@@ -2,6 +2,7 @@ import { recordListContract } from '@/analytics/records/contract';
 import { getRecords } from '@/analytics/records/query';
 import { getRecord } from '@/analytics/records/record-query';
 import { withCompany } from '@/db/client';
+import { keptJson } from '@/lib/api/kept-response';
 import { throwBadInput } from '@/lib/api/problem';
 import { json, jsonBody, searchInput, withViewer } from '@/lib/api/route';
 import { may } from '@/lib/auth/permissions';
@@ -21,8 +22,9 @@ export const GET = withViewer(recordListContract.action, async (request, viewer)
     if (!may(viewer.role, 'records:export')) throw forbidden();
     return csvResponse(viewer, query.data);
   }
-  const list = await withCompany(scopeOf(viewer), (tx) => getRecords(tx, query.data));
-  return json(recordListContract.response.parse(list));
+  const compute = async () =>
+    recordListContract.response.parse(await withCompany(scopeOf(viewer), (tx) => getRecords(tx, query.data)));
+  return keptJson(request, viewer, `${recordListContract.path} ${JSON.stringify(query.data)}`, compute);
 });
 
 /** Writes a new record; the same Idempotency-Key gives the record that it wrote before. */
