@@ -1,11 +1,14 @@
 'use client';
 
+import dynamic from 'next/dynamic';
 import { usePathname, useSearchParams } from 'next/navigation';
-import { createContext, type ReactNode, useContext, useMemo, useRef } from 'react';
+import { createContext, type ReactNode, useContext, useMemo, useRef, useState } from 'react';
 import { type Figure, figureOfAddress, figureParams, isFigureKey } from '@/analytics/figures/figure';
 import { EVERY_RECORD } from '@/analytics/scope-address';
 import { useScope } from '@/components/scope/use-scope';
-import { FigurePanel } from './figure-panel';
+
+// Comes with the first figure that is opened.
+const FigurePanel = dynamic(() => import('./figure-panel').then((module) => module.FigurePanel), { ssr: false });
 
 type FigurePageState = {
   /** The address of this screen with the figure open. */
@@ -38,6 +41,8 @@ export const FigurePage = ({ children }: { children: ReactNode }) => {
   // Whether the step before this one in the history is the same screen without the figure.
   const openedHere = useRef(false);
   const figure = useMemo(() => figureOfAddress(new URLSearchParams(search), scope), [search, scope]);
+  const [wanted, setWanted] = useState(false);
+  if (figure && !wanted) setWanted(true);
   const state = useMemo<FigurePageState>(() => {
     const kept = [...search.entries()].filter(([key]) => !isFigureKey(key));
     const hrefOf = (next: Figure) => addressOf(pathname, [...kept, ...figureParams(next, scope)]);
@@ -61,7 +66,7 @@ export const FigurePage = ({ children }: { children: ReactNode }) => {
   return (
     <FigurePageContext value={state}>
       {children}
-      <FigurePanel figure={figure} unit={scope.unit} onClose={close} />
+      {wanted ? <FigurePanel figure={figure} unit={scope.unit} onClose={close} /> : null}
     </FigurePageContext>
   );
 };

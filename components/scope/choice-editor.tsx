@@ -1,7 +1,7 @@
 'use client';
 
 import { Command } from 'cmdk';
-import { useId, useState } from 'react';
+import { useEffect, useId, useRef, useState } from 'react';
 import type { ScopePart } from '@/analytics/dimensions';
 import { Button } from '@/components/ui/button';
 import { formatCount } from '@/lib/format';
@@ -30,6 +30,9 @@ export const ChoiceEditor = ({ dimension, choices, selected, onApply, close }: C
   const [draft, setDraft] = useState<readonly string[]>(selected);
   const [typed, setTyped] = useState('');
   const labelId = useId();
+  // The opened part has taken the focus before this was loaded.
+  const input = useRef<HTMLInputElement>(null);
+  useEffect(() => input.current?.focus(), []);
   const words = DIMENSION_WORDS[dimension];
 
   // What the address names and no record has stands first, to be taken out.
@@ -59,6 +62,7 @@ export const ChoiceEditor = ({ dimension, choices, selected, onApply, close }: C
           {words.many}
         </p>
         <Command.Input
+          ref={input}
           value={typed}
           onValueChange={setTyped}
           placeholder={`Find a ${words.one}`}

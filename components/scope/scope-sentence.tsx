@@ -1,5 +1,6 @@
 'use client';
 
+import dynamic from 'next/dynamic';
 import type { ReactNode } from 'react';
 import type { ScopePart as Part } from '@/analytics/dimensions';
 import { useScopeOptions } from '@/analytics/scope-options/hook';
@@ -7,7 +8,6 @@ import { TextButton } from '@/components/ui/button';
 import { Failed, Loading } from '@/components/ui/states';
 import { useViewer } from '@/components/viewer-context';
 import { UNIT_NAMES } from '@/lib/wording';
-import { ChoiceEditor } from './choice-editor';
 import { CopyLink } from './copy-link';
 import { MoreConditions } from './more-conditions';
 import { PeriodEditor } from './period-editor';
@@ -15,6 +15,12 @@ import { ScopePart } from './scope-part';
 import { UnitEditor } from './unit-editor';
 import { useScope } from './use-scope';
 import { DIMENSION_WORDS, isPeriodPart, partPhrase, periodPhrase } from './wording';
+
+// Comes when a part of the sentence is opened.
+const ChoiceEditor = dynamic(() => import('./choice-editor').then((module) => module.ChoiceEditor), {
+  ssr: false,
+  loading: () => <Loading />,
+});
 
 /** Words before and after the value of a dimension, where it has a fixed place in the sentence. */
 const PLACES: Record<Part, { before: string; after?: string; always: boolean }> = {

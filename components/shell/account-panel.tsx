@@ -1,13 +1,18 @@
 'use client';
 
 import Link from 'next/link';
-import { signOut } from 'next-auth/react';
 import { useTransition } from 'react';
 import { Button, TextButton } from '@/components/ui/button';
 import { useViewer } from '@/components/viewer-context';
 import { ROLE_NAMES } from '@/lib/wording';
 import { useKeySheet } from './key-sheet';
 import { ThemeChoice } from './theme-choice';
+
+// next-auth's part for browsers is needed for this alone.
+const signOut = async () => {
+  const auth = await import('next-auth/react');
+  await auth.signOut({ callbackUrl: '/sign-in' });
+};
 
 /** What the shell asks the server to do. */
 export type AccountActions = { switchCompany: (companyId: string) => Promise<boolean> };
@@ -48,7 +53,7 @@ export const AccountPanel = ({ switchCompany }: AccountActions) => {
           Glossary
         </Link>
       </p>
-      <Button onClick={() => signOut({ callbackUrl: '/sign-in' })}>Sign out</Button>
+      <Button onClick={signOut}>Sign out</Button>
     </div>
   );
 };
