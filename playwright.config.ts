@@ -1,15 +1,5 @@
 import { defineConfig } from '@playwright/test';
-
-/** Flags with which Debian's Chromium runs as root, without a screen and without calling home. */
-const CHROMIUM_FLAGS = [
-  '--no-sandbox',
-  '--disable-gpu',
-  '--disable-quic',
-  '--no-first-run',
-  '--disable-background-networking',
-  '--disable-component-update',
-  '--disable-sync',
-];
+import { CHROMIUM, CHROMIUM_FLAGS } from './lib/launch/chromium';
 
 // `npm test -- e2e` starts the application and says where it is.
 export default defineConfig({
@@ -27,6 +17,6 @@ export default defineConfig({
     locale: 'en-US',
     timezoneId: 'America/New_York',
     screenshot: 'only-on-failure',
-    launchOptions: { executablePath: process.env.E2E_CHROMIUM ?? '/usr/bin/chromium', args: CHROMIUM_FLAGS },
+    launchOptions: { executablePath: process.env.E2E_CHROMIUM ?? CHROMIUM, args: CHROMIUM_FLAGS },
   },
 });

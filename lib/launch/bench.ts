@@ -4,17 +4,18 @@ import { buildIfChanged } from './build';
 import { enter, type OpenDatabase, say, serverEnvironment } from './local';
 import { type Served, serve } from './serve';
 
-/** What a benchmark gets: a database of its own and the built server on it. */
-export type Bench = { database: OpenDatabase; served: Served };
+/** What a benchmark gets: a database of its own, the built server on it, and what else the command line says. */
+export type Bench = { database: OpenDatabase; served: Served; args: string[] };
 
 const BENCHES: Record<string, () => Promise<{ run: (bench: Bench) => Promise<void> }>> = {
   import: () => import('@/tests/bench/import'),
   analytics: () => import('@/tests/bench/analytics'),
+  pages: () => import('@/tests/bench/pages'),
 };
 
 /** `npm run bench` measures everything, `npm run bench -- import` one thing. Figures go to standard output. */
 const main = async (): Promise<void> => {
-  const [wanted] = process.argv.slice(2);
+  const [wanted, ...args] = process.argv.slice(2);
   const names = Object.keys(BENCHES).filter((name) => !wanted || name === wanted);
   if (!names.length)
     throw new Error(`There is no bench “${wanted}”: say ${Object.keys(BENCHES).join(', ')} or nothing.`);
@@ -27,7 +28,7 @@ const main = async (): Promise<void> => {
   process.on('exit', () => served.process.kill('SIGKILL'));
   for (const name of names) {
     const bench = await BENCHES[name]?.();
-    await bench?.run({ database, served });
+    await bench?.run({ database, served, args });
   }
 };
 

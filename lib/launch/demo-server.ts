@@ -6,11 +6,9 @@ import { freePort } from '@/lib/ports';
 import { DEMO_SIGN_INS, seedDemoIfEmpty } from '@/seed/demo';
 import { addEmptyCompany } from '@/tests/support/browser-company';
 import { buildIfChanged } from './build';
+import { CHROMIUM } from './chromium';
 import { enter, say, serverEnvironment } from './local';
 import { serve } from './serve';
-
-/** Debian's browser, which Playwright is pointed at. */
-export const CHROMIUM = '/usr/bin/chromium';
 
 /** The built application on a database of its own, for a browser to visit. */
 export type DemoServer = { address: string; signIns: { role: string; email: string; password: string }[] };

@@ -1,6 +1,7 @@
 import { z } from 'zod';
 import { runNode } from '../children';
-import { CHROMIUM, type DemoServer, withDemoServer } from '../demo-server';
+import { CHROMIUM } from '../chromium';
+import { type DemoServer, withDemoServer } from '../demo-server';
 import { readReport, reportFile } from './report';
 import { counted, notRun, type Tally } from './tally';
 
