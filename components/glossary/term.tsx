@@ -20,7 +20,7 @@ type TermProps = {
  */
 export const Term = ({ id, children, className }: TermProps) => {
   const button = useRef<HTMLButtonElement>(null);
-  const { open, pressed, close, press, rest, leave, stay } = useTermOpening();
+  const { open, pressed, wasPressed, close, press, rest, leave, stay } = useTermOpening();
   const marked = children === undefined;
   return (
     <Radix.Root open={open} onOpenChange={(next) => (next ? undefined : close())}>
@@ -64,7 +64,7 @@ export const Term = ({ id, children, className }: TermProps) => {
           onOpenAutoFocus={(event) => (pressed ? undefined : event.preventDefault())}
           onCloseAutoFocus={(event) => {
             event.preventDefault();
-            if (pressed) button.current?.focus();
+            if (wasPressed()) button.current?.focus();
           }}
           // The word's own press decides, or it would close here and open again there.
           onInteractOutside={(event) => {

@@ -7,6 +7,11 @@ const LEAVE_MS = 250;
 /** Whether a meaning is open, and by what: a press keeps it until it is put away, a resting mouse while it stays. */
 export const useTermOpening = () => {
   const [openedBy, setOpenedBy] = useState<'press' | 'mouse' | null>(null);
+  // Once it is put away nothing else tells any more what had opened it.
+  const lastOpenedBy = useRef(openedBy);
+  useEffect(() => {
+    if (openedBy) lastOpenedBy.current = openedBy;
+  }, [openedBy]);
   const timer = useRef<number | undefined>(undefined);
   useEffect(() => () => window.clearTimeout(timer.current), []);
   const after = (ms: number, act: () => void) => {
@@ -17,6 +22,7 @@ export const useTermOpening = () => {
   return {
     open: openedBy !== null,
     pressed: openedBy === 'press',
+    wasPressed: () => lastOpenedBy.current === 'press',
     close: () => setOpenedBy(null),
     press: () => {
       window.clearTimeout(timer.current);

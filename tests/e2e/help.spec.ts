@@ -86,6 +86,8 @@ test.describe('the first page of the day', () => {
     expect(count).toBeGreaterThan(0);
     await item.getByRole('link').click();
     await expect(page).toHaveURL(/\/low-recoveries\?from=/);
-    await expect(page.getByRole('heading', { level: 1 })).toContainText(new RegExp(`^${count} of`));
+    await expect(page.getByRole('heading', { level: 1 })).toContainText(new RegExp(`^${count} of`), {
+      timeout: 30_000,
+    });
   });
 });
