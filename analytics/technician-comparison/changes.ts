@@ -14,6 +14,9 @@ export type Change = {
   share: number;
   low: number;
   high: number;
+  /** Mean share of colleagues' full pulls that he was off by, before and since. */
+  before: number;
+  after: number;
   p: number;
   /** Final vacuum against that before, in usual deviations (above 0 is shallower); null where too few are told. */
   shallower: number | null;
@@ -165,6 +168,8 @@ export const changes = (columns: Columns, chances: JobChances, reasons: Uint8Arr
         share,
         low: share - Z_95 * error,
         high: share + Z_95 * error,
+        before: before.mean,
+        after: after.mean,
         p: Math.min(1, step.p * people),
         shallower,
         cause: cause === 'scale' && !drift ? 'open' : cause,

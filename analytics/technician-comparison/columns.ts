@@ -58,12 +58,22 @@ const SIZES_KG = [4.5359237, 11.33980925, LARGE_PLANT_KG];
 /** Recoveries of a size below which it is not told from the other sizes of its category. */
 const LEAST_OF_SIZE = 80;
 
+const sizeOf = (fullChargeKg: number): number => {
+  let size = 0;
+  while (size < SIZES_KG.length && fullChargeKg >= (SIZES_KG[size] ?? 0)) size += 1;
+  return size;
+};
+
 /** Kinds by name: size by size where there are enough, else by category and whether large plant. */
 const kindNames = (recoveries: readonly ComparedRecovery[]): string[] => {
+  const sizes = new Map<string | null, string[]>();
   const fine = recoveries.map(({ category, fullChargeKg }) => {
-    let size = 0;
-    while (size < SIZES_KG.length && fullChargeKg >= (SIZES_KG[size] ?? 0)) size += 1;
-    return `${category}|${size}`;
+    let names = sizes.get(category);
+    if (!names) {
+      names = [0, 1, 2, 3].map((size) => `${category}|${size}`);
+      sizes.set(category, names);
+    }
+    return names[sizeOf(fullChargeKg)] ?? '';
   });
   const counts = new Map<string, number>();
   for (const name of fine) counts.set(name, (counts.get(name) ?? 0) + 1);

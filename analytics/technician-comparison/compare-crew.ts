@@ -19,6 +19,9 @@ export type CrewComparison = {
   /** By job: why it does not count for the judgement, or COUNTS. */
   reasons: Uint8Array;
   sums: PersonSums[];
+  /** By job, what colleagues' like jobs gave on units that did not come short, and the usual variance of one about it. */
+  expected: Float64Array;
+  usualVariance: number;
   plain: PlainEffects;
   evidence: CrewEvidence;
   effects: FairEffect[];
@@ -85,7 +88,7 @@ export const compareCrew = (
         )
       : first;
 
-  const sums = personSums(columns, chances, reasons);
+  const { technicians: sums, expected, usualVariance } = personSums(columns, chances, reasons);
   const plain = plainEffects(columns, reasons);
   const evidence = crewEvidence(sums, plain.technicians);
   const effects = sums.map((own, person) => {
@@ -105,6 +108,8 @@ export const compareCrew = (
     chances,
     reasons,
     sums,
+    expected,
+    usualVariance,
     plain,
     evidence,
     effects,

@@ -23,7 +23,7 @@ export type JobChances = {
   comparable: Uint8Array;
 };
 
-const ROUNDS = 12;
+const ROUNDS = 9;
 /** Weight of colleagues' full pulls of a kind from which on a job is compared at all. */
 const LEAST_OTHERS = 8;
 const PRIOR_YIELDS = 5;
@@ -83,11 +83,9 @@ const weighJobs = (columns: Columns, standards: Standards, out: JobChances): voi
   };
   const chances: Chances = { short: 0, early: 0 };
   for (let at = 0; at < columns.count; at++) {
-    const [kind, person, vacuumKind] = [
-      columns.kind[at] ?? 0,
-      columns.technician[at] ?? 0,
-      columns.vacuumKind[at] ?? 0,
-    ];
+    const kind = columns.kind[at] ?? 0;
+    const person = columns.technician[at] ?? 0;
+    const vacuumKind = columns.vacuumKind[at] ?? 0;
     const full = standards.yields[kind * people + person] ?? 1;
     const usual = standards.vacuumDeviations[vacuumKind] ?? 0;
     const kpa = (columns.vacuums[at] ?? 0) - (standards.vacuums[vacuumKind * people + person] ?? 0);
@@ -125,7 +123,8 @@ const renewStandards = (columns: Columns, standards: Standards, out: JobChances,
   for (let at = 0; at < columns.count; at++) {
     if (!counts[at]) continue;
     const person = columns.technician[at] ?? 0;
-    const [shortChance, earlyChance] = [out.short[at] ?? 0, out.early[at] ?? 0];
+    const shortChance = out.short[at] ?? 0;
+    const earlyChance = out.early[at] ?? 0;
     full.add(columns.kind[at] ?? 0, person, 1 - shortChance - earlyChance, columns.yields[at] ?? 0);
     if (!Number.isNaN(out.shallower[at] ?? Number.NaN))
       vacuum.add(columns.vacuumKind[at] ?? 0, person, 1 - earlyChance, columns.vacuums[at] ?? 0);
@@ -164,7 +163,8 @@ const renewLevels = (columns: Columns, standards: Standards, out: JobChances, co
   for (let at = 0; at < columns.count; at++) {
     if (!counts[at] || !out.comparable[at]) continue;
     const person = columns.technician[at] ?? 0;
-    const [shortChance, earlyChance] = [out.short[at] ?? 0, out.early[at] ?? 0];
+    const shortChance = out.short[at] ?? 0;
+    const earlyChance = out.early[at] ?? 0;
     const weight = 1 - shortChance - earlyChance;
     yieldSum[person] = (yieldSum[person] ?? 0) + weight * differenceAt(at, person);
     yieldWeight[person] = (yieldWeight[person] ?? 0) + weight;
@@ -180,7 +180,8 @@ const renewLevels = (columns: Columns, standards: Standards, out: JobChances, co
   let [allSquares, allWeights] = [0, 0];
   for (let at = 0; at < columns.count; at++) {
     if (!counts[at]) continue;
-    const [kind, person] = [columns.kind[at] ?? 0, columns.technician[at] ?? 0];
+    const kind = columns.kind[at] ?? 0;
+    const person = columns.technician[at] ?? 0;
     const weight = 1 - (out.short[at] ?? 0) - (out.early[at] ?? 0);
     const square = weight * (differenceAt(at, person) - (standards.ownYield[person] ?? 0)) ** 2;
     squares[kind] = (squares[kind] ?? 0) + square;

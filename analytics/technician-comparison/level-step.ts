@@ -39,7 +39,8 @@ export const levelStep = ({ values, weights }: Sequence, deviation: number): Lev
     sumBefore += (weights[at - 1] ?? 0) * (values[at - 1] ?? 0);
     const weightAfter = weight - weightBefore;
     if (weightBefore < LEAST_WEIGHT || weightAfter < LEAST_WEIGHT) continue;
-    const [before, after] = [sumBefore / weightBefore, (sum - sumBefore) / weightAfter];
+    const before = sumBefore / weightBefore;
+    const after = (sum - sumBefore) / weightAfter;
     const standardError = deviation * Math.sqrt(1 / weightBefore + 1 / weightAfter);
     const score = Math.abs(after - before) / standardError;
     if (best === null || score > best.score)

@@ -70,8 +70,11 @@ class MomentSums {
 export const standardErrorOf = ({ weight, variance, squaredWeights, doubt }: Moments): number =>
   weight > 0 ? Math.sqrt(variance * squaredWeights + doubt) / weight : Number.POSITIVE_INFINITY;
 
+/** Sums by technician, and by job what colleagues' jobs on such units gave (those that came short left out). */
+export type CrewSums = { technicians: PersonSums[]; expected: Float64Array; usualVariance: number };
+
 /** Sums by technician over the jobs that count, against what colleagues' jobs of the kind gave. */
-export const personSums = (columns: Columns, chances: JobChances, reasons: Uint8Array): PersonSums[] => {
+export const personSums = (columns: Columns, chances: JobChances, reasons: Uint8Array): CrewSums => {
   const { count, kind, technician, yields } = columns;
   const people = columns.technicians.length;
   const present = new SumsWithout(columns.kinds, people);
@@ -82,7 +85,8 @@ export const personSums = (columns: Columns, chances: JobChances, reasons: Uint8
   const spread = new MomentSums();
   const expected = new Float64Array(count);
   for (let at = 0; at < count; at++) {
-    const [k, t] = [kind[at] ?? 0, technician[at] ?? 0];
+    const k = kind[at] ?? 0;
+    const t = technician[at] ?? 0;
     const own = present.expected(k, t, PRIOR_YIELDS);
     expected[at] = own;
     if (reasons[at] === COUNTS && chances.comparable[at])
@@ -110,7 +114,8 @@ export const personSums = (columns: Columns, chances: JobChances, reasons: Uint8
       own.weakJobs += 1;
       continue;
     }
-    const [short, early] = [chances.short[at] ?? 0, chances.early[at] ?? 0];
+    const short = chances.short[at] ?? 0;
+    const early = chances.early[at] ?? 0;
     const full = 1 - short - early;
     own.full.add(full, (yields[at] ?? 0) - (chances.fullYield[at] ?? 0), (chances.yieldDeviation[at] ?? 0) ** 2);
     own.present.add(1 - short, (yields[at] ?? 0) - (expected[at] ?? 0), usualPresent);
@@ -123,7 +128,7 @@ export const personSums = (columns: Columns, chances: JobChances, reasons: Uint8
     own.early += early;
     own.earlyOf += 1 - short;
   }
-  return sums.map(({ full, present: there, vacuum, vacuumKpa, expected: sum, ...own }) => ({
+  const technicians = sums.map(({ full, present: there, vacuum, vacuumKpa, expected: sum, ...own }) => ({
     ...own,
     presentExpected: sum / Math.max(1, own.jobs - own.weakJobs),
     full: full.moments(),
@@ -131,4 +136,5 @@ export const personSums = (columns: Columns, chances: JobChances, reasons: Uint8
     vacuum: vacuum.moments(),
     vacuumKpa: vacuumKpa.moments(),
   }));
+  return { technicians, expected, usualVariance: usualPresent };
 };

@@ -24,6 +24,8 @@ export type PlainEffects = {
 const PRIOR_JOBS = 5;
 const PRIOR_RECORDS = 20;
 const OWN_VARIANCE_FROM = 10;
+/** Variance that differences of equal jobs show by rounding alone. */
+const ROUNDING = 1e-18;
 
 /**
  * The effects of `statistics/comparison/technician-effects`, to the same figures, from columns: sections of a crew's
@@ -42,10 +44,11 @@ export const plainEffects = (columns: Columns, reasons: Uint8Array): PlainEffect
   const jobs = new Float64Array(people);
   const weak = new Float64Array(people);
   const [sum, squares] = [new Float64Array(people), new Float64Array(people)];
-  const [expectedSum] = [new Float64Array(people)];
+  const expectedSum = new Float64Array(people);
   const [cellJobs, cellSum, cellSquares] = [new Float64Array(cells), new Float64Array(cells), new Float64Array(cells)];
   for (let at = 0; at < count; at++) {
-    const [c, t] = [cell[at] ?? 0, technician[at] ?? 0];
+    const c = cell[at] ?? 0;
+    const t = technician[at] ?? 0;
     const base =
       byType.weightOfOthers(jobType[at] ?? 0, t) > 0 ? byType.expected(jobType[at] ?? 0, t, 0) : byType.overall(t);
     const own = byCell.expectedTowards(c, t, PRIOR_JOBS, base);
@@ -78,7 +81,7 @@ export const plainEffects = (columns: Columns, reasons: Uint8Array): PlainEffect
   for (let at = 0; at < count; at++) {
     if (reasons[at] !== COUNTS) continue;
     const t = technician[at] ?? 0;
-    const weight = 1 / Math.max(variances[cell[at] ?? 0] ?? 0, Number.MIN_VALUE);
+    const weight = 1 / Math.max(variances[cell[at] ?? 0] ?? 0, ROUNDING);
     weights[t] = (weights[t] ?? 0) + weight;
     weighted[t] = (weighted[t] ?? 0) + weight * ((yields[at] ?? 0) - (expected[at] ?? 0));
   }

@@ -1,0 +1,27 @@
+import { compareTechnicians } from '@/analytics/technician-comparison/compare-technicians';
+import { simulateCompany } from '@/seed/simulation/simulate-company';
+import { comparedRecoveriesOf } from './simulated';
+
+const RECORDS = 100_000;
+const TECHNICIANS = 30;
+const RUNS = 5;
+
+/** Pure computing of a large company: the records of several, dealt out to thirty technicians. */
+export const measureSpeed = async (): Promise<void> => {
+  const one = await comparedRecoveriesOf(simulateCompany('speed', { size: 20_000 }).file);
+  const many = Array.from({ length: Math.ceil(RECORDS / one.length) }, () => one)
+    .flat()
+    .slice(0, RECORDS)
+    .map((job, at) => ({ ...job, technicianId: `${job.technicianId} ${at % 3}` }))
+    .sort((a, b) => (a.recoveredOn < b.recoveredOn ? -1 : Number(a.recoveredOn > b.recoveredOn)));
+  const names = [...new Set(many.map(({ technicianId }) => technicianId))];
+  const folded = many.map((job) => ({ ...job, technicianId: String(names.indexOf(job.technicianId) % TECHNICIANS) }));
+  const times = Array.from({ length: RUNS }, () => {
+    const from = performance.now();
+    compareTechnicians(folded);
+    return performance.now() - from;
+  }).sort((a, b) => a - b);
+  console.log(
+    `\n${folded.length} records, ${TECHNICIANS} technicians: ${Math.round(times[Math.floor(RUNS / 2)] ?? 0)} ms, median of ${RUNS}`,
+  );
+};
