@@ -1,4 +1,4 @@
-import type { ApplianceCategory, DisplayUnit, JobType, Role } from './vocabulary';
+import type { AdditionReason, ApplianceCategory, DisplayUnit, JobType, LeakRateMethod, Role } from './vocabulary';
 
 /** Words for the closed lists of the vocabulary, as they stand inside a sentence. */
 export const CATEGORY_NAMES: Record<ApplianceCategory, string> = {
@@ -36,3 +36,18 @@ export const ROLE_PURPOSES: Record<Role, string> = {
 };
 
 export const UNIT_NAMES: Record<DisplayUnit, string> = { lb: 'pounds', kg: 'kilograms' };
+
+/** Why refrigerant was added, as people read it. */
+export const ADDITION_REASON_NAMES: Record<AdditionReason, string> = {
+  leak_top_up: 'leak or service top-up',
+  initial_charge: 'first charge at installation',
+  retrofit: 'retrofit',
+  seasonal_variance: 'seasonal variance',
+  unknown: 'not known',
+};
+
+/** The two ways to compute a leak rate, as people read them. */
+export const LEAK_RATE_METHOD_NAMES: Record<LeakRateMethod, string> = {
+  annualizing: 'annualizing method',
+  rolling_average: 'rolling average method',
+};

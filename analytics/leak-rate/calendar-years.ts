@@ -1,9 +1,7 @@
 import { requirePositive } from '@/analytics/statistics/checked';
 import { groupBy } from '@/analytics/statistics/group-by';
 import { type ChargeAddition, countsAsLeaked } from './addition-events';
-
-/** From so many percent of its full charge in a calendar year an appliance is a chronic leaker: 40 CFR 82.157(j). */
-export const CHRONIC_PERCENT = 125;
+import { CHRONIC_PERCENT } from './chronic-percent';
 
 export type CalendarYear = { year: number; addedKg: number; percent: number; chronic: boolean };
 

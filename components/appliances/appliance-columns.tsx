@@ -1,7 +1,15 @@
 import Link from 'next/link';
 import type { ApplianceRow } from '@/analytics/appliances/contract';
 import { onlyOf, type ScopeSelection } from '@/analytics/scope-address';
-import { FIRST, type GroupedColumn, LAST, LOW, MASS_COLUMNS, RECOVERIES } from '@/components/grouped-figures/column';
+import {
+  FIRST,
+  type GroupedColumn,
+  LAST,
+  LEAK_SUSPICION,
+  LOW,
+  MASS_COLUMNS,
+  RECOVERIES,
+} from '@/components/grouped-figures/column';
 import { choiceName } from '@/components/scope/wording';
 import { formatDesignation } from '@/lib/format';
 
@@ -31,6 +39,7 @@ export const APPLIANCE_COLUMNS: readonly GroupedColumn<ApplianceRow>[] = [
   },
   { id: 'site', label: 'Site', kind: 'text', value: ({ site }) => site, onlyInFile: true },
   LOW,
+  LEAK_SUSPICION,
   RECOVERIES,
   {
     id: 'refrigerant',

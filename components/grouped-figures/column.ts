@@ -1,6 +1,7 @@
 import type { ReactNode } from 'react';
 import { MEASURE_UNITS, type Measure } from '@/analytics/figures/measures';
 import type { GroupFigures } from '@/analytics/grouped-figures/contract';
+import { chanceText } from '@/analytics/leak-suspicion/sentence';
 import type { ScopeSelection } from '@/analytics/scope-address';
 import type { FileColumn } from '@/components/files/file-table';
 import type { TermId } from '@/lib/glossary/terms';
@@ -70,4 +71,13 @@ export const LOW: GroupedColumn<{ lowRecoveries: number }> = {
   measure: 'flagged',
   term: 'far-below-like-jobs',
   value: ({ lowRecoveries }) => lowRecoveries,
+};
+
+/** How likely the group's most suspected unit leaks, from its visits of the last 36 months. */
+export const LEAK_SUSPICION: GroupedColumn<{ leakSuspicion: number | null }> = {
+  id: 'leakSuspicion',
+  label: 'Leaks with',
+  kind: 'share',
+  value: ({ leakSuspicion }) => leakSuspicion,
+  draw: ({ leakSuspicion }) => (leakSuspicion === null ? '—' : chanceText(leakSuspicion)),
 };

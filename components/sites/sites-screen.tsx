@@ -31,6 +31,14 @@ const SITES: GroupedKind<SiteRow> = {
     },
     RECOVERIES,
     LOW,
+    {
+      id: 'suspected',
+      label: 'Suspected leaks',
+      kind: 'count',
+      value: ({ suspected }) => suspected,
+      draw: ({ suspected, moreThanChance }) =>
+        moreThanChance ? <span className="marked">{suspected}</span> : String(suspected),
+    },
     measured<SiteRow>('appliances', 'Appliances'),
     ...MASS_COLUMNS,
     LAST,

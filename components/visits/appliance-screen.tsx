@@ -6,10 +6,12 @@ import type { ApplianceHistory } from '@/analytics/visits/contract';
 import { lowVisitsNote, nameplateChanges, nameplateNote, visitsAnswer } from '@/analytics/visits/sentence';
 import { FigurePage } from '@/components/figures/figure-page';
 import { FigureSentence } from '@/components/figures/figure-sentence';
+import { ApplianceLeaksSheets } from '@/components/leaks/appliance-leaks';
 import { useScope } from '@/components/scope/use-scope';
 import { choiceName } from '@/components/scope/wording';
 import { PageHead } from '@/components/ui/page-head';
 import { Empty } from '@/components/ui/states';
+import { useMay } from '@/components/viewer-context';
 import { formatDay, formatDesignation } from '@/lib/format';
 import { VisitsSheet } from './visits-sheet';
 
@@ -20,6 +22,7 @@ export const ApplianceScreen = ({ history }: { history: ApplianceHistory }) => {
   const { unit } = scope;
   const name = `${formatDesignation(appliance)} at ${site}`;
   const own = { ...onlyOf(onlyOf(EVERY_RECORD, 'site', [site]), 'appliance', [appliance]), unit };
+  const mayReadLeaks = useMay('leaks:read');
   const changed = new Set(nameplateChanges(visits).map(({ visit }) => visit.recoveryId));
   return (
     <FigurePage>
@@ -45,6 +48,9 @@ export const ApplianceScreen = ({ history }: { history: ApplianceHistory }) => {
         ) : (
           <Empty title="No visit is recorded">A recovery from this unit will stand here once it is written down.</Empty>
         )}
+        {mayReadLeaks ? (
+          <ApplianceLeaksSheets applianceId={history.applianceId} name={name} visits={visits} unit={unit} />
+        ) : null}
       </div>
     </FigurePage>
   );

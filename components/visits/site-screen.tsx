@@ -13,19 +13,22 @@ import { FigureSentence } from '@/components/figures/figure-sentence';
 import { FileButtons } from '@/components/files/file-buttons';
 import { groupedFile } from '@/components/grouped-figures/grouped-file';
 import { GroupedTable } from '@/components/grouped-figures/grouped-table';
+import { SiteLeaksSheet } from '@/components/leaks/site-leaks';
 import { useScope } from '@/components/scope/use-scope';
 import { PageHead } from '@/components/ui/page-head';
 import { Sheet } from '@/components/ui/sheet';
 import { Empty, Failed, Loading } from '@/components/ui/states';
+import { useMay } from '@/components/viewer-context';
 import { VisitsSheet } from './visits-sheet';
 
 /** One site: what it gave over the whole time, its units, and each visit. */
-export const SiteScreen = ({ history: { site, address, visits } }: { history: SiteHistory }) => {
+export const SiteScreen = ({ history: { siteId, site, address, visits } }: { history: SiteHistory }) => {
   const { scope } = useScope();
   const { unit } = scope;
   const own = useMemo(() => ({ ...onlyOf(EVERY_RECORD, 'site', [site]), unit }), [site, unit]);
   const query = useMemo(() => scopeQuery(own), [own]);
   const { data, error, isPlaceholderData, refetch } = useApplianceRecoveries(query);
+  const mayReadLeaks = useMay('leaks:read');
   const label = `Appliances at ${site}`;
   return (
     <FigurePage>
@@ -69,6 +72,7 @@ export const SiteScreen = ({ history: { site, address, visits } }: { history: Si
                 <Loading minHeight={240} />
               )}
             </Sheet>
+            {mayReadLeaks ? <SiteLeaksSheet siteId={siteId} site={site} unit={unit} /> : null}
             <VisitsSheet place={site} visits={visits} unit={unit} withAppliance />
           </>
         ) : (
