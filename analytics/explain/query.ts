@@ -25,7 +25,7 @@ const NOTHING = {
 
 /** How fresh the records are: the last day that has one, and when one was last written. */
 const getFresh = async (tx: Tx): Promise<Explained['fresh']> => {
-  const [last] = await tx.select({ on: sql<string | null>`max(${f.recoveredOn})` }).from(f);
+  const [last] = await tx.select({ on: f.recoveredOn }).from(f).orderBy(desc(f.recoveredOn)).limit(1);
   const [change] = await tx
     .select({ at: history.changedAt })
     .from(history)

@@ -15,7 +15,7 @@ import { onDays, sourcesOf, sumCo2e, sumFigures, sumKeys } from './sums';
 
 /** Day of the company's first record; null when there is none. */
 const firstRecord = async (tx: Tx): Promise<string | null> => {
-  const [first] = await tx.select({ on: sql<string | null>`min(${f.recoveredOn})` }).from(f);
+  const [first] = await tx.select({ on: f.recoveredOn }).from(f).orderBy(f.recoveredOn).limit(1);
   return first?.on ?? null;
 };
 

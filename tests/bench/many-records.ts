@@ -47,7 +47,7 @@ const FILL = `
          (array['comfort_cooling', 'commercial_refrigeration', 'small_appliance', null])[1 + g % 4],
          (array['service', 'repair', 'conversion', 'disposal'])[1 + g / 7 % 4],
          (array['R-22', 'R-410A', 'R-134a', 'R-404A', 'R-407C', 'R-32', 'R-454B', 'R-448A'])[1 + g / 3 % 8],
-         1 + g % 17, round((1 + g % 17) * case when g % 53 = 0 then 0.02 else 0.35 + (g::bigint * 104729 % 6500) / 10000.0 end, 4), 'kg',
+         1 + g % 17, round((1 + g % 17) * case when g % 53 = 0 then 0.005 else 0.35 + (g::bigint * 104729 % 6500) / 10000.0 end, 4), 'kg',
          101.325 - g % 12, g % 16
   from generate_series(1, $2::int) g
   join crew on crew.n = g % 30 join place on place.n = g % 400 join unit on unit.site_id = place.id join branch on branch.n = g % 3`;
