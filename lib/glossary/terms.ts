@@ -1,5 +1,6 @@
 import { APPLIANCES } from './appliances';
 import { CYLINDERS } from './cylinders';
+import { LEAKS } from './leaks';
 import { STATISTICS } from './statistics';
 import type { GlossaryTerm } from './term';
 import { UNITS } from './units';
@@ -8,6 +9,7 @@ import { WORK } from './work';
 const PARTS = [
   { title: 'The work', terms: WORK },
   { title: 'The appliance', terms: APPLIANCES },
+  { title: 'Leaks', terms: LEAKS },
   { title: 'The cylinder and what comes after', terms: CYLINDERS },
   { title: 'How figures are judged', terms: STATISTICS },
   { title: 'Units', terms: UNITS },
