@@ -1,11 +1,9 @@
 import 'server-only';
 import { createHash } from 'node:crypto';
-import { promisify } from 'node:util';
-import { gzip } from 'node:zlib';
 import { type AskingViewer, scopeOf } from '@/lib/auth/viewer';
 
-/** An answer ready to be sent: its bytes, the same compressed, and a name that only this content has (a weak entity tag: one for both). */
-export type KeptAnswer = { etag: string; body: Uint8Array<ArrayBuffer>; gzipped: Uint8Array<ArrayBuffer> };
+/** An answer ready to be sent: its bytes, and a name that only this content has (a weak entity tag: it may be compressed). */
+export type KeptAnswer = { etag: string; body: Uint8Array<ArrayBuffer> };
 
 /** Bytes of answers that one process keeps; the ones unused for longest make room. */
 const MOST_BYTES = 64 * 1024 * 1024;
@@ -26,9 +24,9 @@ const renew = (key: string, entry: Entry) => {
 };
 
 /** Counts an answer once its size is known; the oldest ones make room for it. */
-const weigh = (key: string, entry: Entry, { body, gzipped }: KeptAnswer) => {
+const weigh = (key: string, entry: Entry, { body }: KeptAnswer) => {
   if (entries.get(key) !== entry) return;
-  entry.bytes = body.length + gzipped.length + key.length;
+  entry.bytes = body.length + key.length;
   keptBytes += entry.bytes;
   for (const oldest of entries.keys()) {
     if (keptBytes <= MOST_BYTES) break;
@@ -36,12 +34,10 @@ const weigh = (key: string, entry: Entry, { body, gzipped }: KeptAnswer) => {
   }
 };
 
-const compress = promisify(gzip);
-
-const ready = async (text: string): Promise<KeptAnswer> => {
+const ready = (text: string): KeptAnswer => {
   const body = new Uint8Array(Buffer.from(text));
   const etag = `W/"${createHash('sha256').update(body).digest('base64url')}"`;
-  return { etag, body, gzipped: new Uint8Array(await compress(body)) };
+  return { etag, body };
 };
 
 /**

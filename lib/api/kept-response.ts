@@ -2,14 +2,15 @@ import 'server-only';
 import type { AskingViewer } from '@/lib/auth/viewer';
 import { type KeptAnswer, keptAnswer } from './kept-answers';
 
-/** A kept answer, compressed where that is taken; 304 without a body to whoever says that he holds it already. */
-const keptResponse = (request: Request, { etag, body, gzipped }: KeptAnswer): Response => {
-  const headers = new Headers({ etag, 'cache-control': 'private, no-store', vary: 'accept-encoding' });
+/**
+ * A kept answer; 304 without a body to whoever says that he holds it already. It leaves uncompressed: Next drops the
+ * `content-encoding` of a handler and compresses what it sends itself, so that a packed answer would be packed twice.
+ */
+const keptResponse = (request: Request, { etag, body }: KeptAnswer): Response => {
+  const headers = new Headers({ etag, 'cache-control': 'private, no-store' });
   if (request.headers.get('if-none-match')?.includes(etag)) return new Response(null, { status: 304, headers });
   headers.set('content-type', 'application/json');
-  if (!/\bgzip\b/.test(request.headers.get('accept-encoding') ?? '')) return new Response(body, { headers });
-  headers.set('content-encoding', 'gzip');
-  return new Response(gzipped, { headers });
+  return new Response(body, { headers });
 };
 
 /**

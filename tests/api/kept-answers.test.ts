@@ -1,4 +1,3 @@
-import { gunzipSync } from 'node:zlib';
 import { beforeAll, expect, test } from 'vitest';
 import { GET } from '@/app/api/trends/monthly/route';
 import { endSession } from '@/lib/auth/sessions';
@@ -19,14 +18,11 @@ beforeAll(async () => {
   ({ cookie, sessionToken } = await signIn(personId));
 });
 
-// RFC 9110, 8.4 and 8.8.3: a coding only for who accepts it, one weak entity tag for both codings.
-test('an answer comes compressed to who takes it, and says the same', async () => {
-  const plain = await ask();
+// Next drops a handler's content-encoding and compresses what it sends: a packed answer would reach the browser packed twice.
+test('an answer leaves the handler as plain JSON, whatever codings are taken', async () => {
   const packed = await ask({ 'accept-encoding': 'br, gzip' });
-  expect(plain.headers.get('content-encoding')).toBeNull();
-  expect(packed.headers.get('content-encoding')).toBe('gzip');
-  expect(gunzipSync(await packed.arrayBuffer()).toString()).toBe(await plain.text());
-  expect(packed.headers.get('etag')).toBe(plain.headers.get('etag'));
+  expect(packed.headers.get('content-encoding')).toBeNull();
+  expect(await packed.json()).toEqual(await (await ask()).json());
 });
 
 // RFC 9110, 13.1.2: If-None-Match.
