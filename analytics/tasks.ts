@@ -1,6 +1,7 @@
 import 'server-only';
 import type { TaskList } from 'graphile-worker';
-import { renewalPayload, renewFlags } from '@/analytics/flag-renewal/renew';
+import { renewalPayload } from '@/analytics/flag-renewal/renew';
+import { renewApart } from '@/analytics/flag-renewal/renew-apart';
 import { requestDueFlags } from '@/analytics/flag-renewal/request-due';
 import { jobHandler } from '@/lib/jobs/task';
 import { TASKS } from '@/lib/jobs/tasks';
@@ -12,7 +13,7 @@ export const ALL_TASKS: TaskList = {
   ...TASKS,
   'renew-flags': jobHandler({
     payload: renewalPayload,
-    run: renewFlags,
+    run: renewApart,
     // What is due stays noted, so the next change or start takes it up again.
     giveUp: async ({ companyId }) => log.error({ companyId }, 'the flags were not renewed'),
   }),

@@ -1,9 +1,15 @@
 import 'server-only';
 import type { PoolClient } from 'pg';
-import type { Baselines } from './judging';
+import type { KeptContent } from './judging';
 
 /** What is usual at the company as the last renewal of everything found it. */
-export type KeptBaselines = { id: string; judging: string; content: Baselines; judgedSingly: number; records: number };
+export type KeptBaselines = {
+  id: string;
+  judging: string;
+  content: KeptContent;
+  judgedSingly: number;
+  records: number;
+};
 
 /** Gives it; null before the first renewal. */
 export const keptBaselines = async (client: PoolClient, companyId: string): Promise<KeptBaselines | null> => {
@@ -21,19 +27,20 @@ export const keepBaselines = async (
   client: PoolClient,
   companyId: string,
   judging: string,
-  baselines: Baselines,
+  content: KeptContent,
 ): Promise<string> => {
   const { rows } = await client.query<{ id: string }>(
     `with same as (
        update flag_baselines b set judged_singly = 0 from flag_renewals r
-       where r.company_id = $1 and b.company_id = $1 and b.id = r.baseline_id and b.judging = $2 and b.content = $3::jsonb
+       where r.company_id = $1 and b.company_id = $1 and b.id = r.baseline_id and b.judging = $2
+         and b.content -> 'usual' = $3::jsonb -> 'usual'
        returning b.id
      ), other as (
        insert into flag_baselines (company_id, judging, content)
        select $1, $2, $3::jsonb where not exists (select from same) returning id
      )
      select id from same union all select id from other`,
-    [companyId, judging, JSON.stringify(baselines)],
+    [companyId, judging, JSON.stringify(content)],
   );
   const [kept] = rows;
   if (!kept) throw new Error('Baselines that were kept have no id');

@@ -45,10 +45,9 @@ const recordOf = async (ref: string) => {
   if (!row) throw new Error(`No record ${ref}`);
   return row;
 };
-const lowRefs = async () =>
-  (await flagsOf(company.companyId))
-    .filter(({ recordRef }) => recordRef.startsWith('L-'))
-    .map((flag) => flag.recordRef);
+const isLow = ({ recordRef, rule }: { recordRef: string; rule: string }): boolean =>
+  recordRef.startsWith('L-') && rule === 'low_unexplained';
+const lowRefs = async () => (await flagsOf(company.companyId)).filter(isLow).map(({ recordRef }) => recordRef);
 const patch = async (ref: string, changes: Record<string, unknown>) => {
   const { id, version } = await recordOf(ref);
   const body = JSON.stringify({ version, reason: 'a typing error', changes });
@@ -127,7 +126,7 @@ describe('one record', () => {
   });
 
   test('that is corrected and still doubtful keeps the flag’s id, person and note', async () => {
-    const before = (await flagsOf(company.companyId)).find(({ recordRef }) => recordRef === 'L-1');
+    const before = (await flagsOf(company.companyId)).find((flag) => isLow(flag) && flag.recordRef === 'L-1');
     await inCompany((tx) =>
       tx
         .update(flags)
@@ -143,7 +142,7 @@ describe('one record', () => {
 });
 
 test('a decided flag stays as it was decided, whatever becomes of the record', async () => {
-  const [decided] = (await flagsOf(company.companyId)).filter(({ recordRef }) => recordRef === 'L-22');
+  const [decided] = (await flagsOf(company.companyId)).filter((flag) => isLow(flag) && flag.recordRef === 'L-22');
   await inCompany((tx) =>
     tx
       .update(flags)
@@ -173,5 +172,7 @@ test('an undone import takes its flags with it', async () => {
   await settle();
   expect((await takeBack(token, id)).status).toBe(200);
   await settle();
-  expect(await flagsOf(company.companyId)).toEqual(before);
+  // A flag that was gone meanwhile has come back under another id.
+  const withoutId = (found: typeof before) => found.map(({ id: _id, ...flag }) => flag);
+  expect(withoutId(await flagsOf(company.companyId))).toEqual(withoutId(before));
 });
