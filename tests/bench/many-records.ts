@@ -25,7 +25,10 @@ export const fillCompany = (adminUrl: string, companyId: string, count: number):
     );
     // Neither history nor foreign keys: the rows are joined from what they point at.
     await admin.query(`set session_replication_role = 'replica'`);
+    // Of a company just made the planner expects one row, and would look through all sites for each record.
+    await admin.query('set enable_nestloop = off');
     await admin.query(FILL, [companyId, count]);
+    await admin.query('reset enable_nestloop');
     await admin.query(`set session_replication_role = 'origin'`);
     await admin.query(
       `select renew_months($1, array_agg(distinct recovered_month)) from recoveries where company_id = $1`,
