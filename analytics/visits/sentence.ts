@@ -31,11 +31,16 @@ export const lowVisitsNote = (visits: readonly Visit[]): string => {
   return `${plural(low.length, 'visit', 'visits')} ${verb} far below like jobs, ${low.length === 1 ? '' : 'the last '}on ${formatDay(last.recoveredOn)}: a reason to look, not a finding.`;
 };
 
+/** One nameplate in pounds and in kilograms differs by the rounding of whoever wrote it down: less than this is no change. */
+const SAME_NAMEPLATE = 0.01;
+
 /** Visits whose nameplate differs from that of the visit before; of one unit, whose visits are in the order of time. */
 export const nameplateChanges = (visits: readonly Visit[]): { visit: Visit; before: number }[] =>
   visits.flatMap((visit, index) => {
     const before = visits[index - 1]?.nameplateCharge;
-    return before !== undefined && before !== visit.nameplateCharge ? [{ visit, before }] : [];
+    if (before === undefined) return [];
+    const apart = Math.abs(visit.nameplateCharge - before) > SAME_NAMEPLATE * Math.max(visit.nameplateCharge, before);
+    return apart ? [{ visit, before }] : [];
   });
 
 /** How often the nameplate of a unit was written down otherwise than before; empty when never. */

@@ -60,6 +60,10 @@ test('an appliance has its own visits in time, entry errors among them and marke
   expect(plain(nameplateNote(history.visits, 'kg'))).toBe(
     'Its nameplate charge was written down differently once: 5.0 kg to 8.0 kg on Mar 2, 2026.',
   );
+  // 8.2 lb is 3.7195 kg: written in kilograms it is the same nameplate.
+  const [visit] = history.visits;
+  const inTwoUnits = visit ? [3.719, 3.72, 3.7].map((nameplateCharge) => ({ ...visit, nameplateCharge })) : [];
+  expect(nameplateChanges(inTwoUnits)).toEqual([]);
   expect(lowVisitsNote(history.visits)).toBe('None of the visits lies far below like jobs.');
   const low = history.visits.map((visit, index) => ({ ...visit, low: index < 2 }));
   expect(plain(lowVisitsNote(low))).toBe(
