@@ -5,7 +5,6 @@ import { LARGE_PLANT_KG } from '@/analytics/monthly-pattern/pattern';
 import type { Scope } from '@/analytics/scope';
 import { inScope } from '@/analytics/scope-query';
 import { appliances, sites, technicians } from '@/db/schema/places';
-import { recoveries as r } from '@/db/schema/recoveries';
 import { recoveryFacts as f } from '@/db/views/recovery-facts';
 import { yieldLimits as limits, lowRecoveries as low } from '@/db/views/yield-limits';
 import { LEAST_LIKE_JOBS } from '@/lib/like-jobs';
@@ -18,26 +17,23 @@ const containing = (text: string): string => `%${text.replace(/[\\%_]/g, '\\$&')
 const isPlain = (text: string): boolean => /^[\x20-\x7e]*$/.test(text);
 
 const inRef = (text: string): SQL =>
-  isPlain(text) ? sql`${r.recordRef} collate "C" ilike ${containing(text)}` : ilike(r.recordRef, containing(text));
+  isPlain(text) ? sql`${f.recordRef} collate "C" ilike ${containing(text)}` : ilike(f.recordRef, containing(text));
 
 /** Rows whose name says the text, looked up once among the few names and not for each record. */
 const inName = (id: SQLWrapper, table: typeof technicians | typeof sites | typeof appliances, text: string): SQL =>
   sql`(${id} in (select ${table.id} from ${table} where ${ilike(table.name, containing(text))})) is true`;
 
 /**
- * Records whose ref, technician, site or appliance says a text. Their ids come first, in one pass over the records: a
- * page of few among many is then not looked for row by row in its order. A trigram index would not help: row-level
- * security lets only leakproof operators near an index before the policy, and LIKE is none.
+ * Records whose ref, technician, site or appliance says a text. A trigram index would not help: row-level security lets
+ * only leakproof operators near an index before the policy, and LIKE is none.
  */
-const found = (text: string): SQL => {
-  const says = or(
+const found = (text: string): SQL | undefined =>
+  or(
     inRef(text),
-    inName(r.technicianId, technicians, text),
-    inName(r.siteId, sites, text),
-    inName(r.applianceId, appliances, text),
+    inName(f.technicianId, technicians, text),
+    inName(f.siteId, sites, text),
+    inName(f.applianceId, appliances, text),
   );
-  return sql`${f.id} = any(array(select ${r.id} from ${r} where ${says}))`;
-};
 
 // IS TRUE keeps a set from being joined: of a company that was never analysed the planner expects one row, and would
 // work the set out anew for each record.
