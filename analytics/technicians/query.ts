@@ -1,10 +1,13 @@
 import 'server-only';
 import { byName, countedInScope, groupFigures, readyFigures } from '@/analytics/grouped-figures/query';
 import { isWhole, type Scope } from '@/analytics/scope';
+import { compareTechnicians, type TechnicianComparison } from '@/analytics/technician-comparison/compare-technicians';
 import type { Tx } from '@/db/client';
 import { recoveredByTechnician as ready } from '@/db/views/recovered-by-group';
 import { recoveryFacts as f } from '@/db/views/recovery-facts';
+import { readComparedRecoveries, readEarlierJobs } from './compared-rows';
 import type { TechnicianRecoveries } from './contract';
+import { judgementRow } from './judgement';
 
 const ofEveryRecord = (tx: Tx) =>
   tx
@@ -12,7 +15,7 @@ const ofEveryRecord = (tx: Tx) =>
     .from(ready)
     .orderBy(byName(ready.name), ready.groupId);
 
-const inScope = (tx: Tx, scope: Scope) =>
+const ofScope = (tx: Tx, scope: Scope) =>
   tx
     .select({ technician: f.technician, technicianId: f.technicianId, ...groupFigures })
     .from(f)
@@ -20,7 +23,37 @@ const inScope = (tx: Tx, scope: Scope) =>
     .groupBy(f.technicianId, f.technician)
     .orderBy(byName(f.technician), f.technicianId);
 
-/** Each technician with a record that counts in scope, by name. */
-export const getTechnicianRecoveries = async (tx: Tx, scope: Scope): Promise<TechnicianRecoveries> => ({
-  items: await (isWhole(scope) ? ofEveryRecord(tx) : inScope(tx, scope)),
+/** The scope with everybody in it. */
+const withoutTechnicians = ({ technician: _named, except, ...scope }: Scope): Scope => {
+  const others = except?.filter((part) => part !== 'technician');
+  return others?.length ? { ...scope, except: others } : scope;
+};
+
+const judgedOn = ({ technicians, crew }: TechnicianComparison): TechnicianRecoveries['judgedOn'] => ({
+  recoveries: technicians.reduce((sum, own) => sum + own.recoveries, 0),
+  technicians: crew.judged,
+  spreadKnown: crew.spreadKnown,
+  centre: crew.centre,
+  normalSpread: crew.normalSpread,
 });
+
+/**
+ * Each technician with a record that counts in scope, by name, and how he compares with all who worked in it: a scope
+ * that names technicians still compares them with the others. `timeZone` is the company's.
+ */
+export const getTechnicianRecoveries = async (
+  tx: Tx,
+  scope: Scope,
+  timeZone: string,
+): Promise<TechnicianRecoveries> => {
+  const rows = await (isWhole(scope) ? ofEveryRecord(tx) : ofScope(tx, scope));
+  const crewScope = withoutTechnicians(scope);
+  const earlierJobs = await readEarlierJobs(tx, crewScope);
+  const comparison = compareTechnicians(await readComparedRecoveries(tx, crewScope, timeZone), { earlierJobs });
+  const byId = new Map(comparison.technicians.map((own) => [own.technicianId, own]));
+  const items = rows.flatMap((row) => {
+    const own = byId.get(row.technicianId);
+    return own ? [{ ...row, ...judgementRow(row.technician, own) }] : [];
+  });
+  return { items, judgedOn: judgedOn(comparison) };
+};
