@@ -43,6 +43,13 @@ export const formatChange = (share: number, digits = 0): string => {
   return share > 0 && /[1-9]/.test(text) ? `+${text}` : text;
 };
 
+/** Points (hundredths of a share) with their sign always said: `+1.0`, `−4.2`; nothing to say is `0.0`. */
+export const formatPoints = (points: number, digits = 1): string => {
+  const text = formatNumber(points, digits);
+  if (!/[1-9]/.test(text)) return text.replace(MINUS, '');
+  return points > 0 ? `+${text}` : text;
+};
+
 const dateParts = (text: string): [year: number, month: number, day: number] => {
   const [year = Number.NaN, month = 1, day = 1] = text.split('-').map(Number);
   return [year, month, day];

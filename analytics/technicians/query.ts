@@ -24,9 +24,15 @@ const ofScope = (tx: Tx, scope: Scope) =>
     .orderBy(byName(f.technician), f.technicianId);
 
 /** The scope with everybody in it. */
-const withoutTechnicians = ({ technician: _named, except, ...scope }: Scope): Scope => {
+export const withoutTechnicians = ({ technician: _named, except, ...scope }: Scope): Scope => {
   const others = except?.filter((part) => part !== 'technician');
   return others?.length ? { ...scope, except: others } : scope;
+};
+
+/** The recoveries of everybody who worked in a scope, and what each did before it. `timeZone` is the company's. */
+export const readCrew = async (tx: Tx, crewScope: Scope, timeZone: string) => {
+  const earlierJobs = await readEarlierJobs(tx, crewScope);
+  return { recoveries: await readComparedRecoveries(tx, crewScope, timeZone), earlierJobs };
 };
 
 const judgedOn = ({ technicians, crew }: TechnicianComparison): TechnicianRecoveries['judgedOn'] => ({
@@ -47,9 +53,8 @@ export const getTechnicianRecoveries = async (
   timeZone: string,
 ): Promise<TechnicianRecoveries> => {
   const rows = await (isWhole(scope) ? ofEveryRecord(tx) : ofScope(tx, scope));
-  const crewScope = withoutTechnicians(scope);
-  const earlierJobs = await readEarlierJobs(tx, crewScope);
-  const comparison = compareTechnicians(await readComparedRecoveries(tx, crewScope, timeZone), { earlierJobs });
+  const { recoveries, earlierJobs } = await readCrew(tx, withoutTechnicians(scope), timeZone);
+  const comparison = compareTechnicians(recoveries, { earlierJobs });
   const byId = new Map(comparison.technicians.map((own) => [own.technicianId, own]));
   const items = rows.flatMap((row) => {
     const own = byId.get(row.technicianId);

@@ -3,11 +3,11 @@ import type { DisplayUnit } from '@/lib/vocabulary';
 
 /**
  * What the cells of a column are: text, `YYYY-MM`, `YYYY-MM-DD`, masses in the table's unit, counts, shares, changes,
- * factors.
+ * factors, points (hundredths of a share, with their sign).
  */
 export type FileColumn = {
   label: string;
-  kind: 'text' | 'month' | 'day' | 'mass' | 'count' | 'share' | 'change' | 'factor';
+  kind: 'text' | 'month' | 'day' | 'mass' | 'count' | 'share' | 'change' | 'factor' | 'points';
 };
 export type FileCell = string | number | null;
 

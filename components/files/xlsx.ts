@@ -1,12 +1,13 @@
 import type { Cell, Row, SheetData } from 'write-excel-file/universal';
 import type { FileCell, FileColumn, FileOrigin, FileTable } from './file-table';
 
-const NUMBER_FORMATS: Record<'mass' | 'count' | 'share' | 'change' | 'factor', string> = {
+const NUMBER_FORMATS: Record<'mass' | 'count' | 'share' | 'change' | 'factor' | 'points', string> = {
   mass: '#,##0.0',
   count: '#,##0',
   share: '0.0%',
   change: '+0%;-0%;0%',
   factor: '0.00',
+  points: '+0.0;-0.0;0.0',
 };
 
 const head = (value: string): Cell => ({ value, type: String, fontWeight: 'bold', wrap: true });

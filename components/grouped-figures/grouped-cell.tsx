@@ -2,7 +2,7 @@ import type { ReactNode } from 'react';
 import { isJudgement } from '@/analytics/figures/measures';
 import type { ScopeSelection } from '@/analytics/scope-address';
 import { FigureLink } from '@/components/figures/figure-link';
-import { formatChange, formatCount, formatDay, formatMass, formatPercent } from '@/lib/format';
+import { formatChange, formatCount, formatDay, formatMass, formatPercent, formatPoints } from '@/lib/format';
 import type { GroupedColumn } from './column';
 
 const textOf = (value: string | number, kind: GroupedColumn<never>['kind'], { unit }: ScopeSelection): string => {
@@ -14,6 +14,8 @@ const textOf = (value: string | number, kind: GroupedColumn<never>['kind'], { un
       return formatPercent(value, 1);
     case 'change':
       return formatChange(value);
+    case 'points':
+      return formatPoints(value);
     default:
       return formatCount(value);
   }

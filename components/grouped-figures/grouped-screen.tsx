@@ -25,6 +25,8 @@ export type GroupedKind<Row> = {
   columns: readonly GroupedColumn<Row>[];
   rowId: (row: Row) => string;
   ownScope: (scope: ScopeSelection, row: Row) => ScopeSelection;
+  /** The answer, where what the groups come to is not what is asked. */
+  answer?: (items: readonly Row[]) => ReactNode;
   /** Said under the answer. */
   sub: (items: readonly Row[]) => ReactNode;
   /** What the columns mean. */
@@ -40,10 +42,12 @@ type GroupedScreenProps<Row> = {
     isPlaceholderData: boolean;
     refetch: () => unknown;
   };
+  /** A picture of the groups, over their table. */
+  picture?: ReactNode;
 };
 
 /** A screen of groups under the scope: what they come to in a sentence, then each of them. */
-export const GroupedScreen = <Row extends GroupFigures>({ kind, scope, answer }: GroupedScreenProps<Row>) => (
+export const GroupedScreen = <Row extends GroupFigures>({ kind, scope, answer, picture }: GroupedScreenProps<Row>) => (
   <ScopedReport
     screen={kind.screen}
     data={answer.data}
@@ -55,9 +59,12 @@ export const GroupedScreen = <Row extends GroupFigures>({ kind, scope, answer }:
     {({ items }) => (
       <>
         <PageHead
-          title={<FigureSentence pieces={groupAnswer(items, kind.words, scope.unit)} scope={scope} />}
+          title={
+            kind.answer?.(items) ?? <FigureSentence pieces={groupAnswer(items, kind.words, scope.unit)} scope={scope} />
+          }
           sub={kind.sub(items)}
         />
+        {picture}
         <Sheet
           title={kind.title}
           aside={`${kind.order}; a heading puts them in another order, every figure opens its records`}

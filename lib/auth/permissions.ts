@@ -4,6 +4,7 @@ import type { Role } from '@/lib/vocabulary';
 export const ACTIONS = [
   'trends:read',
   'technicians:read',
+  'technician:read',
   'sites:read',
   'appliances:read',
   'flags:read',
@@ -24,13 +25,15 @@ export type Action = (typeof ACTIONS)[number];
 
 /**
  * Who may do what. A technician's `records:*` and `coaching:read` reach only what is his own: row-level security
- * narrows his transactions to it (see `technicianId` of the viewer).
+ * narrows his transactions to it (see `technicianId` of the viewer). `technician:read` is the page of one technician; a
+ * technician opens his own only.
  */
 export const PERMISSIONS: Record<Role, readonly Action[]> = {
   owner: ACTIONS,
   operations: [
     'trends:read',
     'technicians:read',
+    'technician:read',
     'sites:read',
     'appliances:read',
     'flags:read',
@@ -49,6 +52,7 @@ export const PERMISSIONS: Record<Role, readonly Action[]> = {
   trainer: [
     'trends:read',
     'technicians:read',
+    'technician:read',
     'sites:read',
     'appliances:read',
     'flags:read',
@@ -61,7 +65,7 @@ export const PERMISSIONS: Record<Role, readonly Action[]> = {
     'coaching:write',
     'leaks:read',
   ],
-  technician: ['records:read', 'records:write', 'records:export', 'coaching:read'],
+  technician: ['records:read', 'records:write', 'records:export', 'coaching:read', 'technician:read'],
   office: [
     'trends:read',
     'sites:read',

@@ -241,6 +241,12 @@ export const ROUTES: Record<string, RouteRule> = {
     status: 200,
     records: (answer: { items: { recoveries: number }[] }) => sumOf(answer.items),
   },
+  'GET /api/technicians/[id]': {
+    action: 'technician:read',
+    id: ({ ids }) => ids.technicianId,
+    colleagues: ({ ids }) => ids.otherTechnicianId,
+    status: 200,
+  },
   // All 24 records are of one half-year; the only other period they have is itself.
   'GET /api/trends/comparison': {
     action: 'trends:read',
