@@ -6,7 +6,7 @@ import { isLongRenewal, type RenewalPayload, renewFlags } from './renew';
 /** As it lies in the checkout, which is where every server of the product starts. */
 const PROCESS = 'analytics/flag-renewal/renewal-process.ts';
 /** Pages go first. */
-const NICE = 10;
+const NICE = 5;
 const MOST_SAID = 4_000;
 
 const inProcessOfItsOwn = ({ companyId }: RenewalPayload): Promise<void> =>

@@ -23,6 +23,15 @@ export const KEYS_BY_PLACE: readonly KeyPlace[] = [
     ],
   },
   {
+    place: 'Among flags',
+    keys: [
+      ['j k', 'the next record or the one before'],
+      ['d', 'decide what it was'],
+      ['1 to 6', 'while deciding: that decision'],
+      ['Esc', 'leave it open'],
+    ],
+  },
+  {
     place: 'In the sentence over a screen',
     keys: [
       ['Enter', 'set this part'],

@@ -15,7 +15,7 @@ export type Screen = {
 export const SCREENS: readonly Screen[] = [
   { path: '/', name: 'Today', action: 'records:read', scoped: false, goKey: 'd' },
   { path: '/trends', name: 'Trends', action: 'trends:read', scoped: true, goKey: 't' },
-  { path: '/low-recoveries', name: 'Low recoveries', action: 'flags:read', scoped: true, goKey: 'l' },
+  { path: '/flags', name: 'Flags', action: 'flags:read', scoped: true, goKey: 'f' },
   { path: '/technicians', name: 'Technicians', action: 'technicians:read', scoped: true, goKey: 'c' },
   { path: '/sites', name: 'Sites', action: 'sites:read', scoped: true, goKey: 's' },
   { path: '/appliances', name: 'Appliances', action: 'appliances:read', scoped: true, goKey: 'a' },
