@@ -6,39 +6,50 @@ import { type Deseasonalised, deseasonalise, routineForecasts } from './routine'
 
 /** What the months ahead are expected to bring, and all that their spread is drawn from. */
 export type Expected = {
-  refrigerants: string[];
+  refrigerants: readonly string[];
   horizon: number;
   routine: Deseasonalised;
-  /** Kg of routine jobs, a figure a month. */
+  /** Kg of routine jobs still to come, a figure a month. */
   routineKg: number[];
-  trends: ShareTrend[];
+  trends: readonly ShareTrend[];
   plant: LargePlant;
+  /** Large jobs still to come, a figure a month. */
   jobs: number[];
-  /** Mean kg by refrigerant (in the order above) and month. */
-  meanKg: number[][];
+  /** Kg that the first month has brought already. */
+  soFarKg: ReadonlyMap<string, number>;
 };
 
-/** Means of the coming months by refrigerant: the routine mass by its shares, and large jobs apart. */
+/** The months ahead after the last whole one: the routine mass by its shares, and large jobs apart. */
 export const expectedMass = (history: MassHistory, method: ChosenMethod, horizon: number): Expected => {
-  const refrigerants = refrigerantsOf(history);
   const routine = deseasonalise(history);
   const forecasts = routineForecasts(history, routine, horizon);
   const routineKg = forecasts.get(method) ?? forecasts.get('combination') ?? [];
-  const trends = shareTrends(history);
   const plant = largePlant(history, routine.season);
-  const steps = Array.from({ length: horizon }, (_, step) => step + 1);
   const levels = routineKg.map(
     (mass, step) => mass / (routine.season[monthOfYear(history, history.months + step)] ?? 1),
   );
-  const jobs = jobsAhead(history, plant, routine.masses, levels);
+  return {
+    refrigerants: refrigerantsOf(history),
+    horizon,
+    routine,
+    routineKg,
+    trends: shareTrends(history),
+    plant,
+    jobs: jobsAhead(history, plant, routine.masses, levels),
+    soFarKg: new Map(),
+  };
+};
+
+/** Mean kg by refrigerant (in their order) and month. */
+export const meansOf = ({ refrigerants, horizon, routineKg, trends, plant, jobs, soFarKg }: Expected): number[][] => {
   const perJob = kgPerJob(plant);
   const place = new Map(trends.map(({ refrigerant }, at) => [refrigerant, at]));
-  const shares = steps.map((step) => sharesAhead(trends, step));
-  const meanKg = refrigerants.map((refrigerant) =>
-    steps.map((_, step) => {
-      const share = shares[step]?.[place.get(refrigerant) ?? -1] ?? 0;
-      return (routineKg[step] ?? 0) * share + (jobs[step] ?? 0) * (perJob.get(refrigerant) ?? 0);
+  const shares = Array.from({ length: horizon }, (_, step) => sharesAhead(trends, step + 1));
+  return refrigerants.map((refrigerant) =>
+    shares.map((own, step) => {
+      const share = own[place.get(refrigerant) ?? -1] ?? 0;
+      const toCome = (routineKg[step] ?? 0) * share + (jobs[step] ?? 0) * (perJob.get(refrigerant) ?? 0);
+      return step === 0 ? toCome + (soFarKg.get(refrigerant) ?? 0) : toCome;
     }),
   );
-  return { refrigerants, horizon, routine, routineKg, trends, plant, jobs, meanKg };
 };

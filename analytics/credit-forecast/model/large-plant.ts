@@ -8,6 +8,8 @@ const HALF_LIFE = 120;
 export type LargePlant = {
   /** Jobs a month on average over the year. */
   jobsPerMonth: number;
+  /** How many jobs that average rests on; a recent one counts whole. */
+  jobsSeen: number;
   /** Twelve factors, January first. */
   season: number[];
   /** The last jobs and the chance that one comes again; chances add up to 1. */
@@ -35,6 +37,7 @@ export const largePlant = (history: MassHistory, routineSeason: readonly number[
   const all = last.reduce((sum, { at }) => sum + weightAt(at), 0);
   return {
     jobsPerMonth: weights > 0 ? jobs / weights : 0,
+    jobsSeen: jobs,
     season: borrowedSeason(counts, routineSeason, history.firstMonthOfYear),
     pool: last.map((job) => ({ job, chance: weightAt(job.at) / all })),
   };

@@ -1,5 +1,6 @@
 /** From this share of paths without anything on, a range begins at nothing. */
 const OFTEN_EMPTY = 0.1;
+const ALMOST_ALWAYS_EMPTY = 0.8;
 
 /** Kg between which a share of the drawn paths lies. */
 export type MassRange = { lowerKg: number; upperKg: number };
@@ -37,11 +38,12 @@ export const rangeOf = (sorted: Float64Array, mass: number): MassRange =>
     : { lowerKg: at(sorted, (1 - mass) / 2), upperKg: at(sorted, (1 + mass) / 2) };
 
 /**
- * The share of the draws that a range must hold to just reach a mass. `tie` (0 to 1) says where the mass lies among draws
- * equal to it, so that scores of good draws are even from 0 to 1 although many are 0.
+ * The share of the draws that a range must hold to just reach a mass. Null where a range says nothing, since the draws
+ * are almost always nothing.
  */
-export const reachOf = (sorted: Float64Array, kg: number, tie: number): number => {
+export const reachOf = (sorted: Float64Array, kg: number): number | null => {
+  if (ranksOf(sorted, 0).atMost > ALMOST_ALWAYS_EMPTY) return null;
   const { below, atMost } = ranksOf(sorted, kg);
-  const rank = below + tie * (atMost - below);
-  return oftenEmpty(sorted) ? rank : Math.abs(2 * rank - 1);
+  if (oftenEmpty(sorted)) return kg > 0 ? (below + atMost) / 2 : 0;
+  return Math.abs(below + atMost - 1);
 };
