@@ -1,5 +1,6 @@
 import { type Baselines, fitBaselines } from './baselines/baselines';
 import { peersOf } from './baselines/peers';
+import { weighHypotheses } from './hypotheses/weigh-hypotheses';
 import type { Judgement } from './judgement';
 import { type Neighbours, neighboursOf } from './neighbours/neighbours';
 import { readVacuum } from './readings/vacuum-groups';
@@ -20,7 +21,6 @@ import { unitSlip } from './rules/unit-slip';
 import { weightsDisagree } from './rules/weights-disagree';
 import { wrongCylinder } from './rules/wrong-cylinder';
 import type { JudgingSettings } from './settings';
-import { weighHypotheses } from './weigh-hypotheses';
 
 const RULES: readonly Rule[] = [
   stoppedEarly,

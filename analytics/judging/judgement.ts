@@ -1,6 +1,6 @@
 import type { FlagRule } from '@/lib/vocabulary';
 import type { Peers } from './baselines/peers';
-import type { Meaning } from './hypotheses';
+import type { Meaning } from './hypotheses/hypotheses';
 
 /** A low pull as numbers: what came out, what like jobs of others give, what the gauge said. */
 export type LowEvidence = {
@@ -61,6 +61,9 @@ type JudgementOf<Rule extends FlagRule> = {
 
 /** A reason to look at a record: by which rule, how sure, on what numbers. */
 export type Judgement = { [Rule in FlagRule]: JudgementOf<Rule> }[FlagRule];
+
+/** A flag's rule and numbers, as they are stored and explained. */
+export type Told = { [Rule in FlagRule]: { rule: Rule; evidence: EvidenceByRule[Rule] } }[FlagRule];
 
 /** What a rule finds in a record; the record's id is added by the judge. */
 export type Finding = { [Rule in FlagRule]: Omit<JudgementOf<Rule>, 'recordId'> }[FlagRule];

@@ -10,8 +10,10 @@ export type JudgingSettings = {
   plantKg: number;
   /** Yield above which more came out than an overcharged system holds. */
   mostYield: number;
-  /** A flag is raised from this certainty on. */
-  raiseFrom: number;
+  /** An early stop is said from this certainty on. */
+  raiseStopsFrom: number;
+  /** A slip of the pen is said from this certainty on: a glance at the ticket settles it. */
+  raiseSlipsFrom: number;
   /** Spread of one reading of a scale around what stands on it: at least so much, and this share of the gross weight. */
   repeatabilityKg: number;
   repeatabilityShare: number;
@@ -26,7 +28,8 @@ export const defaultSettings = (today: string): JudgingSettings => ({
   peerYears: 3,
   plantKg: 45.359237,
   mostYield: 1.15,
-  raiseFrom: 0.4,
+  raiseStopsFrom: 0.4,
+  raiseSlipsFrom: 0.3,
   repeatabilityKg: 0.025,
   repeatabilityShare: 0.0004,
   habitFrom: 0.8,

@@ -1,29 +1,15 @@
 import { groupBy } from '../../statistics/group-by';
-import { STOPS_AT, type Stories, storiesOf, totalOf } from './likelihood';
-import { type ArrivalMixture, type ArrivalShares, type Pull, stopsEarlyOf } from './mixture';
+import { leaves, meetsShort, stopsEarly } from './crew';
+import { type Stories, storiesOf, totalOf } from './likelihood';
+import { type ArrivalMixture, type ArrivalShares, personOf, stopsEarlyOf } from './mixture';
+import { PRIOR, type SeenPull } from './prior';
 import { partShape, soundShape, TOP_YIELD } from './shapes';
+import { vacuumOfStops } from './vacuum-of-stops';
 
-/** A pull to learn from. */
-export type SeenPull = Omit<Pull, 'stopsEarly' | 'leaves'> & { technicianId: string };
-
-/** What a fit starts from and leans on where records are few: common practice of the trade. */
-const PRIOR = {
-  sound: { mean: 0.92, variance: 0.0045, pulls: 30 },
-  leaked: { mean: 0.54, variance: 0.036, pulls: 60 },
-  empty: { mean: 0.07, variance: 0.004, pulls: 60 },
-  shares: { sound: 0.72, leaked: 0.22, empty: 0.06, pulls: 20 },
-  stopsEarly: { share: 0.012, pulls: 400 },
-  leaves: { pulls: 15 },
-  vacuumLoss: { value: 0.6, weight: 12 },
-  stoppedSpread: { value: 1.15, pulls: 10 },
-} as const;
-
-/** Nobody is taken never to stop early. */
-const LEAST_SHARE = 0.004;
-const ROUNDS = 25;
-const ALL_ROUNDS = 3;
+const ROUNDS = 16;
+const ALL_ROUNDS = 2;
 /** Shapes are known well enough from so many pulls. */
-const ENOUGH_PULLS = 6_000;
+const ENOUGH_PULLS = 5_000;
 
 type Moments = { mean: number; variance: number; pulls: number };
 
@@ -53,6 +39,7 @@ const start = (): ArrivalMixture => {
     stopsEarly: PRIOR.stopsEarly.share,
     stopsEarlyOf: {},
     leavesOf: {},
+    meetsShortOf: {},
     vacuumLoss: PRIOR.vacuumLoss.value,
     stoppedSpread: PRIOR.stoppedSpread.value,
   };
@@ -64,7 +51,7 @@ const weigh = (mixture: ArrivalMixture, pulls: readonly SeenPull[]): Stories[] =
     const stories = storiesOf(mixture, {
       ...pull,
       stopsEarly: stopsEarlyOf(mixture, pull.technicianId),
-      leaves: mixture.leavesOf[pull.technicianId] ?? 1,
+      ...personOf(mixture, pull.technicianId),
     });
     const total = totalOf(stories) || 1;
     return {
@@ -72,7 +59,7 @@ const weigh = (mixture: ArrivalMixture, pulls: readonly SeenPull[]): Stories[] =
       short: stories.short / total,
       empty: stories.empty / total,
       stopped: stories.stopped / total,
-      stoppedAt: stories.stoppedAt.map((part) => part / total),
+      stoppedAt: stories.stopped > 0 ? stories.stoppedAt.map((part) => part / total) : stories.stoppedAt,
     };
   });
 
@@ -86,72 +73,6 @@ const sharesOf = (stories: readonly Stories[], prior: ArrivalShares): ArrivalSha
   }
   const total = sound + leaked + empty;
   return { sound: sound / total, leaked: leaked / total, empty: empty / total };
-};
-
-/** How much of the vacuum early stops miss, and how widely theirs spread: weighted least squares over where they stopped. */
-const vacuumOfStops = (pulls: readonly SeenPull[], stories: readonly Stories[]) => {
-  let [cross, square] = [PRIOR.vacuumLoss.value * PRIOR.vacuumLoss.weight, PRIOR.vacuumLoss.weight as number];
-  const each = (visit: (weight: number, z: number, reach: number) => void) =>
-    pulls.forEach(({ vacuum }, i) => {
-      if (vacuum)
-        stories[i]?.stoppedAt.forEach((weight, at) => {
-          visit(weight, vacuum.z, vacuum.usual * (1 - (STOPS_AT[at] ?? 0)));
-        });
-    });
-  each((weight, z, reach) => {
-    cross -= weight * z * reach;
-    square += weight * reach * reach;
-  });
-  const vacuumLoss = Math.min(2.5, Math.max(0.15, cross / square));
-  let [squares, weights] = [
-    PRIOR.stoppedSpread.value ** 2 * PRIOR.stoppedSpread.pulls,
-    PRIOR.stoppedSpread.pulls as number,
-  ];
-  each((weight, z, reach) => {
-    squares += weight * (z + vacuumLoss * reach) ** 2;
-    weights += weight;
-  });
-  return { vacuumLoss, stoppedSpread: Math.max(0.9, Math.sqrt(squares / weights)) };
-};
-
-const stopsEarly = (pulls: readonly SeenPull[], stories: readonly Stories[]) => {
-  const of: ArrivalMixture['stopsEarlyOf'] = {};
-  pulls.forEach(({ technicianId, vacuum }, i) => {
-    // Without a vacuum an early stop can't be told from a leak, so it teaches nothing about a person.
-    if (!vacuum) return;
-    const share = stories[i]?.stopped ?? 0;
-    const known = of[technicianId] ?? { pulls: 0, stopped: 0 };
-    of[technicianId] = { pulls: known.pulls + 1, stopped: known.stopped + share };
-  });
-  return { stopsEarlyOf: of, stopsEarly: middling(Object.values(of)) };
-};
-
-/** The share of the middling technician, weighted by pulls: one who often stops is no yardstick for the others. */
-const middling = (crew: readonly { pulls: number; stopped: number }[]): number => {
-  const { share, pulls } = PRIOR.stopsEarly;
-  const people = [...crew.map((one) => ({ share: one.stopped / one.pulls, pulls: one.pulls })), { share, pulls }];
-  let half = people.reduce((sum, one) => sum + one.pulls, 0) / 2;
-  for (const one of people.sort((a, b) => a.share - b.share)) {
-    half -= one.pulls;
-    if (half <= 0) return Math.max(one.share, LEAST_SHARE);
-  }
-  return share;
-};
-
-/** Thorough pulls of each technician against the crew's of the same kind, drawn towards them. */
-const leaves = (pulls: readonly SeenPull[], sound: readonly number[], mean: Record<string, number>) => {
-  const { pulls: drawn } = PRIOR.leaves;
-  const of = new Map<string, { left: number; weight: number }>();
-  pulls.forEach(({ technicianId, kind, recoveryYield }, i) => {
-    const known = of.get(technicianId) ?? { left: drawn, weight: drawn };
-    const usual = TOP_YIELD - (mean[kind] ?? mean.all ?? PRIOR.sound.mean);
-    const weight = sound[i] ?? 0;
-    of.set(technicianId, {
-      left: known.left + (weight * (TOP_YIELD - recoveryYield)) / usual,
-      weight: known.weight + weight,
-    });
-  });
-  return Object.fromEntries([...of].map(([id, { left, weight }]) => [id, left / weight]));
 };
 
 /** A yield as the crew would have got it in place of this technician. */
@@ -193,13 +114,15 @@ const refit = (pulls: readonly SeenPull[], stories: readonly Stories[], before: 
         ),
       ] as const,
   );
+  const byType = Object.fromEntries([['all', shares] as const, ...byJob]);
   return {
     sound: Object.fromEntries(kinds.map(([kind, { mean, variance }]) => [kind, soundShape(mean, variance)])),
     soundMean,
     leavesOf: leaves(pulls, sound, soundMean),
     leaked: partShape(leaked.mean, leaked.variance),
     empty: partShape(empty.mean, empty.variance),
-    shares: Object.fromEntries([['all', shares] as const, ...byJob]),
+    shares: byType,
+    meetsShortOf: meetsShort(pulls, stories, byType),
     ...stopsEarly(pulls, stories),
     ...vacuumOfStops(pulls, stories),
   };

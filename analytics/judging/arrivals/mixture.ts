@@ -15,6 +15,8 @@ export type ArrivalMixture = {
   stopsEarlyOf: Record<string, { pulls: number; stopped: number }>;
   /** What each technician's thorough pulls leave short of the top, against the crew's: 1 is usual, 2 twice as much. */
   leavesOf: Record<string, number>;
+  /** How often each technician meets units that came short, against others on the same types of job: 1 is usual. */
+  meetsShortOf: Record<string, number>;
   /** Share of the usual vacuum that is missing when nothing is pulled at all. */
   vacuumLoss: number;
   /** Spread of the vacuum of early stops, in spreads of usual ones. */
@@ -32,7 +34,15 @@ export type Pull = {
   stopsEarly: number;
   /** What this person's thorough pulls leave, against the crew's. */
   leaves: number;
+  /** How often this person meets units that came short, against others. */
+  meetsShort: number;
 };
+
+/** What is known of a technician beside early stops, as a pull takes it. */
+export const personOf = (mixture: ArrivalMixture, technicianId: string): Pick<Pull, 'leaves' | 'meetsShort'> => ({
+  leaves: mixture.leavesOf[technicianId] ?? 1,
+  meetsShort: mixture.meetsShortOf[technicianId] ?? 1,
+});
 
 /** Technicians are drawn towards the company as if this many pulls of it were theirs. */
 const DRAWN_BY = 60;

@@ -13,20 +13,21 @@ const LEAST_SPREAD_KPA = 0.3;
 /** Scales the median deviation to the standard deviation of a normal distribution. */
 const NORMAL = 1.4826;
 
-const keysOf = (record: JudgedRecord, chargeKg: number, settings: JudgingSettings): string[] => {
+/** What is alike, narrowest first. */
+const LEVELS = ['pressure class', 'kind', 'size'] as const;
+type Level = (typeof LEVELS)[number];
+
+const keyOf = (record: JudgedRecord, chargeKg: number, level: Level, settings: JudgingSettings): string => {
+  if (level === 'size') return isPlant(chargeKg, settings) ? 'plant' : 'routine';
   const kind = kindKey(record, chargeKg, settings);
-  return [
-    `${kind}/${isLowPressure(record) ? 'low pressure' : 'other'}`,
-    kind,
-    isPlant(chargeKg, settings) ? 'plant' : 'routine',
-  ];
+  return level === 'kind' ? kind : `${kind}/${isLowPressure(record) ? 'low pressure' : 'other'}`;
 };
 
 /** Medians and spreads of the final vacuum: by kind and pressure class, wider where those are few. */
 export const fitVacuumGroups = (records: readonly JudgedRecord[], settings: JudgingSettings): VacuumGroups => {
   const groups: VacuumGroups = {};
-  for (const level of [0, 1, 2]) {
-    for (const [key, group] of groupBy(records, (r) => keysOf(r, r.fullChargeKg, settings)[level] ?? '')) {
+  for (const level of LEVELS) {
+    for (const [key, group] of groupBy(records, (r) => keyOf(r, r.fullChargeKg, level, settings))) {
       const depths = group.map(vacuumDepthKpa).filter((depth) => depth !== null);
       if (depths.length < settings.leastPeers) continue;
       const usualKpa = median(depths);
@@ -49,8 +50,9 @@ export const readVacuum = (
 ): VacuumReading | null => {
   const depthKpa = vacuumDepthKpa(record);
   if (depthKpa === null) return null;
-  const group = keysOf(record, chargeKg, settings)
-    .map((key) => groups[key])
-    .find((found) => found !== undefined);
+  const group =
+    groups[keyOf(record, chargeKg, 'pressure class', settings)] ??
+    groups[keyOf(record, chargeKg, 'kind', settings)] ??
+    groups[keyOf(record, chargeKg, 'size', settings)];
   return group ? { ...group, depthKpa, z: (depthKpa - group.usualKpa) / group.spreadKpa } : null;
 };

@@ -1,4 +1,4 @@
-import { probabilityOf } from '../weigh-hypotheses';
+import { probabilityOf } from '../hypotheses/weigh-hypotheses';
 import { expectedMassKg, isLow, isWeighable, lowEvidence } from './low';
 import type { Rule } from './rule';
 
@@ -8,15 +8,14 @@ import type { Rule } from './rule';
  */
 export const lowUnexplained: Rule = (of) => {
   const { record, weighed, vacuum, settings } = of;
-  const isMissing = record.recoveredMassKg === 0 && weighed.next === null;
-  const missing = probabilityOf(weighed, ['mass_missing']);
-  const isRaised = isMissing
-    ? missing + weighed.stopped >= settings.raiseFrom
-    : !vacuum && isLow(of) && isWeighable(of);
+  // With a later weighing, the cylinder's chain says it better.
+  const isNothing = record.recoveredMassKg === 0 && weighed.next === null;
+  const certainty = weighed.stopped + probabilityOf(weighed, ['mass_missing', 'mass_wrong']);
+  const isRaised = isNothing ? certainty >= settings.raiseSlipsFrom : !vacuum && isLow(of) && isWeighable(of);
   if (!isRaised) return null;
   return {
     rule: 'low_unexplained',
-    certainty: isMissing ? missing : weighed.stopped + probabilityOf(weighed, ['mass_missing', 'weight_wrong']),
+    certainty,
     expectedMassKg: expectedMassKg(of),
     evidence: lowEvidence(of),
   };

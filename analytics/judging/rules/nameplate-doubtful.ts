@@ -1,6 +1,6 @@
-import type { Meaning } from '../hypotheses';
+import type { Meaning } from '../hypotheses/hypotheses';
+import { likeliestOf, probabilityOf } from '../hypotheses/weigh-hypotheses';
 import { otherVisits } from '../neighbours/neighbours';
-import { likeliestOf, probabilityOf } from '../weigh-hypotheses';
 import type { Rule } from './rule';
 
 const PLATES: readonly Meaning[] = [
@@ -18,7 +18,7 @@ const MOST_VISITS = 3;
 export const nameplateDoubtful: Rule = ({ record, weighed, neighbours, settings }) => {
   const certainty = probabilityOf(weighed, PLATES);
   const meant = likeliestOf(weighed, PLATES);
-  if (certainty < settings.raiseFrom || !meant) return null;
+  if (certainty < settings.raiseSlipsFrom || !meant) return null;
   return {
     rule: 'nameplate_doubtful',
     certainty,

@@ -1,8 +1,9 @@
 import type { Peers } from '../baselines/peers';
+import type { Bench } from '../hypotheses/bench';
+import type { Weighed } from '../hypotheses/weigh-hypotheses';
 import type { Finding } from '../judgement';
 import type { VacuumReading } from '../readings/vacuum-groups';
 import type { JudgedRecord } from '../record';
-import type { Bench, Weighed } from '../weigh-hypotheses';
 
 /** Everything a rule may look at. */
 export type Case = Bench & {

@@ -1,8 +1,8 @@
 import { expectedMassKg, isLow, isWeighable, lowEvidence } from './low';
 import type { Rule } from './rule';
 
-/** Likelier than not before a record says so of a unit. */
-const LEAST = 0.5;
+/** So likely before a record says so of a unit. */
+const LEAST = 0.7;
 /** The records cannot tell a unit that came short from gas that went somewhere else: one in ten is left to that. */
 const MOST = 0.9;
 

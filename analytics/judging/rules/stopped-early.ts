@@ -5,7 +5,7 @@ import type { Rule } from './rule';
 /** Low, and the final vacuum shallow: somebody may have stopped before all of it was out. */
 export const stoppedEarly: Rule = (of) => {
   const { record, weighed, baselines, settings, vacuum } = of;
-  if (!vacuum || weighed.stopped < settings.raiseFrom) return null;
+  if (!vacuum || weighed.stopped < settings.raiseStopsFrom) return null;
   const share = stopsEarlyOf(baselines.arrivals, record.technicianId, { pulls: 1, stopped: weighed.stopped });
   return {
     rule: 'stopped_early',

@@ -1,5 +1,5 @@
-import type { Meaning } from '../hypotheses';
-import { likeliestOf, probabilityOf } from '../weigh-hypotheses';
+import type { Meaning } from '../hypotheses/hypotheses';
+import { likeliestOf, probabilityOf } from '../hypotheses/weigh-hypotheses';
 import type { Rule } from './rule';
 
 const SLIPS: readonly Meaning[] = [
@@ -16,7 +16,7 @@ const SLIPS: readonly Meaning[] = [
 export const unitSlip: Rule = ({ record, weighed, settings }) => {
   const certainty = probabilityOf(weighed, SLIPS);
   const slip = likeliestOf(weighed, SLIPS);
-  if (certainty < settings.raiseFrom || slip?.recoveredMassKg == null) return null;
+  if (certainty < settings.raiseSlipsFrom || slip?.recoveredMassKg == null) return null;
   const { next } = weighed;
   return {
     rule: 'unit_slip',

@@ -1,5 +1,5 @@
-import { type Neighbours, otherVisits } from './neighbours/neighbours';
-import type { JudgedRecord } from './record';
+import { type Neighbours, otherVisits } from '../neighbours/neighbours';
+import type { JudgedRecord } from '../record';
 
 /** What a ticket may have meant: another mass, or another nameplate. */
 export type Meaning =
@@ -12,7 +12,7 @@ export type Meaning =
   | 'oz_as_lb'
   | 'lb_as_oz'
   | 'mass_missing'
-  | 'weight_wrong'
+  | 'mass_wrong'
   | 'plate_tenfold'
   | 'plate_tenth'
   | 'plate_digits'
@@ -55,7 +55,7 @@ const PLATE_SLIPS: readonly { meaning: Meaning; factor: number; prior: number }[
 const DIGITS_PRIOR = 0.0008;
 const OTHER_VISITS_PRIOR = 0.001;
 const MISSING_PRIOR = 0.0008;
-const WRONG_WEIGHT_PRIOR = 0.0004;
+const WRONG_PRIOR = 0.0004;
 
 /** The first two digits of a figure changed over; null where that is no other figure. */
 export const digitsSwapped = (value: number): number | null => {
@@ -77,25 +77,33 @@ const swappedPlateKg = (record: JudgedRecord): number | null => {
 const median = (values: readonly number[]): number =>
   [...values].sort((a, b) => a - b)[Math.floor(values.length / 2)] ?? 0;
 
+/** A record that means what it says. */
+export const asWritten = ({ recoveredMassKg, nameplateChargeKg }: JudgedRecord): Hypothesis => ({
+  meaning: 'as_written',
+  prior: 1,
+  recoveredMassKg,
+  nameplateChargeKg,
+  factor: 1,
+});
+
 /** All that a record may have meant, as written first. */
 export const hypothesesOf = (record: JudgedRecord, neighbours: Neighbours): Hypothesis[] => {
   const { recoveredMassKg, nameplateChargeKg, massUnit } = record;
+  const written = asWritten(record);
   const as = (meaning: Meaning, prior: number, change: Partial<Hypothesis>): Hypothesis => ({
+    ...written,
     meaning,
     prior,
-    recoveredMassKg,
-    nameplateChargeKg,
-    factor: 1,
     ...change,
   });
   const isMetric = massUnit === 'kg' || massUnit === 'g';
   const other = isMetric ? 'kg_as_lb' : 'lb_as_kg';
-  const list = [as('as_written', 1, {})];
+  const list = [written];
   if (recoveredMassKg > 0)
     for (const { meaning, factor, prior } of MASS_SLIPS)
       if (meaning !== other) list.push(as(meaning, prior, { recoveredMassKg: recoveredMassKg / factor, factor }));
   if (recoveredMassKg === 0) list.push(as('mass_missing', MISSING_PRIOR, { recoveredMassKg: null }));
-  else if (record.startWeightKg !== null) list.push(as('weight_wrong', WRONG_WEIGHT_PRIOR, { recoveredMassKg: null }));
+  else list.push(as('mass_wrong', WRONG_PRIOR, { recoveredMassKg: null }));
   for (const { meaning, factor, prior } of PLATE_SLIPS)
     list.push(as(meaning, prior, { nameplateChargeKg: nameplateChargeKg / factor }));
   const swapped = swappedPlateKg(record);
