@@ -95,7 +95,7 @@ export const applianceLeaksSchema = z.object({
   rules: z.array(ruleSchema),
   /** Days on which refrigerant was added, the earliest first. */
   events: z.array(eventSchema),
-  /** What was added as leaked in each calendar year. */
+  /** What was added as leaked in each calendar year; `chronic` where a rule held in it. */
   years: z.array(z.object({ year: z.int(), added: kg, percent, chronic: z.boolean() })),
   additions: z.array(additionSchema),
   suspicion: z.object({ ...suspicionShape, history: z.array(visitSchema) }),

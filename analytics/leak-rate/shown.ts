@@ -87,7 +87,9 @@ export const shownLeaks = (unit: LeakingUnit, additions: readonly ChargeAddition
       rate: rate && shownRate(rate, addedOn, verdicts, trigger),
     })),
     years: calendarYears(additions, fullChargeKg).map((year) => ({
-      ...{ year: year.year, chronic: year.chronic },
+      year: year.year,
+      // Only a year in which a rule held is reported under it.
+      chronic: year.chronic && holding(verdicts, `${year.year}-12-31`).length > 0,
       added: rounded(year.addedKg, 3),
       percent: rounded(year.percent, 2),
     })),

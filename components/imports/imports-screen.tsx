@@ -1,3 +1,4 @@
+import Link from 'next/link';
 import { PageHead } from '@/components/ui/page-head';
 import { Sheet } from '@/components/ui/sheet';
 import { ColumnsExplained } from './columns-explained';
@@ -15,6 +16,13 @@ export const ImportsScreen = () => (
       <FileDrop />
       <ColumnsExplained />
     </Sheet>
+    <p className="text-ink-2">
+      Refrigerant that was put into appliances has{' '}
+      <Link href="/charge-additions" className="link">
+        a file of its own
+      </Link>
+      .
+    </p>
     <PastImports />
   </div>
 );

@@ -17,7 +17,7 @@ export const ChronicNote = ({ years, unit }: { years: ApplianceLeaks['years']; u
       {chronic.map(({ year, added, percent }) => (
         <p key={year}>
           {year}: {formatMassWithUnit(added, unit)}, {formatPercent(percent / 100)} of the full charge. An owner under
-          the rule reports that by March 1, {year + 1} (40 CFR 82.157(j)).
+          the rule reports that by March 1, {year + 1} (40 CFR 82.157(j), 84.106).
         </p>
       ))}
     </Notice>

@@ -37,8 +37,8 @@ const Row = ({ appliance: one, unit }: { appliance: SiteAppliance; unit: Display
     </Th>
     <Td numeric>{one.fullCharge === null ? '—' : formatMass(one.fullCharge, unit)}</Td>
     <Td numeric>
-      {one.shortVisits} of {one.visits}
-      <span className="block text-xs text-ink-2">{formatNumber(one.expectedShort, 1)} usual</span>
+      {one.visits ? `${one.shortVisits} of ${one.visits}` : 'no visit'}
+      {one.visits ? <span className="block text-xs text-ink-2">{formatNumber(one.expectedShort, 1)} usual</span> : null}
     </Td>
     <Td numeric>
       {one.leakSuspicion === null ? (

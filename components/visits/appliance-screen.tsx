@@ -43,14 +43,14 @@ export const ApplianceScreen = ({ history }: { history: ApplianceHistory }) => {
           title={<FigureSentence pieces={visitsAnswer(name, visits, unit)} scope={own} />}
           sub={[lowVisitsNote(visits), nameplateNote(visits, unit)].filter(Boolean).join(' ')}
         />
+        {mayReadLeaks ? (
+          <ApplianceLeaksSheets applianceId={history.applianceId} name={name} visits={visits} unit={unit} />
+        ) : null}
         {visits.length ? (
           <VisitsSheet place={name} visits={visits} unit={unit} changed={changed} />
         ) : (
           <Empty title="No visit is recorded">A recovery from this unit will stand here once it is written down.</Empty>
         )}
-        {mayReadLeaks ? (
-          <ApplianceLeaksSheets applianceId={history.applianceId} name={name} visits={visits} unit={unit} />
-        ) : null}
       </div>
     </FigurePage>
   );
