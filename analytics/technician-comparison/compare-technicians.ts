@@ -1,7 +1,7 @@
 import { median } from 'simple-statistics';
 import { coachingChange } from './coaching-change';
 import { dayNumber } from './columns';
-import { compareCrew } from './compare-crew';
+import { type CrewComparison, compareCrew } from './compare-crew';
 import { monthsOf, trendOf } from './course';
 import { jobSeries } from './job-series';
 import type { ComparedRecovery } from './recovery';
@@ -27,13 +27,7 @@ export type TechnicianComparison = {
 
 const POINTS = 100;
 
-/** Compares technicians on like jobs. Recoveries in the order of time, entry errors left out; results in the order of ids. */
-export const compareTechnicians = (
-  recoveries: readonly ComparedRecovery[],
-  { earlierJobs }: ComparisonInput = {},
-): TechnicianComparison => {
-  const crew = compareCrew(recoveries, earlierJobs);
-  const technicians = technicianResults(recoveries, crew);
+const summed = (crew: CrewComparison, technicians: TechnicianResult[]): TechnicianComparison => {
   const effects = technicians.flatMap(({ effect }) => (effect ? [effect.value] : []));
   return {
     technicians,
@@ -46,14 +40,20 @@ export const compareTechnicians = (
   };
 };
 
-/** Month by month, the trend, and what came of each coaching; null where the technician has no recovery. */
-export const technicianCourse = (
+/** Compares technicians on like jobs. Recoveries in the order of time, entry errors left out; results in the order of ids. */
+export const compareTechnicians = (
   recoveries: readonly ComparedRecovery[],
+  { earlierJobs }: ComparisonInput = {},
+): TechnicianComparison => {
+  const crew = compareCrew(recoveries, earlierJobs);
+  return summed(crew, technicianResults(recoveries, crew));
+};
+
+const courseOf = (
+  crew: CrewComparison,
   technicianId: string,
   coachedOn: readonly string[],
-  { earlierJobs }: ComparisonInput = {},
 ): TechnicianCourse | null => {
-  const crew = compareCrew(recoveries, earlierJobs);
   const series = jobSeries(crew, { withJobsBeforeChange: true })[crew.columns.technicians.indexOf(technicianId)];
   if (!series) return null;
   const trend = trendOf(series);
@@ -65,4 +65,16 @@ export const technicianCourse = (
       return { startedOn, change: change.enough ? change.value : null };
     }),
   };
+};
+
+/** One technician against the crew: the result, and month by month with what came of each coaching. Null without a recovery. */
+export const compareTechnician = (
+  recoveries: readonly ComparedRecovery[],
+  technicianId: string,
+  coachedOn: readonly string[],
+  { earlierJobs }: ComparisonInput = {},
+): { own: TechnicianResult | null; course: TechnicianCourse | null } => {
+  const crew = compareCrew(recoveries, earlierJobs);
+  const own = technicianResults(recoveries, crew).find((result) => result.technicianId === technicianId) ?? null;
+  return { own, course: courseOf(crew, technicianId, coachedOn) };
 };

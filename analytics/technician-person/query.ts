@@ -1,7 +1,7 @@
 import 'server-only';
 import { asc, eq } from 'drizzle-orm';
 import type { Scope } from '@/analytics/scope';
-import { compareTechnicians, technicianCourse } from '@/analytics/technician-comparison/compare-technicians';
+import { compareTechnician } from '@/analytics/technician-comparison/compare-technicians';
 import { judgementRow } from '@/analytics/technicians/judgement';
 import { readCrew, withoutTechnicians } from '@/analytics/technicians/query';
 import type { Tx } from '@/db/client';
@@ -27,15 +27,13 @@ export const getTechnicianPerson = async (
     .where(eq(coaching.technicianId, technicianId))
     .orderBy(asc(coaching.startedOn));
   const { recoveries, earlierJobs } = await readCrew(tx, withoutTechnicians(scope), timeZone);
-  const own = compareTechnicians(recoveries, { earlierJobs }).technicians.find(
-    (result) => result.technicianId === technicianId,
-  );
   const days = coached.map(({ startedOn }) => startedOn);
+  const { own, course } = compareTechnician(recoveries, technicianId, days, { earlierJobs });
   return {
     technician: known.name,
     technicianId,
     recoveries: own?.recoveries ?? 0,
     judgement: own ? judgementRow(known.name, own) : null,
-    course: technicianCourse(recoveries, technicianId, days, { earlierJobs }),
+    course,
   };
 };

@@ -1,7 +1,7 @@
 import { expect, test } from 'vitest';
 import { coachingChange } from '@/analytics/technician-comparison/coaching-change';
 import { dayNumber } from '@/analytics/technician-comparison/columns';
-import { compareTechnicians, technicianCourse } from '@/analytics/technician-comparison/compare-technicians';
+import { compareTechnician, compareTechnicians } from '@/analytics/technician-comparison/compare-technicians';
 import { levelStep } from '@/analytics/technician-comparison/level-step';
 import { given } from '../statistics/given';
 import { normals } from '../statistics/random';
@@ -43,7 +43,7 @@ test('one who was coached out of stopping early is judged by what came after', (
 
 test('what came of a coaching is told with a range that bears looking often', () => {
   const person = { id: 'Dan', jobs: 240, leaves: 0.12, worse: { job: 120, leaves: -0.12 } };
-  const coached = technicianCourse(crewOf(crewWith(person), 9), 'Dan', ['2024-05-16', '2023-01-03']);
+  const { course: coached } = compareTechnician(crewOf(crewWith(person), 9), 'Dan', ['2024-05-16', '2023-01-03']);
   const change = coached?.coaching[0]?.change;
   expect(change?.found).toBe('better');
   expect(change?.low).toBeLessThan(0.12);
