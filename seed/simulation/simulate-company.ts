@@ -39,8 +39,9 @@ const play = (options: SimulationOptions, crew: readonly Worker[], random: Rando
     const pull = pullDown({ kind, type, month, worker, base: bases.get(kind) ?? 3 }, dice);
     worker.jobsDone++;
     worker.yieldLead += pull.yieldLead;
-    const cylinder = cylinders.take(worker.name, unit.refrigerant, unit.nameplateLb);
-    const weighing = weigh(cylinder, unit.nameplateLb * pull.share, { kind, worker, month }, dice);
+    const pulledLb = unit.nameplateLb * pull.share;
+    const cylinder = cylinders.take(worker.name, unit.refrigerant, pulledLb);
+    const weighing = weigh(cylinder, pulledLb, { kind, worker, month }, dice);
     const row = {
       recorded: timeIn(month, dice),
       technician: worker.name,

@@ -1,7 +1,7 @@
 import { fitArrivals } from '../arrivals/fit';
 import type { ArrivalMixture } from '../arrivals/mixture';
 import { jobKey, kindKey } from '../kinds';
-import { lightestKg, type Neighbours, neighboursOf } from '../neighbours/neighbours';
+import { type Neighbours, neighboursOf } from '../neighbours/neighbours';
 import { fitScaleSteps, type ScaleSteps } from '../readings/scale-steps';
 import { fitVacuumGroups, readVacuum, type VacuumGroups } from '../readings/vacuum-groups';
 import type { JudgedRecord } from '../record';
@@ -53,7 +53,7 @@ export const fitBaselines = (
     arrivals: fitArrivals(pulls),
     vacuums,
     steps: fitScaleSteps(counted, settings),
-    sizes: fitNameplateSizes(counted, (record) => lightestKg(neighbours, record)),
+    sizes: fitNameplateSizes(counted),
     habits: fitHabits(counted, settings),
     tickets: fitTicketDates(counted),
   };

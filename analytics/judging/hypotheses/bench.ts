@@ -9,8 +9,6 @@ export type Bench = { baselines: Baselines; neighbours: Neighbours; settings: Ju
 /** What is seen around one record, looked up once for all of its meanings. */
 export type Seen = {
   next: NextWeighing | null;
-  /** Least weight of the cylinder, about its tare. */
-  lightestKg: number | null;
   /** Nameplates that other visits wrote down, kg. */
   plates: number[];
   /** Share of this person's pulls that are stopped early. */

@@ -1,7 +1,7 @@
 import { type Stories, totalOf } from '../arrivals/likelihood';
 import { stopsEarlyOf } from '../arrivals/mixture';
 import { type NextWeighing, nextWeighing } from '../neighbours/cylinder-chain';
-import { lightestKg, otherVisits } from '../neighbours/neighbours';
+import { otherVisits } from '../neighbours/neighbours';
 import type { JudgedRecord } from '../record';
 import type { Bench, Seen } from './bench';
 import { gapSpreadKg, onScale, SAME_PLATE } from './clues';
@@ -47,7 +47,6 @@ export const weighHypotheses = (bench: Bench, record: JudgedRecord): Weighed => 
   const { baselines, neighbours } = bench;
   const seen: Seen = {
     next: nextWeighing(neighbours, record),
-    lightestKg: lightestKg(neighbours, record),
     plates: otherVisits(neighbours, record).map((visit) => visit.nameplateChargeKg),
     stopsEarly: stopsEarlyOf(baselines.arrivals, record.technicianId),
   };

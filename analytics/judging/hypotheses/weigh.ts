@@ -72,7 +72,7 @@ export const weigh = (bench: Bench, record: JudgedRecord, hypothesis: Hypothesis
       ? weighUntold(bench, record, hypothesis, seen)
       : weighTold(bench, record, hypothesis, recoveredMassKg, seen);
   const plate =
-    sizeProbability(bench.baselines.sizes, record, nameplateChargeKg, seen.lightestKg) *
+    sizeProbability(bench.baselines.sizes, record, nameplateChargeKg) *
     plateStepShare(record, nameplateChargeKg) *
     agreesWithVisits(seen.plates, nameplateChargeKg);
   return { weight: hypothesis.prior * plate * weight, stories };

@@ -45,12 +45,3 @@ export const otherVisits = (neighbours: Neighbours, record: JudgedRecord): Judge
   (neighbours.ofAppliance.get(record.applianceId) ?? []).filter(
     (other) => other.id !== record.id && !isSameMoment(other, record),
   );
-
-/** The least weight that the record's cylinder was seen with: about its tare. */
-export const lightestKg = (neighbours: Neighbours, record: JudgedRecord): number | null => {
-  const filled = record.cylinderId === null ? [] : (neighbours.ofCylinder.get(record.cylinderId) ?? [record]);
-  let least: number | null = null;
-  for (const { startWeightKg } of filled)
-    if (startWeightKg !== null && (least === null || startWeightKg < least)) least = startWeightKg;
-  return least;
-};
