@@ -22,12 +22,14 @@ const RADIUS = 5.5;
 // A dot is small; what catches a finger is not.
 const CATCH = 16;
 const LINE = 17;
+// A name stands to the left of its dot where it would leave the picture on the right.
+const ROOM_FOR_NAME = 130;
 const DASHES = ['', '5 4'];
 
 /** Points inside and outside of two pairs of limits that narrow to the right. */
 export const FunnelPicture = (props: FunnelPictureProps) => {
   const { points, limits, width, height, narrow, active, onPoint, formatAmount, formatValue } = props;
-  const margin = { top: 26, right: narrow ? 8 : 150, bottom: 42, left: 46 };
+  const margin = { top: 26, right: narrow ? 8 : 130, bottom: 42, left: 46 };
   const scales = funnelScales(points, limits, { width, height, margin });
   const { x, y } = scales;
   const [left, right] = [margin.left, width - margin.right];
@@ -67,7 +69,7 @@ export const FunnelPicture = (props: FunnelPictureProps) => {
           ? null
           : limits.map(({ name, halfWidth }) => (
               <text key={name} x={right + 6} y={y(-halfWidth(scales.most * 1.04))} dy="0.34em" fontSize={12.5}>
-                {labels.some((label) => Math.abs(label.y - y(-halfWidth(scales.most * 1.04))) < LINE) ? '' : name}
+                {name}
               </text>
             ))}
       </g>
@@ -113,23 +115,16 @@ export const FunnelPicture = (props: FunnelPictureProps) => {
         </g>
       ))}
       {narrow ? null : (
-        <g fontSize={13.5} fontWeight={600} fill="var(--ink)">
+        <g fontSize={13.5} fontWeight={600} fill="var(--ink)" stroke="var(--sheet)" strokeWidth={4} paintOrder="stroke">
           {labels.map(({ id, y: at }) => {
             const point = points.find(({ key }) => key === id);
             if (!point) return null;
+            const isLeft = x(point.amount) > right - ROOM_FOR_NAME;
+            const beside = CATCH * (isLeft ? -1 : 1);
             return (
-              <g key={id}>
-                <line
-                  x1={x(point.amount) + RADIUS + 4}
-                  x2={right + 4}
-                  y1={y(point.value)}
-                  y2={at}
-                  stroke="var(--rule)"
-                />
-                <text x={right + 8} y={at} dy="0.34em">
-                  {point.name}
-                </text>
-              </g>
+              <text key={id} x={x(point.amount) + beside} y={at} dy="0.34em" textAnchor={isLeft ? 'end' : 'start'}>
+                {point.name}
+              </text>
             );
           })}
         </g>

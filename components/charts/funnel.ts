@@ -38,7 +38,7 @@ export const funnelScales = (points: readonly FunnelPoint[], limits: readonly Fu
   );
   const limited = Math.min(reach * 1.5, Math.max(reach * 1.1, ...limits.map((one) => one.halfWidth(least))));
   const x = scaleLinear<number>({ domain: [0, most * 1.04], range: [margin.left, width - margin.right] });
-  const y = scaleLinear<number>({ domain: [-limited, limited], range: [height - margin.bottom, margin.top], nice: 4 });
+  const y = scaleLinear<number>({ domain: [-limited, limited], range: [height - margin.bottom, margin.top], nice: 8 });
   return { x, y, most };
 };
 

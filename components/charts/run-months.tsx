@@ -29,17 +29,14 @@ type RunMonthsProps = Omit<MonthsCanvas, 'months'> & {
 };
 
 const MARGIN = { top: 34, right: 8, bottom: 44, left: 48 };
-/** The ranges of thin months would flatten all the others. */
-const MOST_REACH = 3;
+/** Room above and below for ranges; those of thin months would flatten all the others and are cut off. */
+const ROOM_FOR_RANGES = 1.4;
 
 const reachOf = (values: readonly RunMonth[], overall: RunMonthsProps['overall']): number => {
-  const points = Math.max(
-    ...values.map(({ value }) => Math.abs(value)),
-    ...(overall ? [Math.abs(overall.low), Math.abs(overall.high)] : []),
-    1e-9,
-  );
-  const ranges = Math.max(...values.filter(({ counts }) => counts).flatMap(({ low, high }) => [-low, high]), points);
-  return Math.max(points * 1.1, Math.min(ranges, points * MOST_REACH));
+  const counting = values.filter(({ counts }) => counts);
+  const points = (counting.length ? counting : values).map(({ value }) => Math.abs(value));
+  const whole = overall ? [Math.abs(overall.low), Math.abs(overall.high)] : [];
+  return Math.max(ROOM_FOR_RANGES * Math.max(...points, 1e-9), ...whole);
 };
 
 /** Month after month around zero, each with its range, over the band of the whole; days of note marked. */
@@ -47,7 +44,7 @@ export const RunMonths = (props: RunMonthsProps) => {
   const { months, values, marks, overall, width, height, narrow, active, onPoint, formatValue } = props;
   const { band } = plainBand({ months, width, height, margin: MARGIN, highest: 1, ticks: 0 });
   const reach = reachOf(values, overall);
-  const y = scaleLinear<number>({ domain: [-reach, reach], range: [band.bottom, band.top], nice: 4, clamp: true });
+  const y = scaleLinear<number>({ domain: [-reach, reach], range: [band.bottom, band.top], nice: 8, clamp: true });
   const middle = (month: string) => band.xOf(month) + band.width / 2;
   const ofDay = (day: string) =>
     band.xOf(day.slice(0, 7)) - (band.step - band.width) / 2 + (band.step * (Number(day.slice(8)) - 1)) / 31;
