@@ -9,7 +9,6 @@ import { coachingList } from './coaching/contract';
 import { explain } from './explain/contract';
 import { assignableList, flagSchema, flagsList } from './flags/contract';
 import { applianceLeaksSchema, siteLeaksSchema } from './leak-rate/contract';
-import { lowRecoveriesList } from './low-recoveries/contract';
 import { monthlyPattern } from './monthly-pattern/contract';
 import { monthlyTrends } from './monthly-trends/contract';
 import { notesList } from './notes/contract';
@@ -48,7 +47,6 @@ export const PUBLISHED_ROUTES: readonly PublishedRoute[] = [
     action: 'flags:read',
     answer: flagSchema,
   },
-  published(lowRecoveriesList, 'Recoveries far below like jobs'),
   published(recordListContract, 'Records, page by page; with format=csv all of them as a recovery file'),
   published(knownNamesContract, 'Names that a new record can use'),
   published(cylinderContentContract, 'What a cylinder holds, as far as the records tell'),

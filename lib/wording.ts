@@ -29,7 +29,7 @@ export const ROLE_NAMES: Record<Role, string> = {
 export const ROLE_PURPOSES: Record<Role, string> = {
   owner: 'Everything, and who may come in',
   operations: 'All figures, records and imports',
-  trainer: 'Technicians, low recoveries and trends; reads records',
+  trainer: 'Technicians, flags and trends; reads records',
   technician: 'Own records only, to read and to write',
   office: 'Records, sites, appliances, trends and imports',
   auditor: 'Reads and exports records; changes nothing',

@@ -24,9 +24,9 @@ const WORDS: Record<Measure, string> = {
     'The recovered mass of each refrigerant times its global warming potential, added up; refrigerants without one in AR6 count as nothing.',
   appliances: 'The appliances with at least one of these recoveries, counted.',
   flagged:
+    'Records with an open flag of certainty 50% or more that speaks against the recovery or the record, counted once each. A system that came short is no fault: those flags alone do not count.',
+  farBelow:
     'Recoveries whose yield lies below Q1 − 1.5 × (Q3 − Q1) of their like jobs, counted. Q1 and Q3 are the lower and the upper quartile.',
-  judged: `Recoveries with at least ${LEAST_LIKE_JOBS} like jobs (same refrigerant and appliance category), counted.`,
-  unjudged: `Recoveries with fewer than ${LEAST_LIKE_JOBS} like jobs (same refrigerant and appliance category), counted.`,
   routineMass: 'The recovered masses of routine jobs (full charge below 100 lb), added up.',
   heldShare: 'Recoveries with a hold after the pull-down, out of those that state whether one was made.',
   downToLevelShare: 'Recoveries whose final vacuum reached the required level, out of those that state a vacuum.',
@@ -41,7 +41,7 @@ const SOURCES: Partial<Record<Measure, string>> = {
   co2eAr6: 'Global warming potentials over 100 years of the IPCC’s Sixth Assessment Report (AR6), Table 7.SM.7.',
   downToLevelShare:
     '40 CFR 82.156, Table 1 (machines made since November 15, 1993); small appliances by paragraph (b).',
-  flagged: 'J. W. Tukey, Exploratory Data Analysis, Addison-Wesley 1977, chapter 2 (the lower fence).',
+  farBelow: 'J. W. Tukey, Exploratory Data Analysis, Addison-Wesley 1977, chapter 2 (the lower fence).',
 };
 
 /** How a measure is computed, in words. */
@@ -91,10 +91,7 @@ export const formulaFilled = (
     case 'gwp':
       return gwp(parts, value ?? 0, unit);
     case 'standing':
-      if (measure === 'unjudged') return plural(count, 'recovery', 'recoveries');
-      return measure === 'flagged'
-        ? `${formatCount(count)} of ${plural(parts.judged, 'recovery', 'recoveries')} judged, in ${plural(parts.groups, 'group', 'groups')} of like jobs`
-        : `${plural(count, 'recovery', 'recoveries')} in ${plural(parts.groups, 'group', 'groups')} of like jobs`;
+      return `${formatCount(count)} of ${plural(parts.judged, 'recovery', 'recoveries')} judged, in ${plural(parts.groups, 'group', 'groups')} of like jobs`;
     case 'count':
       return measure === 'appliances'
         ? `${plural(value ?? 0, 'appliance', 'appliances')} in ${plural(count, 'recovery', 'recoveries')}`

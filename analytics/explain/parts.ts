@@ -2,7 +2,8 @@ import 'server-only';
 import { and, eq, isNotNull, isNull, lt, sql } from 'drizzle-orm';
 import { factFigures, toGram } from '@/analytics/fact-figures';
 import type { Figure } from '@/analytics/figures/figure';
-import { getJudged } from '@/analytics/low-recoveries/query';
+import { countFlagged } from '@/analytics/flags/counts';
+import { getJudged } from '@/analytics/like-jobs/judged';
 import { LARGE_PLANT_KG } from '@/analytics/monthly-pattern/pattern';
 import type { Scope } from '@/analytics/scope';
 import { inScope } from '@/analytics/scope-query';
@@ -126,11 +127,10 @@ export const computeMeasure = async (
     case 'downToLevelShare':
       return getPart(tx, scope, 'downToLevel');
     case 'flagged':
-    case 'judged':
-    case 'unjudged': {
-      const judged = await getJudged(tx, scope);
-      const counts = { flagged: judged.low, judged: judged.records, unjudged: judged.tooFewLikeJobs };
-      return { value: counts[measure], parts: { kind: 'standing', judged: judged.records, groups: judged.groups } };
+      return { value: await countFlagged(tx, scope), parts: { kind: 'count' } };
+    case 'farBelow': {
+      const { records, groups, low } = await getJudged(tx, scope);
+      return { value: low, parts: { kind: 'standing', judged: records, groups } };
     }
   }
 };

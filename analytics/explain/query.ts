@@ -53,7 +53,7 @@ export const getExplained = async (tx: Tx, { measure, ...scope }: ExplainQuery):
   const { excluded, ...sums } = found ?? NOTHING;
   const { value, parts } = await computeMeasure(tx, measure, scope, sums);
   const { count, sum } = await getRecordSums(tx, scope, measure);
-  const unjudged = parts.kind === 'standing' && measure !== 'unjudged' ? sums.recoveries - parts.judged : 0;
+  const unjudged = parts.kind === 'standing' ? sums.recoveries - parts.judged : 0;
   const outside = (reading: string) => (RECORDS_OF[measure]?.states === reading ? sums.recoveries - count : 0);
   const leftOut: Explained['leftOut'] = [
     { reason: 'entry_error' as const, count: excluded },

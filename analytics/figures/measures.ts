@@ -9,8 +9,7 @@ export const MEASURES = [
   'co2eAr6',
   'appliances',
   'flagged',
-  'judged',
-  'unjudged',
+  'farBelow',
   'routineMass',
   'heldShare',
   'downToLevelShare',
@@ -30,15 +29,14 @@ export const MEASURE_UNITS: Record<Measure, MeasureUnit> = {
   co2eAr6: 'kg',
   appliances: 'count',
   flagged: 'count',
-  judged: 'count',
-  unjudged: 'count',
+  farBelow: 'count',
   routineMass: 'kg',
   heldShare: 'share',
   downToLevelShare: 'share',
 };
 
-/** How a recovery stands among its like jobs: far below them, judged by enough of them, or too few to say. */
-export const LIKE_JOBS_STANDINGS = ['below', 'enough', 'few'] as const;
+/** How a recovery stands among its like jobs: far below them. */
+export const LIKE_JOBS_STANDINGS = ['below'] as const;
 export type LikeJobsStanding = (typeof LIKE_JOBS_STANDINGS)[number];
 
 /** What a record may be asked to state: a hold after the pull-down, a final vacuum. */
@@ -50,17 +48,27 @@ export const PLANT_SIZES = ['routine', 'large'] as const;
 export type PlantSize = (typeof PLANT_SIZES)[number];
 
 /** What narrows the records of a figure besides its scope. */
-export type MeasureRecords = { likeJobs?: LikeJobsStanding; states?: StatedReading; plant?: PlantSize };
+export type MeasureRecords = {
+  flagged?: 'yes';
+  likeJobs?: LikeJobsStanding;
+  states?: StatedReading;
+  plant?: PlantSize;
+};
 
 /** Of which records in scope a measure is made, where it is not all that count. */
 export const RECORDS_OF: Partial<Record<Measure, MeasureRecords>> = {
-  flagged: { likeJobs: 'below' },
-  judged: { likeJobs: 'enough' },
-  unjudged: { likeJobs: 'few' },
+  flagged: { flagged: 'yes' },
+  farBelow: { likeJobs: 'below' },
   routineMass: { plant: 'routine' },
   heldShare: { states: 'hold' },
   downToLevelShare: { states: 'vacuum' },
 };
 
-/** Whether a measure tells how recoveries stand among like jobs: who reads it must be allowed to read flags. */
-export const isJudgement = (measure: Measure): boolean => RECORDS_OF[measure]?.likeJobs !== undefined;
+/** Whether a measure tells which records need a look: who reads it must be allowed to read flags. */
+export const isFlagFigure = (measure: Measure): boolean => RECORDS_OF[measure]?.flagged !== undefined;
+
+/** Whether a measure tells how recoveries stand among those of everybody: not for a technician, who sees his own. */
+export const isComparison = (measure: Measure): boolean => RECORDS_OF[measure]?.likeJobs !== undefined;
+
+/** Whether a measure judges recoveries in one of these ways. */
+export const isJudgement = (measure: Measure): boolean => isFlagFigure(measure) || isComparison(measure);

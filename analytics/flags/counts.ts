@@ -5,6 +5,7 @@ import { inScope } from '@/analytics/scope-query';
 import { wilson } from '@/analytics/statistics/intervals/proportion';
 import type { Tx } from '@/db/client';
 import { flagDecisions, flags } from '@/db/schema/flags';
+import { flaggedRecoveries } from '@/db/views/flagged-recoveries';
 import { recoveryFacts as f } from '@/db/views/recovery-facts';
 import { SURE_ENOUGH } from '@/lib/flags/certainty';
 import type { FlagsList } from './contract';
@@ -36,6 +37,16 @@ export const countOpen = async (tx: Tx, scope: Scope): Promise<FlagsList['open']
     .groupBy(flags.rule)
     .orderBy(desc(count()), flags.rule);
   return { ...(all ?? { flags: 0, records: 0, flagged: 0 }), byRule };
+};
+
+/** How many records in scope count as flagged. */
+export const countFlagged = async (tx: Tx, scope: Scope): Promise<number> => {
+  const [row] = await tx
+    .select({ flagged: count() })
+    .from(flaggedRecoveries)
+    .innerJoin(f, and(eq(f.companyId, flaggedRecoveries.companyId), eq(f.id, flaggedRecoveries.recoveryId)))
+    .where(inScope(scope));
+  return row?.flagged ?? 0;
 };
 
 /** How many of the last flags that were decided by themselves were borne out; their range is Wilson's of 95 %. */

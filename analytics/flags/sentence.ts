@@ -3,21 +3,24 @@ import { formatMass, formatMassWithUnit, formatPercent, plural } from '@/lib/for
 import type { DisplayUnit } from '@/lib/vocabulary';
 import type { Flag, FlagsList } from './contract';
 
-/** How many records of the scope need a look, and which one is the surest. */
+/** How many records of the scope need a look, and which one is the surest where that is known. */
 export const flagsAnswer = (
-  { flagged, records }: FlagsList['open'],
-  surest: Flag | undefined,
-  unit: DisplayUnit,
+  { flagged, records }: Pick<FlagsList['open'], 'flagged' | 'records'>,
+  surest?: { flag: Flag; unit: DisplayUnit },
 ): Piece[] => {
   if (flagged === 0)
     return [records === 0 ? 'No record here needs a look.' : 'No record here is more likely wrong than right.'];
   const figure: Piece = { measure: 'flagged', figure: plural(flagged, 'record', 'records') };
   const need = ` ${flagged === 1 ? 'needs' : 'need'} a look`;
   if (!surest) return [figure, `${need}.`];
-  const { recordRef, recoveredMass, fullCharge } = surest;
-  const masses = `${formatMass(recoveredMass, unit)} of ${formatMassWithUnit(fullCharge, unit)}`;
-  return [figure, `${need}. The surest is ${recordRef}: ${masses} at ${formatPercent(surest.certainty)}.`];
+  const { recordRef, recoveredMass, fullCharge } = surest.flag;
+  const masses = `${formatMass(recoveredMass, surest.unit)} of ${formatMassWithUnit(fullCharge, surest.unit)}`;
+  return [figure, `${need}. The surest: ${recordRef}, with ${masses}.`];
 };
+
+/** A certainty as it is read: nothing is ever quite sure. */
+export const formatCertainty = (certainty: number): string =>
+  certainty > 0.99 ? 'over 99%' : formatPercent(certainty);
 
 /** About which open records the answer says nothing; empty when about none. */
 export const lessSureNote = ({ records, flagged }: FlagsList['open']): string => {

@@ -12,7 +12,7 @@ const figures = {
   recoveredMass: massKg,
   recoveries: count,
   medianYield: share,
-  /** Recoveries below the lower fence of their like jobs: a reason to look. */
+  /** Records with an open flag that counts: a reason to look. */
   flagged: count,
   /** CO2-equivalent kept out of the air, kg: recovered mass times GWP (IPCC AR4, 100 years). */
   co2e: massKg,

@@ -3,8 +3,9 @@ import { and, eq, sql } from 'drizzle-orm';
 import type { Dimension, Scope } from '@/analytics/scope';
 import { FACT_COLUMNS, inScope } from '@/analytics/scope-query';
 import type { Tx } from '@/db/client';
+import { flaggedRecoveries as flagged } from '@/db/views/flagged-recoveries';
 import { recoveryFacts as f } from '@/db/views/recovery-facts';
-import { lowRecoveries as low } from '@/db/views/yield-limits';
+
 import type { MonthlyTrends, MonthlyTrendsQuery } from './contract';
 import { largestKeys, otherKeysOf } from './largest-keys';
 import { sumsByMonth, sumsByRecord } from './months';
@@ -14,12 +15,12 @@ import { monthsAfter } from './series';
 
 const toMonth = (firstDayOfMonth: string): string => firstDayOfMonth.slice(0, 7);
 
-/** Low recoveries in scope by month and key. */
+/** Flagged records in scope by month and key. */
 const countFlagged = (tx: Tx, scope: Scope, by: Dimension) =>
   tx
     .select({ month: f.month, key: keyOf(FACT_COLUMNS[by]).as('key'), flagged: sql<number>`count(*)`.mapWith(Number) })
-    .from(low)
-    .innerJoin(f, and(eq(f.companyId, low.companyId), eq(f.id, low.recoveryId)))
+    .from(flagged)
+    .innerJoin(f, and(eq(f.companyId, flagged.companyId), eq(f.id, flagged.recoveryId)))
     .where(inScope(scope))
     .groupBy(f.month, FACT_COLUMNS[by]);
 

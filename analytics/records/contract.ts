@@ -83,6 +83,8 @@ export const recordListQuery = scopeSchema.safeExtend({
   importId: z.uuid().optional(),
   /** `none`: only records that count in figures; `entry_error`: only those left out. */
   exclusion: z.enum(EXCLUSIONS).optional(),
+  /** Only records that count as flagged; for who may read flags. */
+  flagged: z.enum(['yes']).optional(),
   /** How the record stands among its like jobs; for who may read flags. */
   likeJobs: z.enum(LIKE_JOBS_STANDINGS).optional(),
   /** Only records that state a hold, or a final vacuum. */

@@ -5,9 +5,9 @@ import { LARGE_PLANT_KG } from '@/analytics/monthly-pattern/pattern';
 import type { Scope } from '@/analytics/scope';
 import { inScope } from '@/analytics/scope-query';
 import { appliances, sites, technicians } from '@/db/schema/places';
+import { flaggedRecoveries as flagged } from '@/db/views/flagged-recoveries';
 import { recoveryFacts as f } from '@/db/views/recovery-facts';
-import { yieldLimits as limits, lowRecoveries as low } from '@/db/views/yield-limits';
-import { LEAST_LIKE_JOBS } from '@/lib/like-jobs';
+import { lowRecoveries as low } from '@/db/views/yield-limits';
 import type { RecordListQuery } from './contract';
 
 /** A search text as a LIKE pattern that means just this text, anywhere. */
@@ -37,13 +37,11 @@ const found = (text: string): SQL | undefined =>
 
 // IS TRUE keeps a set from being joined: of a company that was never analysed the planner expects one row, and would
 // work the set out anew for each record.
-const enoughLikeJobs = sql`((${f.refrigerant}, coalesce(${f.category}, '')) in (select ${limits.refrigerant}, ${limits.kind} from ${limits} where ${limits.likeJobs} >= ${LEAST_LIKE_JOBS})) is true`;
-
 const STANDS: Record<LikeJobsStanding, SQL> = {
   below: sql`(${f.id} in (select ${low.recoveryId} from ${low})) is true`,
-  enough: enoughLikeJobs,
-  few: sql`not (${enoughLikeJobs})`,
 };
+
+const IS_FLAGGED = sql`(${f.id} in (select ${flagged.recoveryId} from ${flagged})) is true`;
 
 const STATES: Record<StatedReading, SQL> = { hold: isNotNull(f.held), vacuum: isNotNull(f.downToLevel) };
 
@@ -57,13 +55,14 @@ const PLANT: Record<PlantSize, SQL> = {
 /** What narrows a list of records besides the page and its order. */
 type RecordFilters = Scope &
   Pick<RecordListQuery, 'q' | 'importId'> &
-  Partial<Pick<RecordListQuery, 'exclusion' | 'likeJobs' | 'states' | 'lacks' | 'plant'>>;
+  Partial<Pick<RecordListQuery, 'exclusion' | 'flagged' | 'likeJobs' | 'states' | 'lacks' | 'plant'>>;
 
 /** The records that a list query means, whatever page of them. */
 export const recordsInList = ({
   q,
   importId,
   exclusion,
+  flagged: isFlagged,
   likeJobs,
   states,
   lacks,
@@ -75,6 +74,7 @@ export const recordsInList = ({
     q ? found(q) : undefined,
     importId ? eq(f.importId, importId) : undefined,
     exclusion ? (exclusion === 'none' ? isNull(f.exclusion) : isNotNull(f.exclusion)) : undefined,
+    isFlagged ? IS_FLAGGED : undefined,
     likeJobs ? STANDS[likeJobs] : undefined,
     states ? STATES[states] : undefined,
     lacks ? LACKS[lacks] : undefined,

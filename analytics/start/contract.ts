@@ -54,14 +54,14 @@ export const start = defineContract({
     latest: z.object({ month, whole: z.boolean(), now: monthFigures, yearBefore: monthFigures.nullable() }).nullable(),
     /** That month against the same one a year before, like for like; for who may read trends. */
     comparison: trendsComparison.response.shape.comparison,
-    /** What the month's recoveries far below like jobs fall short of the median of like jobs; for who may read flags. */
+    /** What the month's recoveries far below like jobs fall short of the median of like jobs; for who decides flags. */
     shortfall: z.object({ recoveries: count, mass: massKg }).nullable(),
-    /** How the recoveries of the last days stand among like jobs; for who may read flags. */
+    /** How many records of the last days need a look; for who may read flags. */
     lately: z
       .object({
         from: day,
         to: day,
-        judged: z.object({ records: count, groups: count, tooFewLikeJobs: count, low: count }),
+        flagged: count,
       })
       .nullable(),
     /** The file that was taken in last; for who may import. */

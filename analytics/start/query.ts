@@ -1,5 +1,5 @@
 import 'server-only';
-import { getJudged } from '@/analytics/low-recoveries/query';
+import { countFlagged } from '@/analytics/flags/counts';
 import { getLatestNotes } from '@/analytics/notes/query';
 import { getTrendsComparison } from '@/analytics/trends-comparison/query';
 import type { Tx } from '@/db/client';
@@ -38,8 +38,8 @@ export const getStart = async (tx: Tx, role: Role, today: string): Promise<Start
           )
         ).comparison
       : null,
-    shortfall: latest && allowed('flags:read') ? await getShortfall(tx, latest.month) : null,
-    lately: latest && allowed('flags:read') ? { ...lately, judged: await getJudged(tx, lately) } : null,
+    shortfall: latest && allowed('flags:decide') ? await getShortfall(tx, latest.month) : null,
+    lately: latest && allowed('flags:read') ? { ...lately, flagged: await countFlagged(tx, lately) } : null,
     lastFile: allowed('imports:manage') ? await getLastFile(tx) : null,
     waiting: latest ? await getWaiting(tx, { role, today }) : [],
     notes: allowed('notes:read') ? await getLatestNotes(tx, latelyFrom(today), MOST_NOTES) : [],

@@ -1,6 +1,6 @@
 import type { FigureScope } from '@/analytics/figures/figure';
 import type { Piece } from '@/analytics/figures/pieces';
-import { lowAnswer } from '@/analytics/low-recoveries/sentence';
+import { flagsAnswer } from '@/analytics/flags/sentence';
 import { changeWords } from '@/analytics/monthly-trends/sentence';
 import { EVERY_RECORD, monthsBefore } from '@/analytics/scope-address';
 import { formatCount, formatDay, formatMassWithUnit, formatMonth, formatPercent, plural } from '@/lib/format';
@@ -45,7 +45,7 @@ const logPieces = ({ recoveries, firstOn, lastOn }: Start): Piece[] => [
 const shortfallWords = ({ shortfall }: Start, unit: DisplayUnit): Piece[] =>
   shortfall?.recoveries
     ? [
-        { measure: 'flagged', figure: plural(shortfall.recoveries, 'recovery', 'recoveries') },
+        { measure: 'farBelow', figure: plural(shortfall.recoveries, 'recovery', 'recoveries') },
         ` far below like jobs came to ${formatMassWithUnit(shortfall.mass, unit, 0)} less than the middle of like jobs would have been, whatever the reason.`,
       ]
     : [];
@@ -54,9 +54,9 @@ const leftOutWords = ({ excluded }: Start): string =>
   excluded ? `${formatCount(excluded)} more ${excluded === 1 ? 'is' : 'are'} left out of figures as entry errors.` : '';
 
 const latelyAnswer = ({ lately }: Start): StartAnswer | null =>
-  lately && lately.judged.records > 0
+  lately && lately.flagged > 0
     ? {
-        pieces: lowAnswer(lately.judged),
+        pieces: flagsAnswer({ flagged: lately.flagged, records: lately.flagged }),
         scope: wholeScope(lately.from, lately.to),
         sub: ['In the last 30 days. A reason to look, not a finding.'],
       }

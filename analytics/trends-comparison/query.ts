@@ -5,8 +5,9 @@ import type { Scope } from '@/analytics/scope';
 import { Z_95 } from '@/analytics/statistics/distributions/z-95';
 import { compareSums } from '@/analytics/statistics/season/year-on-year';
 import type { Tx } from '@/db/client';
+import { flaggedRecoveries as flagged } from '@/db/views/flagged-recoveries';
 import { recoveryFacts as f } from '@/db/views/recovery-facts';
-import { lowRecoveries as low } from '@/db/views/yield-limits';
+
 import { kgToGram } from '@/lib/units';
 import type { Comparison, PeriodFigures, TrendsComparison, TrendsComparisonQuery } from './contract';
 import { moversOf } from './movers';
@@ -39,8 +40,8 @@ const countFlagged = async (tx: Tx, scope: Scope, now: Side, before: Side) => {
   const among = (side: Side) => sql<number>`count(*) filter (where ${onDays(scope, side.spans)})`.mapWith(Number);
   const [row] = await tx
     .select({ now: among(now), before: among(before) })
-    .from(low)
-    .innerJoin(f, and(eq(f.companyId, low.companyId), eq(f.id, low.recoveryId)))
+    .from(flagged)
+    .innerJoin(f, and(eq(f.companyId, flagged.companyId), eq(f.id, flagged.recoveryId)))
     .where(or(onDays(scope, now.spans), onDays(scope, before.spans)));
   return { now: row?.now ?? 0, before: row?.before ?? 0 };
 };

@@ -1,7 +1,7 @@
 import type { Flag } from '@/analytics/flags/contract';
-import { YieldStrip } from '@/components/low-recoveries/yield-strip';
 import { formatCount, formatPercent } from '@/lib/format';
 import { VacuumStrip } from './vacuum-strip';
+import { YieldStrip } from './yield-strip';
 
 /** Where this pull lies among like jobs, and its vacuum beside it where that is the reason; nothing where neither is. */
 export const FlagPicture = ({ flag }: { flag: Flag }) => {

@@ -1,6 +1,6 @@
 import type { FlagReason } from '@/analytics/flags/contract';
+import { formatCertainty } from '@/analytics/flags/sentence';
 import { RULE_QUESTIONS } from '@/lib/flags/words';
-import { formatPercent } from '@/lib/format';
 
 /** The reasons of a record, the surest first: what is asked, how sure, and the evidence in words. */
 export const FlagReasons = ({ reasons }: { reasons: readonly FlagReason[] }) => (
@@ -9,7 +9,7 @@ export const FlagReasons = ({ reasons }: { reasons: readonly FlagReason[] }) => 
       <li key={reason.id} className="min-w-0">
         <p className="flex flex-wrap items-baseline gap-x-2.5">
           <span className="font-semibold">{RULE_QUESTIONS[reason.rule]}</span>
-          <span className="font-mono text-sm text-ink-2">{formatPercent(reason.certainty)}</span>
+          <span className="font-mono text-sm text-ink-2">{formatCertainty(reason.certainty)}</span>
           {reason.state === 'decided' ? <span className="text-sm text-ink-3">decided</span> : null}
         </p>
         <p className="max-w-prose text-sm text-ink-2">{reason.explanation}</p>

@@ -54,7 +54,12 @@ export const FlagsScreen = () => {
         return (
           <>
             <PageHead
-              title={<FigureSentence pieces={flagsAnswer(first.open, surest, scope.unit)} scope={scope} />}
+              title={
+                <FigureSentence
+                  pieces={flagsAnswer(first.open, surest && { flag: surest, unit: scope.unit })}
+                  scope={scope}
+                />
+              }
               sub={
                 <>
                   A reason to look, not a finding. {lessSureNote(first.open)} {CERTAINTY_MEANING}{' '}

@@ -68,7 +68,7 @@ export const LOW: GroupedColumn<{ lowRecoveries: number }> = {
   id: 'lowRecoveries',
   label: 'Far below',
   kind: 'count',
-  measure: 'flagged',
+  measure: 'farBelow',
   term: 'far-below-like-jobs',
   value: ({ lowRecoveries }) => lowRecoveries,
 };

@@ -15,6 +15,7 @@ const PARSERS = {
   q: parseAsString.withDefault(''),
   importId: parseAsString,
   exclusion: parseAsStringLiteral(EXCLUSIONS),
+  flagged: parseAsStringLiteral(['yes']),
   likeJobs: parseAsStringLiteral(LIKE_JOBS_STANDINGS),
   states: parseAsStringLiteral(STATED_READINGS),
   lacks: parseAsStringLiteral(STATED_READINGS),
@@ -36,7 +37,7 @@ const markOf = (text: string): string => {
 export const useRecordList = () => {
   const { scope } = useScope();
   const [address, setAddress] = useQueryStates(PARSERS, { history: 'push' });
-  const { sort, q, importId, exclusion, likeJobs, states, lacks, plant, limit, columns, page } = address;
+  const { sort, q, importId, exclusion, flagged, likeJobs, states, lacks, plant, limit, columns, page } = address;
   const filters = useMemo<RecordFilters>(
     () => ({
       ...scopeQuery(scope),
@@ -44,12 +45,13 @@ export const useRecordList = () => {
       ...(q ? { q } : {}),
       ...(importId ? { importId } : {}),
       ...(exclusion ? { exclusion } : {}),
+      ...(flagged ? { flagged } : {}),
       ...(likeJobs ? { likeJobs } : {}),
       ...(states ? { states } : {}),
       ...(lacks ? { lacks } : {}),
       ...(plant ? { plant } : {}),
     }),
-    [scope, sort, q, importId, exclusion, likeJobs, states, lacks, plant],
+    [scope, sort, q, importId, exclusion, flagged, likeJobs, states, lacks, plant],
   );
   const mark = `${markOf(searchString({ ...filters, limit }))}.`;
   const cursor = page?.startsWith(mark) ? page.slice(mark.length) : null;
@@ -68,6 +70,7 @@ export const useRecordList = () => {
       setAddress({
         importId: null,
         exclusion: null,
+        flagged: null,
         likeJobs: null,
         states: null,
         lacks: null,

@@ -62,21 +62,21 @@ export const fieldValue = (field: string, value: string): string => {
 
 const STANDING_PHRASES: Record<LikeJobsStanding, string> = {
   below: 'far below their like jobs',
-  enough: 'with enough like jobs to be judged',
-  few: 'with too few like jobs to be judged',
 };
 
 /** What narrows a list besides scope and search, to stand behind "records"; empty when nothing does. */
 export const onlyPhrase = ({
   importId,
   exclusion,
+  flagged,
   likeJobs,
   states,
   lacks,
   plant,
-}: Pick<RecordFilters, 'importId' | 'exclusion' | 'likeJobs' | 'states' | 'lacks' | 'plant'>): string =>
+}: Pick<RecordFilters, 'importId' | 'exclusion' | 'flagged' | 'likeJobs' | 'states' | 'lacks' | 'plant'>): string =>
   [
     importId ? 'that one import added or changed last' : '',
+    flagged ? 'that need a look' : '',
     likeJobs ? STANDING_PHRASES[likeJobs] : '',
     states === 'hold' ? 'that state a hold' : '',
     states === 'vacuum' ? 'that state a final vacuum' : '',

@@ -86,8 +86,8 @@ export const comparisonRows = (
     change: pointsChange(now.downToLevelShare, before.downToLevelShare),
   },
   {
-    label: 'Far below like jobs',
-    term: 'far-below-like-jobs',
+    label: 'Flagged',
+    term: 'flagged',
     ...(mayLook ? { measure: 'flagged' as const } : {}),
     figure: ({ flagged }) => formatCount(flagged),
     small: ({ flaggedShare }) => `${share(flaggedShare, 1)} of the recoveries`,

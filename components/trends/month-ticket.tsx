@@ -73,7 +73,7 @@ export const MonthTicket = ({ month, then, scope, className }: MonthTicketProps)
       small: 'CO₂e, AR4',
     },
     {
-      label: <Term id="far-below-like-jobs">Far below like jobs</Term>,
+      label: <Term id="flagged">Flagged</Term>,
       value: mayLook ? opens('flagged', flagged) : flagged,
     },
   ];

@@ -65,7 +65,7 @@ export const PERMISSIONS: Record<Role, readonly Action[]> = {
     'coaching:write',
     'leaks:read',
   ],
-  technician: ['records:read', 'records:write', 'records:export', 'coaching:read', 'technician:read'],
+  technician: ['flags:read', 'records:read', 'records:write', 'records:export', 'coaching:read', 'technician:read'],
   office: [
     'trends:read',
     'sites:read',

@@ -24,13 +24,29 @@ export const STATISTICS = [
   {
     id: 'far-below-like-jobs',
     name: 'Far below like jobs',
-    also: ['low recovery', 'lower fence', 'flagged'],
+    also: ['low recovery', 'lower fence'],
     meaning:
       'The yield lies more than one and a half times the width of the middle half below the lower quartile of like jobs. A reason to look, not a finding: a system that had leaked looks the same as a pull cut short.',
     source: {
       standing: 'published work',
       text: 'J. W. Tukey, Exploratory Data Analysis, Addison-Wesley 1977, chapter 2',
     },
+  },
+  {
+    id: 'flagged',
+    name: 'Flagged',
+    also: ['flag', 'needs a look'],
+    meaning:
+      'The record has at least one open flag of certainty 50% or more that speaks against the recovery or the record. A flag that says only that the system came short does not count: that is no fault. A decided flag counts no longer.',
+    source: { standing: 'rule of this product', text: 'The page “How we judge” has every rule' },
+  },
+  {
+    id: 'certainty',
+    name: 'Certainty',
+    unit: 'per cent',
+    meaning:
+      'How likely it is that the record is what the flag says: of ten flags with a certainty of 80%, about eight turn out to be so. What is decided on flags shows how often that holds.',
+    source: { standing: 'rule of this product', text: 'Bayes’ theorem, with what the company’s own records show' },
   },
   {
     id: 'year-before',

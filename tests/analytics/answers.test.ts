@@ -1,8 +1,8 @@
 import { expect, test } from 'vitest';
 import { lowAgainNote, mostLowFirst } from '@/analytics/appliances/low-again';
 import { piecesText } from '@/analytics/figures/pieces';
+import { borneOutNote, flagsAnswer, formatCertainty, lessSureNote } from '@/analytics/flags/sentence';
 import { groupAnswer, groupsOfHalf, spreadNote } from '@/analytics/group-sentence';
-import { lowAnswer, unjudgedNote } from '@/analytics/low-recoveries/sentence';
 
 const plainSpaces = (text: string) => text.replaceAll('\u00a0', ' ');
 const group = (recoveredMass: number, recoveries = 1) => ({ recoveredMass, recoveries });
@@ -34,20 +34,29 @@ test('a spread is only told where few hold half', () => {
   ).toBe('');
 });
 
-test('low recoveries in words', () => {
-  const judged = { records: 1204, groups: 9, tooFewLikeJobs: 34, low: 12 };
-  expect(plainSpaces(piecesText(lowAnswer(judged)))).toBe('12 of 1,204 recoveries lie far below like jobs.');
-  expect(plainSpaces(piecesText(lowAnswer({ ...judged, low: 1 })))).toBe(
-    '1 of 1,204 recoveries lies far below like jobs.',
+test('flags in words', () => {
+  const answer = (flagged: number, records = flagged) => plainSpaces(piecesText(flagsAnswer({ flagged, records })));
+  expect(answer(12)).toBe('12 records need a look.');
+  expect(answer(1)).toBe('1 record needs a look.');
+  expect(answer(0)).toBe('No record here needs a look.');
+  expect(answer(0, 3)).toBe('No record here is more likely wrong than right.');
+  expect(plainSpaces(lessSureNote({ flags: 9, flagged: 2, records: 3, byRule: [] }))).toBe(
+    '1 other record may only have come short, or is less sure.',
   );
-  expect(plainSpaces(piecesText(lowAnswer({ ...judged, low: 0 })))).toBe(
-    'None of 1,204 recoveries lies far below like jobs.',
+  expect(lessSureNote({ flags: 2, flagged: 2, records: 2, byRule: [] })).toBe('');
+});
+
+test('how often flags were borne out is said with its range, and nothing before the first', () => {
+  // Wilson, 31 of 50: 0.4815 to 0.7414 (statistics handbooks print 0.48 to 0.74).
+  expect(plainSpaces(borneOutNote({ decided: 50, confirmed: 31, low: 0.4815, high: 0.7414 }))).toBe(
+    'Of the last 50 decided flags, 31 were borne out (likely range 48% to 74%).',
   );
-  expect(piecesText(lowAnswer({ ...judged, records: 0, low: 0 }))).toBe('Too few like jobs to say anything.');
-  expect(plainSpaces(piecesText(unjudgedNote(judged)))).toBe(
-    'About 34 others nothing is said: fewer than 20 jobs are like them.',
-  );
-  expect(piecesText(unjudgedNote({ ...judged, tooFewLikeJobs: 0 }))).toBe('');
+  expect(borneOutNote({ decided: 0, confirmed: 0, low: null, high: null })).toBe('');
+});
+
+test('no certainty is read as quite sure', () => {
+  expect(formatCertainty(1)).toBe('over 99%');
+  expect(formatCertainty(0.8)).toBe('80%');
 });
 
 test('units that come back low are counted in words, the most often low first', () => {

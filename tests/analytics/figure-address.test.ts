@@ -68,5 +68,5 @@ test('the records of a figure are those that count, and stand as its measure say
   const scope = { ...EVERY_RECORD, from: '2026-11', to: '2026-11', site: ['North Yard'] };
   const asked = { from: '2026-11', to: '2026-11', site: ['North Yard'], exclusion: 'none' };
   expect(figureRecords({ measure: 'recoveries', scope })).toEqual(asked);
-  expect(figureRecords({ measure: 'flagged', scope })).toEqual({ ...asked, likeJobs: 'below' });
+  expect(figureRecords({ measure: 'flagged', scope })).toEqual({ ...asked, flagged: 'yes' });
 });

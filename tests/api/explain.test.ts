@@ -4,12 +4,13 @@ import { DIMENSIONS, UNSTATED } from '@/analytics/dimensions';
 import type { Explained } from '@/analytics/explain/contract';
 import { type Figure, type FigureScope, figureRecords, monthInScope } from '@/analytics/figures/figure';
 import { MEASURES, type Measure } from '@/analytics/figures/measures';
+import type { FlagsList } from '@/analytics/flags/contract';
 import type { RecordList, RecordRow } from '@/analytics/records/contract';
 import { EVERY_RECORD, onlyOf, scopeQuery } from '@/analytics/scope-address';
 import type { TrendsComparison } from '@/analytics/trends-comparison/contract';
 import { GET as appliancesRoute } from '@/app/api/appliances/route';
 import { GET as explainRoute } from '@/app/api/explain/route';
-import { GET as lowRoute } from '@/app/api/low-recoveries/route';
+import { GET as flagsRoute } from '@/app/api/flags/route';
 import { GET as recordsRoute } from '@/app/api/recoveries/route';
 import { GET as sitesRoute } from '@/app/api/sites/route';
 import { GET as techniciansRoute } from '@/app/api/technicians/route';
@@ -18,6 +19,7 @@ import { GET as trendsRoute } from '@/app/api/trends/monthly/route';
 import { searchString } from '@/lib/api/client';
 import { asRole } from '../support/as-role';
 import { apiRequest, newCompany } from '../support/company';
+import { putFlags, type TestFlag } from '../support/flags';
 import { randomRecords } from '../support/random-records';
 import { randomScopes } from '../support/random-scopes';
 import { writeRecords } from '../support/records';
@@ -38,7 +40,22 @@ const explained = ({ measure, scope }: Figure, token = owner) =>
 
 beforeAll(async () => {
   owner = await company.token('owner');
-  await writeRecords(company.scope, randomRecords(360, 20_261_201));
+  const records = randomRecords(360, 20_261_201);
+  const ids = await writeRecords(company.scope, records);
+  const counted = records.flatMap(({ ref, excluded }) => (excluded || !ref ? [] : [ids.get(ref) ?? '']));
+  // Every fourth has a flag that counts; the next one flags that do not: too unsure, or no fault.
+  await putFlags(
+    company.companyId,
+    counted.flatMap((recoveryId, index): TestFlag[] => {
+      if (index % 4 === 0) return [{ recoveryId, rule: 'stopped_early', certainty: 0.5 + (index % 5) / 10 }];
+      return index % 4 === 1
+        ? [
+            { recoveryId, rule: 'hold_missing', certainty: 0.49 },
+            { recoveryId, rule: 'short_on_arrival', certainty: 0.9 },
+          ]
+        : [];
+    }),
+  );
   await asRole('owner', {}, (client) => client.query('analyze recoveries'));
 });
 
@@ -141,7 +158,7 @@ const SCREENS: Record<string, Screen> = {
     ),
   sites: async (scope) =>
     (await itemsOf<{ site: string; lowRecoveries: number }>(sitesRoute, '/api/sites', scope)).map((row) =>
-      cell(onlyOf(scope, 'site', [row.site]), { ...row, flagged: row.lowRecoveries }),
+      cell(onlyOf(scope, 'site', [row.site]), { ...row, farBelow: row.lowRecoveries }),
     ),
   appliances: async (scope) =>
     (
@@ -153,7 +170,7 @@ const SCREENS: Record<string, Screen> = {
     ).map((row) =>
       cell(onlyOf(onlyOf(scope, 'site', [row.site]), 'appliance', [row.appliance]), {
         ...row,
-        flagged: row.lowRecoveries,
+        farBelow: row.lowRecoveries,
       }),
     ),
   comparison: async (scope, by) => {
@@ -180,10 +197,9 @@ const SCREENS: Record<string, Screen> = {
     const routine = list.items.filter((row) => row.exclusion === null && row.fullCharge < 45.3592);
     return [cell(scope, { routineMass: sumGrams(routine, 'recoveredMass') / 1000 })];
   },
-  'low recoveries': async (scope) => {
-    type Low = { judged: { records: number; low: number; tooFewLikeJobs: number } };
-    const { judged } = await ask<Low>(lowRoute, `/api/low-recoveries${searchString(scopeQuery(scope))}`);
-    return [cell(scope, { judged: judged.records, flagged: judged.low, unjudged: judged.tooFewLikeJobs })];
+  flags: async (scope) => {
+    const { open } = await ask<FlagsList>(flagsRoute, `/api/flags${searchString(scopeQuery(scope))}`);
+    return [cell(scope, { flagged: open.flagged })];
   },
 };
 
@@ -276,16 +292,22 @@ test('an unknown measure or a scope that is none is refused with its place', asy
   expect(await refused('?measure=recoveries&category=chiller')).toEqual(['category']);
 });
 
-test('how recoveries stand among like jobs is for who may read flags', async () => {
+test('what judges recoveries is for who may read flags, like jobs of all for who compares people', async () => {
   const statusOf = async (route: Route, address: string, token: string) =>
     (await route(apiRequest(address, token), undefined as never)).status;
   const auditor = await company.token('auditor');
   const trainer = await company.token('trainer');
-  for (const measure of ['flagged', 'judged', 'unjudged'] as const) {
+  const technician = await company.token('technician');
+  for (const measure of ['flagged', 'farBelow'] as const) {
     expect(await statusOf(explainRoute, `/api/explain?measure=${measure}`, auditor)).toBe(403);
     expect(await statusOf(explainRoute, `/api/explain?measure=${measure}`, trainer)).toBe(200);
   }
+  expect(await statusOf(explainRoute, '/api/explain?measure=flagged', technician)).toBe(200);
+  expect(await statusOf(explainRoute, '/api/explain?measure=farBelow', technician)).toBe(403);
   expect(await statusOf(recordsRoute, '/api/recoveries?likeJobs=below', auditor)).toBe(403);
+  expect(await statusOf(recordsRoute, '/api/recoveries?likeJobs=below', technician)).toBe(403);
+  expect(await statusOf(recordsRoute, '/api/recoveries?flagged=yes', auditor)).toBe(403);
+  expect(await statusOf(recordsRoute, '/api/recoveries?flagged=yes', technician)).toBe(200);
   expect(await statusOf(recordsRoute, '/api/recoveries?exclusion=none', auditor)).toBe(200);
   expect(await statusOf(recordsRoute, '/api/recoveries?exclusion=other', auditor)).toBe(400);
 });

@@ -9,12 +9,11 @@ import { GET as getOne } from '@/app/api/flags/[id]/route';
 import { GET as getPeople } from '@/app/api/flags/people/route';
 import { GET as getList } from '@/app/api/flags/route';
 import { withCompany } from '@/db/client';
-import { flagBaselines } from '@/db/schema/flag-renewal';
-import { flagDecisions, flags } from '@/db/schema/flags';
+import { flagDecisions } from '@/db/schema/flags';
 import { flaggedRecoveries, recoveryExcuses } from '@/db/views/flagged-recoveries';
 import type { FlagRule } from '@/lib/vocabulary';
 import { apiRequest, newCompany } from '../support/company';
-import { flagsOf } from '../support/flags';
+import { flagsOf, putFlags } from '../support/flags';
 import { at } from '../support/imports';
 import { type TestRecord, writeRecords } from '../support/records';
 import { newPerson } from '../support/session';
@@ -35,27 +34,20 @@ const company = await newCompany();
 let trainer = '';
 let ids = new Map<string, string>();
 
-const putFlags = (rows: readonly [ref: string, rule: FlagRule, certainty: number][]) =>
-  withCompany(company.scope, async (tx) => {
-    const { companyId } = company;
-    const [baseline] = await tx.insert(flagBaselines).values({ companyId, judging: 'test', content: {} }).returning();
-    await tx.insert(flags).values(
-      rows.map(([ref, rule, certainty]) => ({
-        ...{ companyId, rule, certainty, evidence: {}, baselineId: baseline?.id ?? '' },
-        recoveryId: ids.get(ref) ?? '',
-      })),
-    );
-  });
-
 beforeAll(async () => {
   trainer = await company.token('trainer');
   ids = await writeRecords(company.scope, [...usual, ...doubtful]);
-  await putFlags([
-    ['low', 'stopped_early', 0.8],
-    ['low', 'hold_missing', 0.6],
-    ['short', 'short_on_arrival', 0.7],
-    ['slip', 'over_full_charge', 0.95],
-    ['slip', 'unit_slip', 0.3],
+  const flag = (ref: string, rule: FlagRule, certainty: number) => ({
+    recoveryId: ids.get(ref) ?? '',
+    rule,
+    certainty,
+  });
+  await putFlags(company.companyId, [
+    flag('low', 'stopped_early', 0.8),
+    flag('low', 'hold_missing', 0.6),
+    flag('short', 'short_on_arrival', 0.7),
+    flag('slip', 'over_full_charge', 0.95),
+    flag('slip', 'unit_slip', 0.3),
   ]);
 });
 

@@ -7,8 +7,9 @@ import { GET } from '@/app/api/start/route';
 import { readCompany, withCompany } from '@/db/client';
 import { importRows, imports } from '@/db/schema/imports';
 import { notes } from '@/db/schema/notes';
-import { ROLES, type Role } from '@/lib/vocabulary';
+import { type FlagRule, ROLES, type Role } from '@/lib/vocabulary';
 import { apiRequest, newCompany } from '../support/company';
+import { putFlags } from '../support/flags';
 import { type TestRecord, writeRecords } from '../support/records';
 
 const ours = await newCompany();
@@ -45,13 +46,20 @@ const writeImport = async (status: 'done' | 'failed', dryRun: boolean, refusedRe
   });
 
 beforeAll(async () => {
-  await writeRecords(ours.scope, [
+  const ids = await writeRecords(ours.scope, [
     ...alike,
     { on: '2026-10-01', kg: '8', chargeKg: '10', jobType: 'disposal' },
     { on: '2026-11-20', kg: '1', chargeKg: '10', ref: 'low' },
     { on: '2026-11-21', kg: '9', chargeKg: '10', vacuumKpaAbs: '50', jobType: 'disposal', ref: 'mended' },
     { on: '2026-11-22', kg: '0', chargeKg: '10', excluded: true, jobType: 'disposal' },
-    { on: '2026-12-01', kg: '5', chargeKg: '10' },
+    { on: '2026-12-01', kg: '5', chargeKg: '10', ref: 'half' },
+  ]);
+  const flag = (ref: string, rule: FlagRule) => ({ recoveryId: ids.get(ref) ?? '', rule, certainty: 0.9 });
+  await putFlags(ours.companyId, [
+    flag('low', 'stopped_early'),
+    flag('half', 'hold_missing'),
+    // No fault: it does not wait.
+    flag('mended', 'short_on_arrival'),
   ]);
   await writeRecords(theirs.scope, [{ on: '2026-11-30', kg: '700', chargeKg: '900', jobType: 'disposal' }]);
   await withCompany(ours.scope, (tx) =>
@@ -86,10 +94,10 @@ test('the shortfall is what the low ones miss to the median of like jobs', async
 });
 
 test('what waits is told to those whose business it is', async () => {
-  // 2026-11-20 is low of the last thirty days, and so is 2026-12-01 (0.5); one disposal of October states no vacuum.
+  // Of the last thirty days 2026-11-20 and 2026-12-01 are flagged; one disposal of October states no vacuum.
   // From December 2025 to September 2026 are ten months without a record.
   const [low, disposals, gaps] = [
-    ['low-recoveries', 2],
+    ['open-flags', 2],
     ['disposals-without-vacuum', 1],
     ['empty-months', 10],
   ];
@@ -97,7 +105,8 @@ test('what waits is told to those whose business it is', async () => {
   expect(await kinds('trainer')).toEqual([low, disposals, gaps]);
   expect(await kinds('office')).toEqual([disposals, gaps]);
   expect(await kinds('auditor')).toEqual([disposals, gaps]);
-  expect(await kinds('technician')).toEqual([disposals]);
+  // The company's door is opened here without his narrower scope: what he sees of the flags, the policies decide.
+  expect(await kinds('technician')).toEqual([low, disposals]);
 });
 
 test('refused rows wait until their ticket is among the records; failed and unfinished files wait too', async () => {

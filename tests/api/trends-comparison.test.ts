@@ -3,7 +3,9 @@ import { trendsComparison } from '@/analytics/trends-comparison/contract';
 import { getTrendsComparison } from '@/analytics/trends-comparison/query';
 import { GET } from '@/app/api/trends/comparison/route';
 import { readCompany } from '@/db/client';
+import type { FlagRule } from '@/lib/vocabulary';
 import { apiRequest, newCompany } from '../support/company';
+import { putFlags } from '../support/flags';
 import { writeRecords } from '../support/records';
 
 const ours = await newCompany();
@@ -123,20 +125,28 @@ test('a side without recoveries is nothing, not an error', async () => {
   expect({ ratio, clear }).toEqual({ ratio: null, clear: false });
 });
 
-test('low recoveries are counted on both sides', async () => {
+test('flagged records are counted on both sides', async () => {
   const company = await newCompany();
-  // 24 like jobs at a yield of 0.8 and 3 far below: the fence stands at 0.8.
-  const usual = (month: string) => Array.from({ length: 12 }, () => ({ on: `${month}-15`, kg: '8' }));
-  await writeRecords(company.scope, [
-    ...usual('2025-06'),
-    ...usual('2026-06'),
-    { on: '2025-06-15', kg: '1' },
-    { on: '2026-06-15', kg: '1' },
-    { on: '2026-06-15', kg: '2' },
+  const month = (on: string) => Array.from({ length: 4 }, (_, n) => ({ on, kg: '8', ref: `${on} ${n}` }));
+  const ids = await writeRecords(company.scope, [...month('2025-06-15'), ...month('2026-06-15')]);
+  const flag = (ref: string, rule: FlagRule, certainty: number) => ({
+    recoveryId: ids.get(ref) ?? '',
+    rule,
+    certainty,
+  });
+  await putFlags(company.companyId, [
+    flag('2025-06-15 0', 'unit_slip', 0.9),
+    flag('2026-06-15 0', 'stopped_early', 0.5),
+    // Two reasons are one record.
+    flag('2026-06-15 1', 'stopped_early', 0.7),
+    flag('2026-06-15 1', 'hold_missing', 0.8),
+    // Too unsure, and no fault.
+    flag('2026-06-15 2', 'unit_slip', 0.49),
+    flag('2026-06-15 3', 'short_on_arrival', 0.99),
   ]);
   const { comparison } = await compare({ from: '2026-06', to: '2026-06' }, company);
-  expect(comparison?.now).toMatchObject({ flagged: 2, flaggedShare: 2 / 14 });
-  expect(comparison?.before).toMatchObject({ flagged: 1, flaggedShare: 1 / 13 });
+  expect(comparison?.now).toMatchObject({ flagged: 2, flaggedShare: 0.5 });
+  expect(comparison?.before).toMatchObject({ flagged: 1, flaggedShare: 0.25 });
 });
 
 describe('over HTTP', () => {

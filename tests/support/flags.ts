@@ -1,9 +1,10 @@
 import { eq, sql } from 'drizzle-orm';
 import { renewFlags } from '@/analytics/flag-renewal/renew';
 import { withCompany } from '@/db/client';
-import { flagsDue } from '@/db/schema/flag-renewal';
+import { flagBaselines, flagsDue } from '@/db/schema/flag-renewal';
 import { flags } from '@/db/schema/flags';
 import { recoveries } from '@/db/schema/recoveries';
+import type { FlagRule } from '@/lib/vocabulary';
 
 const EVERYTHING = '00000000-0000-0000-0000-000000000000';
 
@@ -43,3 +44,14 @@ export const renewEverything = async (companyId: string): Promise<void> => {
   );
   await renewFlags({ companyId });
 };
+
+/** An open flag as a test wants it: on which record, by which rule, how sure. */
+export type TestFlag = { recoveryId: string; rule: FlagRule; certainty: number };
+
+/** Puts flags on records, as judging would. */
+export const putFlags = (companyId: string, rows: readonly TestFlag[]): Promise<void> =>
+  withCompany({ companyId, actor: 'test' }, async (tx) => {
+    const [baseline] = await tx.insert(flagBaselines).values({ companyId, judging: 'test', content: {} }).returning();
+    if (!baseline) throw new Error('A baseline that was written has no id');
+    await tx.insert(flags).values(rows.map((row) => ({ companyId, ...row, evidence: {}, baselineId: baseline.id })));
+  });

@@ -54,6 +54,7 @@ const takenRecord = ({ label }: FilledCompany) =>
 const recoveryId = ({ ids }: FilledCompany) => ids.recoveryId;
 const otherRecoveryId = ({ ids }: FilledCompany) => ids.otherRecoveryId;
 const flagId = ({ ids }: FilledCompany) => ids.flagId;
+const othersFlagId = ({ ids }: FilledCompany) => ids.othersFlagId;
 const decidedFlagId = ({ ids }: FilledCompany) => ids.decidedFlagId;
 const noteId = ({ ids }: FilledCompany) => ids.noteId;
 const coachingId = ({ ids }: FilledCompany) => ids.coachingId;
@@ -151,7 +152,7 @@ export const ROUTES: Record<string, RouteRule> = {
     records: (answer: { value: number }) => answer.value,
   },
   'GET /api/flags': { action: 'flags:read', status: 200 },
-  'GET /api/flags/[id]': { action: 'flags:read', id: flagId, status: 200 },
+  'GET /api/flags/[id]': { action: 'flags:read', id: flagId, colleagues: othersFlagId, status: 200 },
   'GET /api/flags/people': { action: 'flags:decide', status: 200 },
   // Decided already: the flag stays as it is for whoever asks next.
   'POST /api/flags/[id]/decision': {
@@ -176,11 +177,6 @@ export const ROUTES: Record<string, RouteRule> = {
   'POST /api/imports/[id]/apply': { action: 'imports:manage', id: importId, send: () => asJson({}), status: 409 },
   'POST /api/imports/[id]/undo': { action: 'imports:manage', id: importId, status: 409 },
   'GET /api/imports/[id]/rejected.csv': { action: 'imports:manage', id: importId, status: 200 },
-  'GET /api/low-recoveries': {
-    action: 'flags:read',
-    status: 200,
-    records: (answer: { judged: { records: number } }) => answer.judged.records,
-  },
   'GET /api/notes': { action: 'notes:read', status: 200 },
   'POST /api/notes': {
     action: 'notes:write',

@@ -6,7 +6,7 @@ import { emptyMonths } from './empty-months';
 import { failedImports } from './failed-imports';
 import { importsAtWork } from './imports-at-work';
 import type { WaitingFor, WaitingKind } from './kind';
-import { lowRecoveries } from './low-recoveries';
+import { openFlags } from './open-flags';
 import { openPreviews } from './open-previews';
 import { refusedRows } from './refused-rows';
 
@@ -15,7 +15,7 @@ const KINDS: readonly WaitingKind[] = [
   failedImports,
   refusedRows,
   openPreviews,
-  lowRecoveries,
+  openFlags,
   disposalsWithoutVacuum,
   emptyMonths,
   importsAtWork,

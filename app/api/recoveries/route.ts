@@ -17,7 +17,8 @@ import { idempotencyKeyOf } from './idempotency-key';
 export const GET = withViewer(recordListContract.action, async (request, viewer) => {
   const query = recordListContract.query.safeParse(searchInput(request.url));
   if (!query.success) return throwBadInput(query.error);
-  if (query.data.likeJobs && !may(viewer.role, 'flags:read')) throw forbidden();
+  if (query.data.flagged && !may(viewer.role, 'flags:read')) throw forbidden();
+  if (query.data.likeJobs && !may(viewer.role, 'flags:decide')) throw forbidden();
   if (query.data.format === 'csv') {
     if (!may(viewer.role, 'records:export')) throw forbidden();
     return csvResponse(viewer, query.data);

@@ -1,5 +1,4 @@
 import { scaleLinear } from '@visx/scale';
-import type { LowRecovery } from '@/analytics/low-recoveries/contract';
 import { formatPercent } from '@/lib/format';
 
 const WIDTH = 220;
@@ -7,7 +6,14 @@ const HEIGHT = 30;
 const MIDDLE = 15;
 const SIDE = 6;
 
-type YieldStripProps = Pick<LowRecovery, 'yield' | 'lowerQuartile' | 'medianYield' | 'upperQuartile' | 'lowerFence'>;
+/** Shares of full charge. */
+type YieldStripProps = {
+  yield: number;
+  lowerQuartile: number;
+  medianYield: number;
+  upperQuartile: number;
+  lowerFence: number;
+};
 
 /**
  * Where a pull lies among like jobs, on a scale from nothing to the full charge: the box holds the middle half, its line
