@@ -5,6 +5,10 @@ export type Screen = {
   path: string;
   name: string;
   action: Action;
+  /** Not offered to who may do this: he has the wider screen. */
+  unless?: Action;
+  /** Where the screen leads, when that is elsewhere: it is the open one there too. */
+  within?: string;
   /** The scope in the address means something here, so links carry it along. */
   scoped: boolean;
   /** The key that leads here after `g`. */
@@ -17,6 +21,15 @@ export const SCREENS: readonly Screen[] = [
   { path: '/trends', name: 'Trends', action: 'trends:read', scoped: true, goKey: 't' },
   { path: '/flags', name: 'Flags', action: 'flags:read', scoped: true, goKey: 'f' },
   { path: '/technicians', name: 'Technicians', action: 'technicians:read', scoped: true, goKey: 'c' },
+  {
+    path: '/technicians/me',
+    name: 'My work',
+    action: 'technician:read',
+    unless: 'technicians:read',
+    within: '/technicians',
+    scoped: true,
+    goKey: 'w',
+  },
   { path: '/sites', name: 'Sites', action: 'sites:read', scoped: true, goKey: 's' },
   { path: '/appliances', name: 'Appliances', action: 'appliances:read', scoped: true, goKey: 'a' },
   { path: '/records', name: 'Records', action: 'records:read', scoped: true, goKey: 'r' },
@@ -26,4 +39,4 @@ export const SCREENS: readonly Screen[] = [
 
 /** The screens that somebody with these actions may open. */
 export const screensFor = (allowed: readonly Action[]): Screen[] =>
-  SCREENS.filter((screen) => allowed.includes(screen.action));
+  SCREENS.filter(({ action, unless }) => allowed.includes(action) && !(unless && allowed.includes(unless)));

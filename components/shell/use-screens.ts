@@ -13,6 +13,7 @@ export const useScreens = (): (Screen & { href: string; current: boolean })[] =>
   return screensFor(allowed).map((screen) => ({
     ...screen,
     href: screen.scoped ? `${screen.path}${kept}` : screen.path,
-    current: pathname === screen.path || (screen.path !== '/' && pathname.startsWith(`${screen.path}/`)),
+    current:
+      pathname === screen.path || (screen.path !== '/' && pathname.startsWith(`${screen.within ?? screen.path}/`)),
   }));
 };

@@ -18,6 +18,7 @@ const LISTS: Record<string, { list: string; idOf: string }> = {
   '/records': { list: '/api/recoveries?limit=1', idOf: 'id' },
   '/imports': { list: '/api/imports?limit=1', idOf: 'id' },
   '/sites': { list: '/api/sites', idOf: 'siteId' },
+  '/technicians': { list: '/api/technicians', idOf: 'technicianId' },
   '/appliances': { list: '/api/appliances', idOf: 'applianceId' },
 };
 
