@@ -115,11 +115,14 @@ export const forecastMass = (
   const expected = running ? completeRunningMonth(free, running, routineNoise(history, free)) : free;
   const means = meansOf(expected);
   const paths = drawPaths(history, expected, count, seed);
+  // Once for all: each sorts thousands of past forecasts.
+  const partMass = new Map(RANGE_LEVELS.map((level) => [level, refrigerantMassOf(record, level)]));
+  const partMassOf = (level: RangeLevel) => partMass.get(level) ?? null;
   const months = Array.from({ length: horizon }, (_, step): MonthForecast => {
     const byRefrigerant = new Map(
       paths.refrigerants.map((refrigerant, row) => {
         const grams = toGrams(means[row]?.[step] ?? 0);
-        return [refrigerant, seriesOf(grams, drawnFor(paths, row, step), (level) => refrigerantMassOf(record, level))];
+        return [refrigerant, seriesOf(grams, drawnFor(paths, row, step), partMassOf)];
       }),
     );
     const grams = [...byRefrigerant.values()].reduce((sum, { meanGrams }) => sum + meanGrams, 0);

@@ -8,8 +8,12 @@ const USUAL_GROWTH = 0.03;
 /** What is left of a share's growth a month later. */
 const GROWTH_KEPT = 0.96;
 const STEPS = 12;
-/** A refrigerant that was not seen lately may come again: this part of a month a year. */
+/** A refrigerant that was not seen lately may come again. */
 const LEAST_SHARE = 1e-5;
+const MOST_SHARE = 0.95;
+const LEAST_PORTION_KG = 1e-3;
+/** Information that holds a level where it was: a refrigerant of one or two jobs must not run away. */
+const LEVEL_HOLD = 0.05;
 
 export type ShareTrend = {
   refrigerant: string;
@@ -35,65 +39,80 @@ const monthsOf = (masses: readonly number[], totals: readonly (number | null)[])
     return [{ age, weight: 0.5 ** (age / HALF_LIFE), mass, total }];
   });
 
+type Line = { logShare: number; growth: number };
+
+const expectedKg = ({ total, age }: Month, { logShare, growth }: Line): number =>
+  total * Math.exp(logShare - growth * age);
+
+/** Variance of a month's mass over its mean about a line: Pearson's dispersion, for a part of a whole. */
+const portionAbout = (months: readonly Month[], line: Line, fallback: number): number => {
+  let [squares, means] = [0, 0];
+  for (const month of months) {
+    const expected = expectedKg(month, line);
+    const share = Math.min(MOST_SHARE, expected / month.total);
+    squares += month.weight * (month.mass - expected) ** 2;
+    means += month.weight * expected * (1 - share);
+  }
+  return means > 0 ? Math.max(squares / means, LEAST_PORTION_KG) : fallback;
+};
+
+/** Gradient and information of level and growth; both are held near what they were before, more or less firmly. */
+const slopesAt = (months: readonly Month[], line: Line, usual: Line, portionKg: number) => {
+  let [level, growth] = [
+    LEVEL_HOLD * (usual.logShare - line.logShare),
+    (usual.growth - line.growth) / USUAL_GROWTH ** 2,
+  ];
+  let [levelInformation, shared, growthInformation] = [LEVEL_HOLD, 0, 1 / USUAL_GROWTH ** 2];
+  for (const month of months) {
+    const { age, weight, mass } = month;
+    const expected = expectedKg(month, line);
+    const pull = (weight * (mass - expected)) / portionKg;
+    const information = (weight * expected) / portionKg;
+    level += pull;
+    growth -= age * pull;
+    levelInformation += information;
+    shared -= age * information;
+    growthInformation += age * age * information;
+  }
+  const determinant = levelInformation * growthInformation - shared * shared;
+  return {
+    levelStep: (growthInformation * level - shared * growth) / determinant,
+    growthStep: (levelInformation * growth - shared * level) / determinant,
+    levelError: Math.sqrt(growthInformation / determinant),
+    growthError: Math.sqrt(levelInformation / determinant),
+  };
+};
+
+const weightedSum = (months: readonly Month[], of: (month: Month) => number): number =>
+  months.reduce((sum, month) => sum + month.weight * of(month), 0);
+
 /**
  * Share and growth by a quasi-Poisson regression of the masses on time with a log link, each month by its weight and its
- * total, the growth held near 0 as far as the months do not speak. Newton's steps. McCullagh & Nelder (1989), Generalized
- * Linear Models, chapter 9.
+ * total, the growth held near 0 as far as the months do not speak. Newton's steps, none larger than a change of the share
+ * by a factor of e. McCullagh & Nelder (1989), Generalized Linear Models, chapter 9.
  */
 const fitShare = (refrigerant: string, months: readonly Month[]): ShareTrend => {
-  const totalMass = months.reduce((sum, { weight, mass }) => sum + weight * mass, 0);
-  const totalAll = months.reduce((sum, { weight, total }) => sum + weight * total, 0);
-  const empty = months.filter(({ mass }) => mass === 0).length / Math.max(1, months.length);
-  const plain = Math.max(LEAST_SHARE, totalAll > 0 ? totalMass / totalAll : 0);
-  let [logShare, growth] = [Math.log(plain), 0];
-  const meanTotal =
-    totalAll /
-    Math.max(
-      1e-9,
-      months.reduce((sum, { weight }) => sum + weight, 0),
-    );
-  let portionKg = meanTotal;
+  const all = weightedSum(months, ({ total }) => total);
+  const share = all > 0 ? weightedSum(months, ({ mass }) => mass) / all : 0;
+  const usual: Line = { logShare: Math.log(Math.max(LEAST_SHARE, share)), growth: 0 };
+  const usualKg = months.length > 0 ? all / weightedSum(months, () => 1) : 1;
+  let line = usual;
+  let portionKg = usualKg;
   let [levelError, growthError] = [1, USUAL_GROWTH];
   for (let step = 0; step < STEPS; step++) {
-    let [squares, means] = [0, 0];
-    for (const { age, weight, mass, total } of months) {
-      const expected = total * Math.exp(logShare - growth * age);
-      const share = Math.min(0.95, expected / total);
-      squares += weight * (mass - expected) ** 2;
-      means += weight * expected * (1 - share);
-    }
-    portionKg = means > 0 ? Math.max(squares / means, 1e-3) : meanTotal;
-    // Score and information of (logShare, growth), in units of the portions.
-    let [s0, s1, i00, i01, i11] = [0, -growth / USUAL_GROWTH ** 2, 0, 0, 1 / USUAL_GROWTH ** 2];
-    for (const { age, weight, mass, total } of months) {
-      const expected = total * Math.exp(logShare - growth * age);
-      const pull = (weight * (mass - expected)) / portionKg;
-      const information = (weight * expected) / portionKg;
-      s0 += pull;
-      s1 += -age * pull;
-      i00 += information;
-      i01 += -age * information;
-      i11 += age * age * information;
-    }
-    // A bound on the level keeps a refrigerant of one or two jobs from running away.
-    i00 += 0.05;
-    s0 += -0.05 * (logShare - Math.log(plain));
-    const determinant = i00 * i11 - i01 * i01;
-    const [moveLevel, moveGrowth] = [(i11 * s0 - i01 * s1) / determinant, (i00 * s1 - i01 * s0) / determinant];
-    const brake = Math.min(1, 1 / Math.max(Math.abs(moveLevel), 20 * Math.abs(moveGrowth)));
-    logShare += brake * moveLevel;
-    growth += brake * moveGrowth;
-    levelError = Math.sqrt(i11 / determinant);
-    growthError = Math.sqrt(i00 / determinant);
+    portionKg = portionAbout(months, line, usualKg);
+    const slopes = slopesAt(months, line, usual, portionKg);
+    const brake = Math.min(1, 1 / Math.max(Math.abs(slopes.levelStep), 20 * Math.abs(slopes.growthStep)));
+    line = { logShare: line.logShare + brake * slopes.levelStep, growth: line.growth + brake * slopes.growthStep };
+    [levelError, growthError] = [slopes.levelError, slopes.growthError];
   }
   return {
     refrigerant,
-    logShare,
-    growth,
+    ...line,
     logShareError: Math.min(1, levelError),
     growthError: Math.min(USUAL_GROWTH, growthError),
     portionKg,
-    emptyShare: empty,
+    emptyShare: months.filter(({ mass }) => mass === 0).length / Math.max(1, months.length),
   };
 };
 

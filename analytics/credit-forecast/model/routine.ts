@@ -1,6 +1,6 @@
 import type { GappySeries } from '@/analytics/statistics/trend/kendall-score';
 import { type MassHistory, monthOfYear, routineTotals } from './history';
-import { type ChosenMethod, combined, type LevelMethodName, levelForecasts } from './level-methods';
+import { type ChosenMethod, combined, levelForecasts } from './level-methods';
 import { seasonFactors } from './season';
 
 /** Routine masses without season, gaps bridged for the fit only. */
@@ -38,5 +38,3 @@ export const routineForecasts = (
   all.set('combination', withSeason(combined(levels, horizon)));
   return all;
 };
-
-export type { LevelMethodName };
