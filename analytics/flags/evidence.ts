@@ -1,4 +1,6 @@
 import { z } from 'zod';
+import { explain } from '@/analytics/judging/explain/explain';
+import type { Told } from '@/analytics/judging/judgement';
 import type { DisplayUnit, FlagRule } from '@/lib/vocabulary';
 import type { Flag } from './contract';
 
@@ -26,11 +28,15 @@ export const likeJobsOf = (evidence: unknown): Flag['likeJobs'] => {
 /** Where the final vacuum lies among like jobs; null where the rule does not look at it. */
 export const vacuumOf = (evidence: unknown): Flag['vacuum'] => low.safeParse(evidence).data?.vacuum ?? null;
 
-/** A flag's evidence in words. */
-export const explainReason = (
-  { evidence }: { rule: FlagRule; evidence: unknown; expectedMassKg: number | null },
-  _unit: DisplayUnit,
-): string => {
-  const like = likeJobsOf(evidence);
-  return like ? `Unusually low for this kind of job: compared with ${like.jobs} like jobs.` : 'Worth a look.';
+/**
+ * A flag's evidence in words, masses in the given unit. Evidence that was decided on long ago may have been written by
+ * rules that are others now; it is not guessed at.
+ */
+export const explainReason = ({ rule, evidence }: { rule: FlagRule; evidence: unknown }, unit: DisplayUnit): string => {
+  try {
+    // The judging wrote the evidence of a rule as its type says; only the database forgets which type that was.
+    return explain({ rule, evidence } as Told, unit);
+  } catch {
+    return 'Judged by rules that have changed since; the record itself says more.';
+  }
 };

@@ -31,9 +31,9 @@ export const toFlags = async (tx: Tx, rows: readonly FlagRow[], unit: DisplayUni
   const nameOf = await whoTheyAre(tx, [
     ...new Set([...log.map(({ by }) => by), ...rows.flatMap(({ assignedTo }) => assignedTo ?? [])]),
   ]);
-  return rows.map(({ evidence, expectedMassKg, assignedTo, place: _place, ...row }) => ({
+  return rows.map(({ evidence, assignedTo, place: _place, ...row }) => ({
     ...row,
-    explanation: explainReason({ ...row, evidence, expectedMassKg }, unit),
+    explanation: explainReason({ rule: row.rule, evidence }, unit),
     likeJobs: likeJobsOf(evidence),
     vacuum: vacuumOf(evidence),
     assignedTo: assignedTo ? { id: assignedTo, name: nameOf(assignedTo) } : null,

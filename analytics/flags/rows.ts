@@ -14,7 +14,6 @@ const reasonColumns = {
   rule: flags.rule,
   certainty: flags.certainty,
   evidence: flags.evidence,
-  expectedMassKg: sql<number | null>`${flags.expectedMassKg}::float8`,
   state: flags.state,
   decision: flags.decision,
 };

@@ -10,7 +10,6 @@ export const FlagReasons = ({ reasons }: { reasons: readonly FlagReason[] }) => 
         <p className="flex flex-wrap items-baseline gap-x-2.5">
           <span className="font-semibold">{RULE_QUESTIONS[reason.rule]}</span>
           <span className="font-mono text-sm text-ink-2">{formatCertainty(reason.certainty)}</span>
-          {reason.state === 'decided' ? <span className="text-sm text-ink-3">decided</span> : null}
         </p>
         <p className="max-w-prose text-sm text-ink-2">{reason.explanation}</p>
       </li>

@@ -31,14 +31,14 @@ export const FlagsList = ({ records, unit, onDecided }: FlagsListProps) => {
     setTask(null);
     want(id);
   }, []);
-  const at = records.findIndex(({ lead }) => lead.recoveryId === current);
-  const idAt = (place: number) => records[place]?.lead.recoveryId;
-  const next = useCallback(() => goTo(records[at + 1]?.lead.recoveryId), [goTo, records, at]);
-  const previous = useCallback(() => goTo(records[Math.max(0, at - 1)]?.lead.recoveryId), [goTo, records, at]);
+  const at = records.findIndex(({ lead }) => lead.id === current);
+  const idAt = (place: number) => records[place]?.lead.id;
+  const next = useCallback(() => goTo(records[at + 1]?.lead.id), [goTo, records, at]);
+  const previous = useCallback(() => goTo(records[Math.max(0, at - 1)]?.lead.id), [goTo, records, at]);
   const decide = useCallback(() => {
     const record = records[Math.max(0, at)];
     if (record?.lead.state !== 'open') return;
-    setCurrent(record.lead.recoveryId);
+    setCurrent(record.lead.id);
     setTask('decide');
   }, [records, at]);
   useFlagKeys({ next, previous, decide });
@@ -52,21 +52,21 @@ export const FlagsList = ({ records, unit, onDecided }: FlagsListProps) => {
   return (
     <ol>
       {records.map((record) => {
-        const { recoveryId } = record.lead;
+        const { id } = record.lead;
         return (
           <FlagItem
-            key={recoveryId}
+            key={id}
             record={record}
             unit={unit}
-            task={recoveryId === current ? task : null}
+            task={id === current ? task : null}
             itemRef={(item) => {
-              if (item) items.current.set(recoveryId, item);
-              else items.current.delete(recoveryId);
+              if (item) items.current.set(id, item);
+              else items.current.delete(id);
             }}
             onTask={(wantedTask) => {
-              setCurrent(recoveryId);
+              setCurrent(id);
               setTask(wantedTask);
-              if (wantedTask === null) want(recoveryId);
+              if (wantedTask === null) want(id);
             }}
             onDecided={decided}
           />

@@ -4,6 +4,7 @@ import { useQueryClient } from '@tanstack/react-query';
 import { useRouter } from 'next/navigation';
 import { useState } from 'react';
 import type { HistoryEntry, RecordDetail } from '@/analytics/records/contract';
+import { RecordFlags } from '@/components/flags/record-flags';
 import { Button } from '@/components/ui/button';
 import { Notice } from '@/components/ui/notice';
 import { PageHead } from '@/components/ui/page-head';
@@ -25,6 +26,7 @@ type RecordScreenProps = { record: RecordDetail; history: readonly HistoryEntry[
 export const RecordScreen = ({ record, history }: RecordScreenProps) => {
   const { massUnit } = useViewer();
   const mayWrite = useMay('records:write');
+  const mayLook = useMay('flags:read');
   const router = useRouter();
   const queries = useQueryClient();
   const [correcting, setCorrecting] = useState(false);
@@ -62,6 +64,7 @@ export const RecordScreen = ({ record, history }: RecordScreenProps) => {
             </Sheet>
           ) : (
             <>
+              {mayLook ? <RecordFlags recoveryId={record.id} /> : null}
               {record.likeJobs ? (
                 <Sheet title="Among like jobs" aside="Same refrigerant and category">
                   <LikeJobs recoveryYield={record.yield} likeJobs={record.likeJobs} />

@@ -1,0 +1,34 @@
+'use client';
+
+import { useState } from 'react';
+import { byRecord } from '@/analytics/flags/by-record';
+import { useRecordFlags } from '@/analytics/flags/hook';
+import { Sheet } from '@/components/ui/sheet';
+import { useViewer } from '@/components/viewer-context';
+import { FlagItem, type FlagTask } from './flag-item';
+
+/** The flags of one record, to be decided where the record is read; nothing while it has none. */
+export const RecordFlags = ({ recoveryId }: { recoveryId: string }) => {
+  const { massUnit } = useViewer();
+  const { data } = useRecordFlags(recoveryId, massUnit);
+  const [task, setTask] = useState<FlagTask>(null);
+  const records = byRecord(data?.items ?? []);
+  if (records.length === 0) return null;
+  return (
+    <Sheet title="Flags" aside="A reason to look, not a finding">
+      <ol>
+        {records.map((record) => (
+          <FlagItem
+            key={record.lead.id}
+            record={record}
+            unit={massUnit}
+            task={record.lead.state === 'open' ? task : null}
+            facts={false}
+            onTask={setTask}
+            onDecided={() => setTask(null)}
+          />
+        ))}
+      </ol>
+    </Sheet>
+  );
+};

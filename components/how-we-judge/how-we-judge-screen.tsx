@@ -1,0 +1,22 @@
+import { PageHead } from '@/components/ui/page-head';
+import { CertaintySection } from './certainty-section';
+import { DecisionsSection } from './decisions-section';
+import { LowSection } from './low-section';
+import { PRACTICE_RULES } from './practice-rules';
+import { RulesSection } from './rules-section';
+import { SLIP_RULES } from './slip-rules';
+
+/** How records are judged, in plain words: each rule, what it looks at, what it does not mean, and its source. */
+export const HowWeJudgeScreen = () => (
+  <div className="flex flex-col gap-6">
+    <PageHead
+      title="Records are judged by what like jobs gave, and by what scales and gauges can tell."
+      sub="A flag is a reason to look, not a finding. It never says that somebody did something wrong, and never that a step was safe: local codes and licensed practice decide."
+    />
+    <CertaintySection />
+    <LowSection />
+    <RulesSection id="slips" title="Slips of the pen and of the scale" rules={SLIP_RULES} />
+    <RulesSection id="practice" title="How the pull was done" rules={PRACTICE_RULES} />
+    <DecisionsSection />
+  </div>
+);
