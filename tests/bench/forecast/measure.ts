@@ -10,7 +10,7 @@ import { theta } from '@/analytics/statistics/forecast/theta';
 
 export const HELD_BACK = 12;
 const NEAR = 6;
-const PATHS = 5000;
+export const PATHS = 5000;
 const YEAR = 12;
 const LEVELS = [0.8, 0.95] as const;
 
@@ -34,7 +34,7 @@ const kgOf = (history: MassHistory, refrigerant: string): number[] =>
 
 const sum = (values: readonly number[]): number => values.reduce((all, value) => all + value, 0);
 
-const timed = <Value>(make: () => Value): { value: Value; cpuMs: number } => {
+export const timed = <Value>(make: () => Value): { value: Value; cpuMs: number } => {
   const before = process.cpuUsage();
   const value = make();
   const { user, system } = process.cpuUsage(before);
