@@ -1,9 +1,10 @@
 import { groupBy } from '../../statistics/group-by';
 import { leaves, meetsShort, stopsEarly } from './crew';
 import { type Stories, storiesOf, totalOf } from './likelihood';
-import { type ArrivalMixture, type ArrivalShares, personOf, stopsEarlyOf } from './mixture';
+import { type ArrivalMixture, type ArrivalShares, personOf } from './mixture';
 import { PRIOR, type SeenPull } from './prior';
 import { partShape, soundShape, TOP_YIELD } from './shapes';
+import { stopsEarlyOf } from './stops-early';
 import { vacuumOfStops } from './vacuum-of-stops';
 
 const ROUNDS = 16;
@@ -45,14 +46,18 @@ const start = (): ArrivalMixture => {
   };
 };
 
+const NOBODY = { stopsEarly: PRIOR.stopsEarly.share, leaves: 1, meetsShort: 1 };
+
 /** Probabilities of the stories of every pull, by the mixture as it stands. */
-const weigh = (mixture: ArrivalMixture, pulls: readonly SeenPull[]): Stories[] =>
-  pulls.map((pull) => {
-    const stories = storiesOf(mixture, {
-      ...pull,
-      stopsEarly: stopsEarlyOf(mixture, pull.technicianId),
-      ...personOf(mixture, pull.technicianId),
-    });
+const weigh = (mixture: ArrivalMixture, pulls: readonly SeenPull[]): Stories[] => {
+  const people = new Map(
+    [...new Set(pulls.map(({ technicianId }) => technicianId))].map((id) => [
+      id,
+      { ...personOf(mixture, id), stopsEarly: stopsEarlyOf(mixture, id) },
+    ]),
+  );
+  return pulls.map((pull) => {
+    const stories = storiesOf(mixture, { ...pull, ...(people.get(pull.technicianId) ?? NOBODY) });
     const total = totalOf(stories) || 1;
     return {
       sound: stories.sound / total,
@@ -62,6 +67,7 @@ const weigh = (mixture: ArrivalMixture, pulls: readonly SeenPull[]): Stories[] =
       stoppedAt: stories.stopped > 0 ? stories.stoppedAt.map((part) => part / total) : stories.stoppedAt,
     };
   });
+};
 
 const sharesOf = (stories: readonly Stories[], prior: ArrivalShares): ArrivalShares => {
   const pulls = PRIOR.shares.pulls;

@@ -43,14 +43,3 @@ export const personOf = (mixture: ArrivalMixture, technicianId: string): Pick<Pu
   leaves: mixture.leavesOf[technicianId] ?? 1,
   meetsShort: mixture.meetsShortOf[technicianId] ?? 1,
 });
-
-/** Technicians are drawn towards the company as if this many pulls of it were theirs. */
-const DRAWN_BY = 60;
-
-/** Share of a technician's pulls that are stopped early; `own` is what this record itself contributed. */
-export const stopsEarlyOf = (mixture: ArrivalMixture, technicianId: string, own = { pulls: 0, stopped: 0 }): number => {
-  const known = mixture.stopsEarlyOf[technicianId] ?? { pulls: 0, stopped: 0 };
-  const pulls = Math.max(0, known.pulls - own.pulls);
-  const stopped = Math.max(0, known.stopped - own.stopped);
-  return (stopped + DRAWN_BY * mixture.stopsEarly) / (pulls + DRAWN_BY);
-};

@@ -1,5 +1,5 @@
-import { type Stories, totalOf } from '../arrivals/likelihood';
-import { stopsEarlyOf } from '../arrivals/mixture';
+import { totalOf } from '../arrivals/likelihood';
+import { stopsEarlyOf } from '../arrivals/stops-early';
 import { type NextWeighing, nextWeighing } from '../neighbours/cylinder-chain';
 import { otherVisits } from '../neighbours/neighbours';
 import type { JudgedRecord } from '../record';
@@ -22,11 +22,6 @@ export type Weighed = {
   isOffStep: boolean;
 };
 
-const ownPart = (told: Stories): { pulls: number; stopped: number } => ({
-  pulls: 1,
-  stopped: told.stopped / (totalOf(told) || 1),
-});
-
 /** Yields between these are usual, whatever the job; no slip of a known kind ends there but by chance. */
 const PLAIN = { least: 0.7, most: 1.05 } as const;
 /** A next weighing off by more than so many spreads is a reason to look closer. */
@@ -42,6 +37,9 @@ const isPlain = (bench: Bench, record: JudgedRecord, written: Hypothesis, seen: 
   return Math.abs(gap) <= FAR * gapSpreadKg(bench, record, seen.next);
 };
 
+/** What a pull adds to its person's share of early stops is taken out of it from this on. */
+const NOTICEABLE = 0.001;
+
 /** Weighs all that a record may mean against each other. */
 export const weighHypotheses = (bench: Bench, record: JudgedRecord): Weighed => {
   const { baselines, neighbours } = bench;
@@ -52,8 +50,10 @@ export const weighHypotheses = (bench: Bench, record: JudgedRecord): Weighed => 
   };
   const written = asWritten(record);
   const first = weigh(bench, record, written, seen).stories;
+  const stopped = first ? first.stopped / (totalOf(first) || 1) : 0;
   // A pull is no witness against itself: the person's share is taken without it.
-  if (first) seen.stopsEarly = stopsEarlyOf(baselines.arrivals, record.technicianId, ownPart(first));
+  if (stopped > NOTICEABLE)
+    seen.stopsEarly = stopsEarlyOf(baselines.arrivals, record.technicianId, { pulls: 1, stopped });
   const hypotheses = isPlain(bench, record, written, seen) ? [written] : hypothesesOf(record, neighbours);
   const judged = hypotheses.map((hypothesis) => ({ hypothesis, ...weigh(bench, record, hypothesis, seen) }));
   const total = judged.reduce((sum, { weight }) => sum + weight, 0) || 1;

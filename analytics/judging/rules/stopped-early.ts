@@ -1,4 +1,4 @@
-import { stopsEarlyOf } from '../arrivals/mixture';
+import { stopsEarlyOf } from '../arrivals/stops-early';
 import { expectedMassKg, lowEvidence } from './low';
 import type { Rule } from './rule';
 
