@@ -14,8 +14,8 @@ export const FlagFacts = ({ flag, unit }: { flag: Flag; unit: DisplayUnit }) => 
       <span className="text-sm text-ink-2">{formatDay(flag.recoveredOn)}</span>
     </p>
     <p className="font-mono">
-      {formatMass(flag.recoveredMass, unit)}{' '}
-      <span className="text-sm text-ink-2">of {formatMassWithUnit(flag.fullCharge, unit)}</span>
+      {formatMass(flag.recoveredMass, unit, 2)}{' '}
+      <span className="text-sm text-ink-2">of {formatMassWithUnit(flag.fullCharge, unit, 2)}</span>
     </p>
     <p className="text-sm break-words text-ink-2">
       {flag.technician} at {flag.site}, {formatDesignation(flag.appliance)}

@@ -30,6 +30,15 @@ export const FlagItem = ({ record, unit, task, facts = true, itemRef, onTask, on
   const mayDecide = useMay('flags:decide');
   const { lead, reasons } = record;
   const isOpen = lead.state === 'open';
+  const verbs =
+    isOpen && mayDecide && !task ? (
+      <p className="flex flex-wrap items-center gap-x-5 gap-y-2 print:hidden">
+        <Button onClick={() => onTask('decide')}>Decide</Button>
+        <TextButton onClick={() => onTask('assign')}>
+          {lead.assignedTo || lead.note ? 'Change who looks' : 'Ask somebody'}
+        </TextButton>
+      </p>
+    ) : null;
   return (
     <li
       ref={itemRef}
@@ -45,7 +54,12 @@ export const FlagItem = ({ record, unit, task, facts = true, itemRef, onTask, on
             : 'md:grid-cols-[minmax(0,1.5fr)_minmax(0,14rem)]',
         )}
       >
-        {facts ? <FlagFacts flag={lead} unit={unit} /> : null}
+        {facts ? (
+          <div className="flex min-w-0 flex-col gap-3">
+            <FlagFacts flag={lead} unit={unit} />
+            <div className="max-md:hidden">{verbs}</div>
+          </div>
+        ) : null}
         <FlagReasons reasons={reasons} />
         <FlagPicture flag={lead} />
       </div>
@@ -57,14 +71,7 @@ export const FlagItem = ({ record, unit, task, facts = true, itemRef, onTask, on
         </p>
       ) : null}
       {isOpen ? null : <DecidedLine record={record} />}
-      {isOpen && mayDecide && !task ? (
-        <p className="mt-3 flex flex-wrap items-center gap-x-5 gap-y-2 print:hidden">
-          <Button onClick={() => onTask('decide')}>Decide</Button>
-          <TextButton onClick={() => onTask('assign')}>
-            {lead.assignedTo || lead.note ? 'Change who looks' : 'Ask somebody, or note something'}
-          </TextButton>
-        </p>
-      ) : null}
+      {verbs ? <div className={clsx('mt-3', facts && 'md:hidden')}>{verbs}</div> : null}
       {task === 'decide' ? (
         <DecideBar
           flagId={lead.id}

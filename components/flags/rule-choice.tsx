@@ -12,7 +12,7 @@ type RuleChoiceProps = {
 
 /** The rules with open flags and how many each has; pressed ones narrow the list. */
 export const RuleChoice = ({ byRule, rules, onChange }: RuleChoiceProps) => (
-  <fieldset className="-mx-1 mb-1 flex gap-2 overflow-x-auto px-1 pb-2 sm:flex-wrap print:hidden">
+  <fieldset className="-mx-1 mb-1 flex min-w-0 gap-2 overflow-x-auto px-1 pb-2 sm:flex-wrap print:hidden">
     <legend className="sr-only">Show only these reasons</legend>
     {byRule.map(({ rule, flags }) => {
       const pressed = rules.includes(rule);

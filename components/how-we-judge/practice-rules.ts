@@ -28,6 +28,6 @@ export const PRACTICE_RULES: readonly JudgingRule[] = [
     rule: 'wrong_cylinder',
     looksAt: 'Whether other tickets, or its marking, have another refrigerant in this cylinder.',
     doesNotMean: 'The serial may have been misread; the cylinder may have been emptied and marked anew.',
-    source: 'Mixed refrigerant cannot be reclaimed to the purity of AHRI Standard 700 and earns no credit.',
+    source: 'Mixed refrigerant is seldom reclaimed to AHRI Standard 700 and earns no credit: common practice.',
   },
 ];
