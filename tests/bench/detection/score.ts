@@ -1,10 +1,9 @@
-import type { Judgement } from '@/analytics/judging/judgement';
 import type { FlagRule } from '@/lib/vocabulary';
 import type { SimulatedFault } from '@/seed/simulation/options';
-import { isTrue, type PlantedFaults, SLIP_RULES } from './truth-of-flags';
+import { isTrue, type PlantedFaults, type ScoredFlag, SLIP_RULES } from './truth-of-flags';
 
-/** One company after judging: its flags, the rows its import refused, what was planted. */
-export type JudgedCompany = { flags: readonly Judgement[]; refused: readonly number[]; planted: PlantedFaults };
+/** One company after judging: its flags with the surest first, the rows its import refused, what was planted. */
+export type JudgedCompany = { flags: readonly ScoredFlag[]; refused: readonly number[]; planted: PlantedFaults };
 
 export type Share = { of: number; hits: number };
 const share = (items: readonly boolean[]): Share => ({ of: items.length, hits: items.filter(Boolean).length });
@@ -24,23 +23,28 @@ const SLIPS: ReadonlySet<SimulatedFault> = new Set([
 const hasSlip = (kinds: ReadonlySet<SimulatedFault> | undefined): boolean =>
   [...(kinds ?? [])].some((k) => SLIPS.has(k));
 
+/** How many flags of a rule are true in the way they say; none for a rule whose truth is not planted. */
+export const precisionOf = (companies: readonly JudgedCompany[], rule: FlagRule): Share =>
+  share(
+    companies.flatMap(({ flags, planted }) =>
+      flags.filter((flag) => flag.rule === rule).flatMap((flag) => isTrue(flag, planted) ?? []),
+    ),
+  );
+
 /** Precision and recall of early stops. */
 export const earlyStops = (companies: readonly JudgedCompany[]): { precision: Share; recall: Share } => {
-  const flagged = companies.flatMap(({ flags, planted }) =>
-    flags.filter(({ rule }) => rule === 'stopped_early').map((flag) => isTrue(flag, planted) === true),
-  );
   const found = companies.flatMap(({ flags, planted }) => {
     const ids = new Set(flags.filter(({ rule }) => rule === 'stopped_early').map(({ recordId }) => recordId));
     return [...planted.kinds].filter(([, kinds]) => kinds.has('stopped_early')).map(([id]) => ids.has(id));
   });
-  return { precision: share(flagged), recall: share(found) };
+  return { precision: precisionOf(companies, 'stopped_early'), recall: share(found) };
 };
 
 const slipRecords = ({ flags, refused }: JudgedCompany): Set<string> =>
   new Set([
     ...refused.map(String),
     ...flags.filter(({ rule }) => SLIP_RULES.has(rule)).map(({ recordId }) => recordId),
-    ...flags.filter((f) => f.rule === 'low_unexplained' && f.evidence.recoveredMassKg === 0).map((f) => f.recordId),
+    ...flags.filter((f) => f.rule === 'low_unexplained' && f.recoveredMassKg === 0).map((f) => f.recordId),
   ]);
 
 /** Precision and recall of entry slips; a row that the import refuses counts as found. `among` narrows the recall. */
@@ -62,13 +66,7 @@ export const entrySlips = (
 
 /** How many of the surest flags of each company are true in the way they say. */
 export const surestTrue = (companies: readonly JudgedCompany[], count = 50): number[] =>
-  companies.map(
-    ({ flags, planted }) =>
-      [...flags]
-        .sort((a, b) => b.certainty - a.certainty)
-        .slice(0, count)
-        .filter((flag) => isTrue(flag, planted) === true).length,
-  );
+  companies.map(({ flags, planted }) => flags.slice(0, count).filter((flag) => isTrue(flag, planted) === true).length);
 
 export type Bin = { from: number; flags: number; certainty: number; trueShare: number };
 

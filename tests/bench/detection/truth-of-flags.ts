@@ -1,4 +1,3 @@
-import type { Judgement } from '@/analytics/judging/judgement';
 import type { FlagRule } from '@/lib/vocabulary';
 import type { SimulatedFault } from '@/seed/simulation/options';
 import type { SimulatedTruth } from '@/seed/simulation/truth';
@@ -34,8 +33,17 @@ export const plantedFaults = (truth: Pick<SimulatedTruth, 'bad_records' | 'natur
 });
 export type PlantedFaults = ReturnType<typeof plantedFaults>;
 
+/** A flag as it is held against the truth, whichever way it was come by. */
+export type ScoredFlag = {
+  /** Number of the record's row in the file, counted from 1 below the header. */
+  recordId: string;
+  rule: FlagRule;
+  certainty: number;
+  recoveredMassKg: number;
+};
+
 /** Whether a flag is true in the way it says; null for a rule whose truth is not planted. */
-export const isTrue = ({ rule, recordId }: Judgement, planted: PlantedFaults): boolean | null => {
+export const isTrue = ({ rule, recordId }: ScoredFlag, planted: PlantedFaults): boolean | null => {
   if (rule === 'short_on_arrival') return planted.short.has(recordId);
   const kinds = TRUE_FOR[rule];
   return kinds ? kinds.some((kind) => planted.kinds.get(recordId)?.has(kind)) : null;

@@ -3,7 +3,8 @@ import { comparedRecovery } from '@/analytics/technician-comparison/compared-rec
 import type { ComparedRecovery } from '@/analytics/technician-comparison/recovery';
 import { judgedRecordsOf } from '@/seed/simulation/judged-records';
 import { simulateCompany } from '@/seed/simulation/simulate-company';
-import { classOf, report, Tally, trueEffect } from './tally';
+import { crewFigures, type JudgedCrew, printCrews } from './figures';
+import type { Called } from './tally';
 
 /** A recovery file as the comparison takes it: in the order of time, entry errors left out. */
 export const comparedRecoveriesOf = async (file: string): Promise<ComparedRecovery[]> => {
@@ -13,38 +14,29 @@ export const comparedRecoveriesOf = async (file: string): Promise<ComparedRecove
     .flatMap((record) => comparedRecovery(record) ?? []);
 };
 
+/** Reads a file with the import's reader and compares its technicians. */
+export const calledInFile = async (file: string): Promise<Called[]> =>
+  compareTechnicians(await comparedRecoveriesOf(file)).technicians.map((own) => ({
+    name: own.technicianId,
+    verdict: own.verdict,
+    look: own.look,
+    hasScale: own.scale !== null,
+    range: own.effect,
+  }));
+
 /** Every fourth company has nobody planted who is worse than the others, and no drifting scale. */
 const WITHOUT_PLANTED = 4;
-const YEARS = 12;
+export const plantsPeople = (number: number): boolean => number % WITHOUT_PLANTED !== 0;
 
 /** Judges simulated companies and prints how each class of technician fared. */
 export const measureSimulated = async (seeds: string, companies: number): Promise<void> => {
-  const tallies = new Map<string, Tally>();
-  const accused = { crews: 0, soundCrews: 0, withPlanted: 0, withoutPlanted: 0, sound: 0 };
+  const crews: JudgedCrew[] = [];
   for (let number = 1; number <= companies; number++) {
-    const plantsPeople = number % WITHOUT_PLANTED !== 0;
-    const { file, truth } = simulateCompany(`${seeds} ${number}`, { plantsPeople });
-    const results = compareTechnicians(await comparedRecoveriesOf(file)).technicians;
-    accused.crews += 1;
-    accused.soundCrews += Number(!plantsPeople);
-    for (const own of truth.technicians) {
-      const result = results.find(({ technicianId }) => technicianId === own.name);
-      if (!result) continue;
-      const name = classOf(own);
-      const tally = tallies.get(name) ?? new Tally();
-      tallies.set(name, tally);
-      tally.add(result, trueEffect(own, truth.technicians));
-      if (own.class.startsWith('bad_')) continue;
-      accused.sound += 1;
-      if (result.verdict !== 'below') continue;
-      if (plantsPeople) accused.withPlanted += 1;
-      else accused.withoutPlanted += 1;
-    }
+    const { file, truth } = simulateCompany(`${seeds} ${number}`, { plantsPeople: plantsPeople(number) });
+    crews.push({ called: await calledInFile(file), planted: truth.technicians });
   }
-  console.log(`\n${companies} companies of about 4,000 records, seeds “${seeds} 1” to “${seeds} ${companies}”`);
-  report(tallies);
-  const wrong = accused.withPlanted + accused.withoutPlanted;
-  console.log(
-    `Called below without cause: ${wrong} of ${accused.sound} technicians; ${accused.withoutPlanted} in ${accused.soundCrews} crews without a poor technician; ${(wrong / accused.crews).toFixed(3)} a crew, ${(wrong / accused.crews / YEARS).toFixed(4)} a crew and year`,
+  printCrews(
+    `${companies} companies of about 4,000 records, seeds “${seeds} 1” to “${seeds} ${companies}”`,
+    crewFigures(crews),
   );
 };

@@ -3,6 +3,15 @@ import type { SimulatedTruth } from '@/seed/simulation/truth';
 
 export type Planted = SimulatedTruth['technicians'][number];
 
+/** What is said of a technician, whichever way it was come by. The range is that of the effect, in points of nameplate. */
+export type Called = {
+  name: string;
+  verdict: TechnicianResult['verdict'];
+  look: boolean;
+  hasScale: boolean;
+  range: { low: number; high: number } | null;
+};
+
 /** How technicians of one class were judged, and how often their range held the truth. */
 export class Tally {
   technicians = 0;
@@ -14,16 +23,16 @@ export class Tally {
   judged = 0;
   covered = 0;
 
-  add(result: TechnicianResult, truth: number): void {
+  add({ verdict, look, hasScale, range }: Called, truth: number): void {
     this.technicians += 1;
-    this.tooFew += Number(result.verdict === 'too few');
-    this.below += Number(result.verdict === 'below');
-    this.above += Number(result.verdict === 'above');
-    this.look += Number(result.look);
-    this.scale += Number(result.scale !== null);
-    if (!result.effect) return;
+    this.tooFew += Number(verdict === 'too few');
+    this.below += Number(verdict === 'below');
+    this.above += Number(verdict === 'above');
+    this.look += Number(look);
+    this.scale += Number(hasScale);
+    if (!range) return;
     this.judged += 1;
-    this.covered += Number(result.effect.low <= truth && truth <= result.effect.high);
+    this.covered += Number(range.low <= truth && truth <= range.high);
   }
 }
 
@@ -40,25 +49,3 @@ export const trueEffect = (own: Planted, crew: readonly Planted[]): number => {
   const mean = others.reduce((sum, other) => sum + other.records * other.true_yield_points, 0) / Math.max(1, jobs);
   return own.true_yield_points - mean;
 };
-
-const percent = (part: number, of: number): string => (of > 0 ? `${((100 * part) / of).toFixed(1)} %` : '');
-
-/** One line a class. */
-export const report = (tallies: ReadonlyMap<string, Tally>): void =>
-  console.table(
-    Object.fromEntries(
-      [...tallies].map(([name, own]) => [
-        name,
-        {
-          technicians: own.technicians,
-          'too few': own.tooFew,
-          below: own.below,
-          'below, share': percent(own.below, own.technicians),
-          above: own.above,
-          look: own.look,
-          'called a scale': own.scale,
-          'range holds': percent(own.covered, own.judged),
-        },
-      ]),
-    ),
-  );
