@@ -11,6 +11,7 @@ const BENCHES: Record<string, () => Promise<{ run: (bench: Bench) => Promise<voi
   import: () => import('@/tests/bench/import'),
   analytics: () => import('@/tests/bench/analytics'),
   pages: () => import('@/tests/bench/pages'),
+  detection: () => import('@/tests/bench/detection/through-import'),
 };
 
 /** `npm run bench` measures everything, `npm run bench -- import` one thing. Figures go to standard output. */
@@ -25,7 +26,8 @@ const main = async (): Promise<void> => {
   enter(database, `http://127.0.0.1:${port}`);
   await buildIfChanged(serverEnvironment(database, `http://127.0.0.1:${port}`));
   const served = await serve(database, port);
-  process.on('exit', () => served.process.kill('SIGKILL'));
+  // Before the database goes: a server without one fills the terminal with its complaints.
+  process.prependListener('exit', () => served.process.kill('SIGKILL'));
   for (const name of names) {
     const bench = await BENCHES[name]?.();
     await bench?.run({ database, served, args });

@@ -1,10 +1,9 @@
 import { readFileSync } from 'node:fs';
 import { join } from 'node:path';
-import { setTimeout as sleep } from 'node:timers/promises';
 import { createAccessToken, createCompany } from '@/lib/auth/provision';
-import type { ImportView } from '@/lib/imports/contract';
 import type { Bench } from '@/lib/launch/bench';
 import { recoveryFile } from '../support/recovery-file';
+import { companyApi } from './company-api';
 import { copyBaseline } from './copy-baseline';
 
 const SIZES = [100_000, 200_000];
@@ -13,23 +12,8 @@ const SIZES = [100_000, 200_000];
 const peakMb = (pid: number): number =>
   Number(/VmHWM:\s+(\d+)/.exec(readFileSync(`/proc/${pid}/status`, 'utf8'))?.[1] ?? 0) / 1024;
 
-const upload = async (address: string, token: string, rows: number) => {
-  const form = new FormData();
-  form.set('file', new Blob([...recoveryFile(rows, rows, `N${rows}`)]), `${rows}.csv`);
-  const headers = { authorization: `Bearer ${token}` };
-  // Making the file has kept this process busy: let it notice which idle connections the server has closed meanwhile.
-  await sleep(200);
-  const began = performance.now();
-  const response = await fetch(`${address}/api/imports`, { method: 'POST', body: form, headers });
-  if (response.status !== 202) throw new Error(`${response.status} ${await response.text()}`);
-  const { id } = (await response.json()) as { id: string };
-  for (;;) {
-    const view = (await (await fetch(`${address}/api/imports/${id}`, { headers })).json()) as ImportView;
-    if (view.status === 'failed') throw new Error(view.failure ?? 'failed');
-    if (view.status === 'done') return { view, seconds: (performance.now() - began) / 1000 };
-    await sleep(100);
-  }
-};
+const upload = (address: string, token: string, rows: number) =>
+  companyApi(address, token).importFile(`${rows}.csv`, [...recoveryFile(rows, rows, `N${rows}`)]);
 
 /** How long a file takes from the first byte sent to the last record there, against COPY of the same rows; memory. */
 export const run = async ({ database, served }: Bench): Promise<void> => {

@@ -1,0 +1,22 @@
+import { execFileSync } from 'node:child_process';
+import { existsSync, readFileSync, writeFileSync } from 'node:fs';
+import { machine } from '../machine';
+
+const FILE = 'tests/bench/detection.json';
+
+/** The commit that was measured; null outside of a checkout. */
+const commit = (): string | null => {
+  try {
+    return execFileSync('git', ['describe', '--always', '--dirty'], { encoding: 'utf8' }).trim();
+  } catch {
+    return null;
+  }
+};
+
+/** Puts the results of one set of companies into the file of results, in place of those of an earlier run of the set. */
+export const keepResults = (set: string, results: object): void => {
+  // Only this function writes the file.
+  const before = existsSync(FILE) ? (JSON.parse(readFileSync(FILE, 'utf8')) as Record<string, unknown>) : {};
+  const own = { measuredOn: new Date().toISOString(), commit: commit(), machine: machine(), ...results };
+  writeFileSync(FILE, `${JSON.stringify({ ...before, [set]: own }, null, 2)}\n`);
+};
