@@ -8,7 +8,7 @@ import { DECISION_WORDS } from '@/lib/flags/words';
 import { formatInstant } from '@/lib/format';
 
 /** What was decided about a record, by whom, and the way back. */
-export const DecidedLine = ({ record }: { record: FlaggedRecord }) => {
+export const DecidedLine = ({ record, onReopened }: { record: FlaggedRecord; onReopened?: () => void }) => {
   const { timeZone } = useViewer();
   const mayDecide = useMay('flags:decide');
   const { mutate, isPending, error } = useReopen();
@@ -22,7 +22,11 @@ export const DecidedLine = ({ record }: { record: FlaggedRecord }) => {
         {decided.note ? `: “${decided.note}”` : ''}
       </span>{' '}
       {mayDecide ? (
-        <TextButton className="print:hidden" disabled={isPending} onClick={() => mutate({ id: record.lead.id })}>
+        <TextButton
+          className="print:hidden"
+          disabled={isPending}
+          onClick={() => mutate({ id: record.lead.id }, { onSuccess: () => onReopened?.() })}
+        >
           Reopen
         </TextButton>
       ) : null}

@@ -23,10 +23,20 @@ type FlagItemProps = {
   itemRef?: Ref<HTMLLIElement>;
   onTask: (task: FlagTask) => void;
   onDecided: (record: FlaggedRecord, decision: FlagDecision) => void;
+  onReopened?: () => void;
 };
 
 /** One record that needs a look: which, why with numbers and a picture, and what to say about it. */
-export const FlagItem = ({ record, unit, task, facts = true, itemRef, onTask, onDecided }: FlagItemProps) => {
+export const FlagItem = ({
+  record,
+  unit,
+  task,
+  facts = true,
+  itemRef,
+  onTask,
+  onDecided,
+  onReopened,
+}: FlagItemProps) => {
   const mayDecide = useMay('flags:decide');
   const { lead, reasons } = record;
   const isOpen = lead.state === 'open';
@@ -70,7 +80,7 @@ export const FlagItem = ({ record, unit, task, facts = true, itemRef, onTask, on
           {lead.note ? <span className="text-ink-2">“{lead.note}”</span> : null}
         </p>
       ) : null}
-      {isOpen ? null : <DecidedLine record={record} />}
+      {isOpen ? null : <DecidedLine record={record} {...(onReopened ? { onReopened } : {})} />}
       {verbs ? <div className={clsx('mt-3', facts && 'md:hidden')}>{verbs}</div> : null}
       {task === 'decide' ? (
         <DecideBar

@@ -1,5 +1,6 @@
 'use client';
 
+import { useRouter } from 'next/navigation';
 import { useState } from 'react';
 import { byRecord } from '@/analytics/flags/by-record';
 import { useRecordFlags } from '@/analytics/flags/hook';
@@ -12,6 +13,8 @@ export const RecordFlags = ({ recoveryId }: { recoveryId: string }) => {
   const { massUnit } = useViewer();
   const { data } = useRecordFlags(recoveryId, massUnit);
   const [task, setTask] = useState<FlagTask>(null);
+  // The page around is the server's: a decision may have left the record out of the figures.
+  const router = useRouter();
   const records = byRecord(data?.items ?? []);
   if (records.length === 0) return null;
   return (
@@ -25,7 +28,11 @@ export const RecordFlags = ({ recoveryId }: { recoveryId: string }) => {
             task={record.lead.state === 'open' ? task : null}
             facts={false}
             onTask={setTask}
-            onDecided={() => setTask(null)}
+            onDecided={() => {
+              setTask(null);
+              router.refresh();
+            }}
+            onReopened={() => router.refresh()}
           />
         ))}
       </ol>

@@ -42,10 +42,10 @@ test('a record shows its flags, and an entry error leaves the figures until it i
   await flags.getByRole('button', { name: 'Decide' }).click();
   await flags.getByRole('button', { name: /Weighing or entry error/ }).click();
   await expect(flags.getByText('Weighing or entry error')).toBeVisible();
-  await expect(page.getByText('Left out of the figures as an entry error')).toBeVisible();
+  await expect(page.getByText('Left out of the figures as an entry error', { exact: true })).toBeVisible();
   await flags.getByRole('button', { name: 'Reopen' }).click();
   await expect(flags.getByRole('button', { name: 'Decide' })).toBeVisible();
-  await expect(page.getByText('Left out of the figures as an entry error')).toBeHidden();
+  await expect(page.getByText('Left out of the figures as an entry error', { exact: true })).toBeHidden();
 });
 
 test.describe('a technician', () => {
