@@ -2,9 +2,11 @@ import type pg from 'pg';
 import { withConnection } from '@/db/cluster/roles';
 
 /** Tables that hold a company's rows, those first whose rows point at others. */
-const tenantTables = async (owner: pg.Client): Promise<string[]> => {
-  const tables = await owner.query<{ name: string }>(`
-    select c.relname as name from pg_class c join pg_attribute a on a.attrelid = c.oid and a.attname = 'company_id'
+const tenantTables = async (owner: pg.Client): Promise<{ name: string; hasTriggers: boolean }[]> => {
+  const tables = await owner.query<{ name: string; hasTriggers: boolean }>(`
+    select c.relname as name,
+           exists (select from pg_trigger t where t.tgrelid = c.oid and not t.tgisinternal) as "hasTriggers"
+    from pg_class c join pg_attribute a on a.attrelid = c.oid and a.attname = 'company_id'
     where c.relnamespace = 'public'::regnamespace and c.relkind = 'r' and c.relname <> 'sessions'`);
   const keys = await owner.query<{ child: string; parent: string }>(`
     select conrelid::regclass::text as child, confrelid::regclass::text as parent
@@ -19,7 +21,8 @@ const tenantTables = async (owner: pg.Client): Promise<string[]> => {
       left.delete(name);
     }
   }
-  return ordered;
+  const triggered = new Set(tables.rows.flatMap(({ name, hasTriggers }) => (hasTriggers ? [name] : [])));
+  return ordered.map((name) => ({ name, hasTriggers: triggered.has(name) }));
 };
 
 /**
@@ -34,13 +37,15 @@ export const removeCompany = (ownerUrl: string, companyId: string): Promise<void
     const members = await owner.query<{ id: string }>('select person_id as id from memberships where company_id = $1', [
       companyId,
     ]);
-    for (const table of tables) {
+    // Background work of other companies goes on: only tables whose triggers must sleep are locked.
+    for (const { name: table, hasTriggers } of tables) {
       const name = owner.escapeIdentifier(table);
-      await owner.query(`alter table ${name} disable trigger user`);
+      if (hasTriggers) await owner.query(`alter table ${name} disable trigger user`);
       await owner.query(`delete from ${name} where company_id = $1`, [companyId]);
     }
     await owner.query('delete from companies where id = $1', [companyId]);
-    for (const table of tables) await owner.query(`alter table ${owner.escapeIdentifier(table)} enable trigger user`);
+    for (const { name, hasTriggers } of tables)
+      if (hasTriggers) await owner.query(`alter table ${owner.escapeIdentifier(name)} enable trigger user`);
     for (const { id } of members.rows) {
       await owner.query(`select set_config('app.person_id', $1, true)`, [id]);
       await owner.query(
