@@ -93,6 +93,10 @@ export const readCompany = <T>(scope: CompanyScope, work: (tx: Tx) => Promise<T>
 export const withCompanyJob = <T>(scope: CompanyScope, work: (tx: Tx) => Promise<T>): Promise<T> =>
   withSettings(companySettings(scope), work, jobPool());
 
+/** The door for background work that reads: all queries see the company as it stood at one moment. */
+export const readCompanyJob = <T>(scope: CompanyScope, work: (tx: Tx) => Promise<T>): Promise<T> =>
+  withSettings(companySettings(scope), work, jobPool(), { isolationLevel: 'repeatable read', accessMode: 'read only' });
+
 /** The companies there are, for background work that looks after each of them. The job role alone may ask. */
 export const companyIds = (): Promise<string[]> =>
   withSettings(

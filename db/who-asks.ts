@@ -18,6 +18,7 @@ type SessionRow = {
   /** The company the session works in; one of the memberships. */
   companyId: string;
   memberships: MembershipRow[];
+  /** Grows with every change that an answer could show (`state_of_records`). */
   revision: number;
 };
 
@@ -34,8 +35,8 @@ const firstRow = async <Row extends object>(statement: string, hash: string): Pr
   return rows[0] ?? null;
 };
 
-/** The person of the session with this token hash, his companies and where his own one's history ends; null when it lives no more or he is in no company. */
+/** The person of the session with this token hash, his companies and the state of his own one's records; null when it lives no more or he is in no company. */
 export const sessionByHash = (hash: string): Promise<SessionRow | null> => firstRow(SESSION, hash);
 
-/** What the access token with this hash opens, and where its company's history ends; null when unknown or revoked. */
+/** What the access token with this hash opens, and the state of its company's records; null when unknown or revoked. */
 export const accessTokenByHash = (hash: string): Promise<AccessTokenRow | null> => firstRow(ACCESS_TOKEN, hash);

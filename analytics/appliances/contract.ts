@@ -1,6 +1,6 @@
 import { z } from 'zod';
 import { groupFigures } from '@/analytics/grouped-figures/contract';
-import { applianceSuspicion } from '@/analytics/leak-suspicion/contract';
+import { applianceSuspicion, suspectedAt } from '@/analytics/leak-suspicion/contract';
 import { scopeSchema, UNSTATED } from '@/analytics/scope';
 import { defineContract } from '@/lib/api/contract';
 import { APPLIANCE_CATEGORIES } from '@/lib/vocabulary';
@@ -14,6 +14,7 @@ export const applianceRecoveries = defineContract({
   action: 'appliances:read',
   query: scopeSchema,
   response: z.object({
+    suspectedAt,
     items: z.array(
       z.object({
         appliance: z.string(),

@@ -2,7 +2,7 @@ import 'server-only';
 import { type SQL, type SQLWrapper, sql } from 'drizzle-orm';
 import { toGram } from '@/analytics/fact-figures';
 import { byName, countedInScope, countLow, groupFigures } from '@/analytics/grouped-figures/query';
-import { type CompanySuspicion, toldOfAppliance } from '@/analytics/leak-suspicion/company';
+import { readAppliances, readSuspectedAt, toldOfAppliance } from '@/analytics/leak-suspicion/kept';
 import { type Scope, UNSTATED } from '@/analytics/scope';
 import type { Tx } from '@/db/client';
 import { recoveryFacts as f } from '@/db/views/recovery-facts';
@@ -13,11 +13,7 @@ const last = <Value>(column: SQLWrapper): SQL<Value> =>
   sql<Value>`(array_agg(${column} order by ${f.recoveredOn} desc, ${f.recoveredAt} desc nulls last, ${f.id} desc))[1]`;
 
 /** Each appliance with a record that counts in scope, by site and name. */
-export const getApplianceRecoveries = async (
-  tx: Tx,
-  scope: Scope,
-  suspicion: CompanySuspicion,
-): Promise<ApplianceRecoveries> => {
+export const getApplianceRecoveries = async (tx: Tx, scope: Scope): Promise<ApplianceRecoveries> => {
   const appliances = await tx
     .select({
       appliance: f.appliance,
@@ -34,11 +30,14 @@ export const getApplianceRecoveries = async (
     .groupBy(f.applianceId, f.appliance, f.siteId, f.site)
     .orderBy(byName(f.site), f.siteId, byName(f.appliance), f.applianceId);
   const low = await countLow(tx, scope, f.applianceId);
+  const suspectedAt = await readSuspectedAt(tx);
+  const suspicions = await readAppliances(tx);
   return {
+    suspectedAt,
     items: appliances.map((one) => ({
       ...one,
       lowRecoveries: low.get(one.applianceId) ?? 0,
-      ...toldOfAppliance(suspicion, one.applianceId),
+      ...toldOfAppliance(suspicions.get(one.applianceId), suspectedAt),
     })),
   };
 };

@@ -3,6 +3,7 @@ import type { PoolClient } from 'pg';
 import { z } from 'zod';
 import { judgeRecords, judgeTouched } from '@/analytics/judging/judge-records';
 import { defaultSettings } from '@/analytics/judging/settings';
+import { REQUEST_DIGEST } from '@/analytics/record-digest/request';
 import { withCompanyConnection } from '@/db/pool-client';
 import { countJudgedSingly, dropOldBaselines, type KeptBaselines, keepBaselines, keptBaselines } from './baselines';
 import { type Due, readDue, settleDue } from './due';
@@ -77,6 +78,8 @@ export const renewFlags = ({ companyId }: RenewalPayload): Promise<void> =>
     else if (due.ids.length > 0) await renewSome(client, companyId, due, kept);
     else return;
     await settleDue(client, companyId, due);
+    // What is suspected and compared stands on flags too, so it follows them.
+    await client.query(REQUEST_DIGEST, [companyId]);
   });
 
 /** Whether a renewal would judge many records. */

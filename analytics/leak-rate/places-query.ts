@@ -1,7 +1,7 @@
 import 'server-only';
 import { eq } from 'drizzle-orm';
 import { getAdditions } from '@/analytics/charge-additions/query';
-import { type CompanySuspicion, chanceOf } from '@/analytics/leak-suspicion/company';
+import { type KeptAppliance, readSites, readVisitedAppliances } from '@/analytics/leak-suspicion/kept';
 import type { Tx } from '@/db/client';
 import { sites } from '@/db/schema/places';
 import { notFound } from '@/lib/errors';
@@ -18,31 +18,31 @@ const MOST_ADDITIONS = 500;
 
 const share = (value: number): number => Number(value.toFixed(4));
 
-const suspicionOf = ({ appliances }: CompanySuspicion, applianceId: string) => {
-  const suspicion = appliances.get(applianceId);
-  const chance = chanceOf(suspicion);
-  return {
-    visits: suspicion?.visits.length ?? 0,
-    shortVisits: suspicion?.shortVisits ?? 0,
-    expectedShort: Number((suspicion?.expectedShort ?? 0).toFixed(2)),
-    leakSuspicion: chance === null ? null : share(chance),
-  };
-};
+const suspicionOf = (own: KeptAppliance | undefined) => ({
+  visits: own?.visits ?? 0,
+  shortVisits: own?.shortVisits ?? 0,
+  expectedShort: Number((own?.expectedShort ?? 0).toFixed(2)),
+  leakSuspicion: own?.chance == null ? null : share(own.chance),
+});
+
+const visitsOf = (own: KeptAppliance | undefined) =>
+  (own?.visitedOn ?? []).map((visitedOn, at) => ({
+    visitedOn,
+    recoveryYield: share(own?.yields[at] ?? 0),
+    short: share(own?.shortChances[at] ?? 0),
+  }));
 
 const massOrNull = (kg: number | null) => (kg === null ? null : kgToGram(kg));
 
 /** What one appliance took in, lost and is suspected of. Throws 404 when the company has none with this id. */
-export const getApplianceLeaks = async (
-  tx: Tx,
-  applianceId: string,
-  company: CompanySuspicion,
-): Promise<ApplianceLeaks> => {
+export const getApplianceLeaks = async (tx: Tx, applianceId: string): Promise<ApplianceLeaks> => {
   const [unit] = await getLeakAppliances(tx, { applianceId });
   if (!unit) throw notFound('This appliance');
   const { appliance, site, siteId, category, lightCommercial, designation, fullChargeKg } = unit;
   const method = await getSiteMethod(tx, siteId);
   const methodUsed = method.method ?? USUAL_METHOD;
   const additions = (await getChargeAdditions(tx, [applianceId])).get(applianceId) ?? [];
+  const suspicion = (await readVisitedAppliances(tx, [applianceId])).get(applianceId);
   const { items } = await getAdditions(tx, { appliance: applianceId, limit: MOST_ADDITIONS });
   return {
     ...{ appliance, applianceId, site, siteId, category, lightCommercial, method, methodUsed },
@@ -50,14 +50,7 @@ export const getApplianceLeaks = async (
     fullCharge: massOrNull(fullChargeKg),
     ...shownLeaks(unit, additions, methodUsed),
     additions: items,
-    suspicion: {
-      ...suspicionOf(company, applianceId),
-      history: (company.appliances.get(applianceId)?.visits ?? []).map(({ visitedOn, recoveryYield, evidence }) => ({
-        visitedOn,
-        recoveryYield: share(recoveryYield),
-        short: share(evidence?.short ?? 0),
-      })),
-    },
+    suspicion: { ...suspicionOf(suspicion), history: visitsOf(suspicion) },
   };
 };
 
@@ -65,7 +58,7 @@ const siteAppliance = (
   unit: LeakAppliance,
   additions: readonly ChargeAddition[],
   method: LeakRateMethod,
-  company: CompanySuspicion,
+  suspicion: KeptAppliance | undefined,
 ): SiteAppliance => {
   const { appliance, applianceId, category, designation, fullChargeKg } = unit;
   const { events } = shownLeaks(unit, additions, method);
@@ -76,7 +69,7 @@ const siteAppliance = (
     fullCharge: massOrNull(fullChargeKg),
     additions: additions.length,
     lastRate: last?.rate ? { ...last.rate, addedOn: last.addedOn } : null,
-    ...suspicionOf(company, applianceId),
+    ...suspicionOf(suspicion),
   };
 };
 
@@ -86,32 +79,33 @@ const mostSuspectedFirst = (a: SiteAppliance, b: SiteAppliance): number =>
   a.appliance.localeCompare(b.appliance, 'en', { numeric: true });
 
 /** The method of a site and what is known of each of its appliances. Throws 404 when the company has none with this id. */
-export const getSiteLeaks = async (tx: Tx, siteId: string, company: CompanySuspicion): Promise<SiteLeaks> => {
+export const getSiteLeaks = async (tx: Tx, siteId: string): Promise<SiteLeaks> => {
   const [site] = await tx.select({ name: sites.name }).from(sites).where(eq(sites.id, siteId));
   if (!site) throw notFound('This site');
   const method = await getSiteMethod(tx, siteId);
   const methodUsed = method.method ?? USUAL_METHOD;
   const units = await getLeakAppliances(tx, { siteId });
-  const additions = await getChargeAdditions(
-    tx,
-    units.map(({ applianceId }) => applianceId),
-  );
-  const suspicion = company.sites.get(siteId);
+  const ids = units.map(({ applianceId }) => applianceId);
+  const additions = await getChargeAdditions(tx, ids);
+  const suspicions = await readVisitedAppliances(tx, ids);
+  const suspicion = (await readSites(tx)).get(siteId);
   return {
     site: site.name,
     siteId,
     method,
     methodUsed,
     appliances: units
-      .map((unit) => siteAppliance(unit, additions.get(unit.applianceId) ?? [], methodUsed, company))
+      .map((unit) =>
+        siteAppliance(unit, additions.get(unit.applianceId) ?? [], methodUsed, suspicions.get(unit.applianceId)),
+      )
       .sort(mostSuspectedFirst),
     excess: suspicion?.judged
       ? {
           judged: suspicion.judged,
           suspected: suspicion.suspected,
-          expected: Number(suspicion.excess.expected.toFixed(2)),
-          adjustedP: share(suspicion.excess.adjustedP),
-          look: suspicion.excess.look,
+          expected: Number(suspicion.expected.toFixed(2)),
+          adjustedP: share(suspicion.adjustedP),
+          look: suspicion.look,
         }
       : null,
   };

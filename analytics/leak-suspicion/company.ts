@@ -1,4 +1,5 @@
 import { groupBy } from '@/analytics/statistics/group-by';
+import type { LeakModel } from './leaking-appliances';
 import type { PulledAtSite } from './query';
 import { type SiteExcess, siteExcess } from './site-excess';
 import { type ApplianceSuspicion, isSuspected, leakSuspicion } from './suspicion';
@@ -19,6 +20,8 @@ export type SiteSuspicion = {
 export type CompanySuspicion = {
   appliances: ReadonlyMap<string, ApplianceSuspicion>;
   sites: ReadonlyMap<string, SiteSuspicion>;
+  /** What was fitted to the company's visits; null where too few appliances tell. */
+  model: LeakModel | null;
 };
 
 /** How often an appliance came short after it had once. */
@@ -42,7 +45,7 @@ const ofSite = (siteId: string, appliances: readonly ApplianceSuspicion[]): Omit
 
 /** The suspicion for every appliance and site of a company, from its recoveries. */
 export const companySuspicion = (records: readonly PulledAtSite[]): CompanySuspicion => {
-  const { appliances } = leakSuspicion(records);
+  const { appliances, model } = leakSuspicion(records);
   const siteOf = new Map(records.map(({ applianceId, siteId }) => [applianceId, siteId]));
   const bySite = groupBy([...appliances.values()], ({ applianceId }) => siteOf.get(applianceId) ?? '');
   const sites = [...bySite].map(([siteId, units]) => ofSite(siteId, units));
@@ -51,25 +54,6 @@ export const companySuspicion = (records: readonly PulledAtSite[]): CompanySuspi
   return {
     appliances,
     sites: new Map(sites.map((site, index) => [site.siteId, { ...site, excess: excess[index] ?? none }])),
-  };
-};
-
-/** Probabilities are told to a tenth of a per cent: what they rest on is not finer. */
-const told = (chance: number | null): number | null => (chance === null ? null : Number(chance.toFixed(3)));
-
-/** What a list tells of one appliance. */
-export const toldOfAppliance = ({ appliances }: CompanySuspicion, applianceId: string) => {
-  const suspicion = appliances.get(applianceId);
-  return { lowAgain: suspicion ? lowAgainOf(suspicion) : 0, leakSuspicion: told(chanceOf(suspicion)) };
-};
-
-/** What a list tells of one site. */
-export const toldOfSite = ({ sites }: CompanySuspicion, siteId: string) => {
-  const site = sites.get(siteId);
-  return {
-    lowAgain: site?.lowAgain ?? 0,
-    leakSuspicion: told(site?.chance ?? null),
-    suspected: site?.suspected ?? 0,
-    moreThanChance: site?.excess.look ?? false,
+    model,
   };
 };

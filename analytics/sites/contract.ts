@@ -1,6 +1,6 @@
 import { z } from 'zod';
 import { groupFigures } from '@/analytics/grouped-figures/contract';
-import { siteSuspicion } from '@/analytics/leak-suspicion/contract';
+import { siteSuspicion, suspectedAt } from '@/analytics/leak-suspicion/contract';
 import { scopeSchema } from '@/analytics/scope';
 import { defineContract } from '@/lib/api/contract';
 
@@ -10,6 +10,7 @@ export const siteRecoveries = defineContract({
   action: 'sites:read',
   query: scopeSchema,
   response: z.object({
+    suspectedAt,
     items: z.array(
       z.object({
         site: z.string(),

@@ -1,7 +1,7 @@
 import 'server-only';
 import { sql } from 'drizzle-orm';
 import { byName, countedInScope, countLow, groupFigures, readyFigures } from '@/analytics/grouped-figures/query';
-import { type CompanySuspicion, toldOfSite } from '@/analytics/leak-suspicion/company';
+import { readSites, readSuspectedAt, toldOfSite } from '@/analytics/leak-suspicion/kept';
 import { isWhole, type Scope } from '@/analytics/scope';
 import type { Tx } from '@/db/client';
 import { recoveredBySite as ready } from '@/db/views/recovered-by-group';
@@ -28,14 +28,17 @@ const inScope = (tx: Tx, scope: Scope) =>
     .orderBy(byName(f.site), f.siteId);
 
 /** Each site with a record that counts in scope, by name. */
-export const getSiteRecoveries = async (tx: Tx, scope: Scope, suspicion: CompanySuspicion): Promise<SiteRecoveries> => {
+export const getSiteRecoveries = async (tx: Tx, scope: Scope): Promise<SiteRecoveries> => {
   const sites = await (isWhole(scope) ? ofEveryRecord(tx) : inScope(tx, scope));
   const low = await countLow(tx, scope, f.siteId);
+  const suspectedAt = await readSuspectedAt(tx);
+  const suspicions = await readSites(tx);
   return {
+    suspectedAt,
     items: sites.map((site) => ({
       ...site,
       lowRecoveries: low.get(site.siteId) ?? 0,
-      ...toldOfSite(suspicion, site.siteId),
+      ...toldOfSite(suspicions.get(site.siteId), suspectedAt),
     })),
   };
 };

@@ -24,6 +24,11 @@ export const technicianRecoveries = defineContract({
       /** Effect of the one in the middle, and how much sound technicians differ beyond luck (a standard deviation): points. */
       centre: z.number().nullable(),
       normalSpread: z.number().nonnegative(),
+      /** Where the company's history ended in the records it stands on, and when it was made. */
+      revision: z.int().nonnegative(),
+      madeAt: z.iso.datetime(),
+      /** False while a record or a decision that came since is not in it yet; the next comparison is then being made. */
+      current: z.boolean(),
     }),
   }),
 });

@@ -37,7 +37,7 @@ const SITES: GroupedKind<SiteRow> = {
       kind: 'count',
       value: ({ suspected }) => suspected,
       draw: ({ suspected, moreThanChance }) =>
-        moreThanChance ? <span className="marked">{suspected}</span> : String(suspected),
+        moreThanChance ? <span className="marked">{suspected}</span> : String(suspected ?? '—'),
     },
     measured<SiteRow>('appliances', 'Appliances'),
     ...MASS_COLUMNS,

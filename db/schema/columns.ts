@@ -21,3 +21,11 @@ const ofCompany = sql`company_id = ${setting('company_id')}::uuid`;
 /** The policy of a tenant table: only rows of the company that the transaction was opened for. */
 export const companyPolicy = () =>
   pgPolicy('of_company', { as: 'permissive', for: 'all', using: ofCompany, withCheck: ofCompany });
+
+/** What follows from everybody's records is not one technician's to see. */
+export const notForATechnician = () =>
+  pgPolicy('not_for_a_technician', {
+    as: 'restrictive',
+    for: 'all',
+    using: sql`${setting('technician_id')} is null`,
+  });

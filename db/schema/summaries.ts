@@ -1,28 +1,8 @@
-import { sql } from 'drizzle-orm';
-import {
-  bigint,
-  date,
-  doublePrecision,
-  integer,
-  numeric,
-  pgPolicy,
-  pgTable,
-  primaryKey,
-  text,
-  uuid,
-} from 'drizzle-orm/pg-core';
-import { companyId, companyPolicy, setting } from './columns';
+import { bigint, date, doublePrecision, integer, numeric, pgTable, primaryKey, text, uuid } from 'drizzle-orm/pg-core';
+import { companyId, companyPolicy, notForATechnician } from './columns';
 
 // Kept by trigger in the transaction that changes a record (see the migration), never written by the application.
 // Entry errors are left out of all of them.
-
-/** What follows from everybody's records is not one technician's to see. */
-const notForATechnician = () =>
-  pgPolicy('not_for_a_technician', {
-    as: 'restrictive',
-    for: 'all',
-    using: sql`${setting('technician_id')} is null`,
-  });
 
 const totalKg = (name: string) => numeric(name, { precision: 20, scale: 9 });
 

@@ -1,11 +1,9 @@
-import { setTimeout as sleep } from 'node:timers/promises';
 import { and, eq, sql } from 'drizzle-orm';
 import { afterAll, beforeAll, describe, expect, test } from 'vitest';
 import { requestDueFlags } from '@/analytics/flag-renewal/request-due';
 import { ALL_TASKS } from '@/analytics/tasks';
 import { PATCH as correct } from '@/app/api/recoveries/[id]/route';
 import { POST as create } from '@/app/api/recoveries/route';
-import { GET as workRoute } from '@/app/api/work/route';
 import { withCompany } from '@/db/client';
 import { flagBaselines, flagRenewals, flagsDue } from '@/db/schema/flag-renewal';
 import { flags } from '@/db/schema/flags';
@@ -16,6 +14,7 @@ import { apiRequest, newCompany } from '../support/company';
 import { flagsOf, renewEverything } from '../support/flags';
 import { at, takeBack, takeIn } from '../support/imports';
 import { recoveryFile } from '../support/recovery-file';
+import { settled } from '../support/settled';
 
 const HEADER =
   'record_ref,recovered_at,technician,site,appliance,appliance_category,job_type,refrigerant,nameplate_charge,recovered_mass,mass_unit\n';
@@ -29,14 +28,7 @@ let worker: RunningWorker;
 let company: Awaited<ReturnType<typeof newCompany>>;
 let token: string;
 
-/** Waits until nothing of the company's background work is left. */
-const settle = async (): Promise<void> => {
-  for (;;) {
-    const answer = await (await workRoute(apiRequest('/api/work', token), undefined)).json();
-    if (answer.pending === 0) return;
-    await sleep(50);
-  }
-};
+const settle = () => settled(token);
 const inCompany = <T>(work: Parameters<typeof withCompany<T>>[1]) => withCompany(company.scope, work);
 const recordOf = async (ref: string) => {
   const [row] = await inCompany((tx) =>

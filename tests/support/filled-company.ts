@@ -9,6 +9,7 @@ import { importFileChunks, importMappings, importRows, imports } from '@/db/sche
 import { notes } from '@/db/schema/notes';
 import { passwordLinks, sessions } from '@/db/schema/people';
 import { appliances, branches, cylinders, sites, technicianCertifications, technicians } from '@/db/schema/places';
+import { applianceSuspicions, recordDigests, siteSuspicions } from '@/db/schema/record-digests';
 import { recoveries } from '@/db/schema/recoveries';
 import { newCompany } from './company';
 import { newPerson } from './session';
@@ -165,6 +166,19 @@ const fillImports = async (tx: Tx, companyId: string, label: string, id: Ids): P
   await tx.insert(importMappings).values({ companyId, headerKey: label, mapping: {} });
 };
 
+const fillDigest = async (tx: Tx, companyId: string, { applianceId, siteId }: Ids): Promise<void> => {
+  await tx
+    .insert(recordDigests)
+    .values({ companyId, version: 0, revision: 0, comparison: { technicians: [], crew: { judged: 0 } } });
+  const chance = 0.9;
+  await tx.insert(applianceSuspicions).values({
+    ...{ companyId, applianceId, visits: 1, shortVisits: 1, expectedShort: 0.1, chance },
+    ...{ visitedOn: ['2025-01-15'], yields: [0.1], shortChances: [0.9] },
+  });
+  const counts = { judged: 1, suspected: 1, lowAgain: 0, expected: 0.1, adjustedP: 0.2, look: false };
+  await tx.insert(siteSuspicions).values({ companyId, siteId, chance, ...counts });
+};
+
 /**
  * A company with rows in every table and view. `label` stands in every name and `massKg` in every mass, so that either
  * is recognised where it does not belong.
@@ -181,6 +195,7 @@ export const filledCompany = async (label: string, massKg: string) => {
     await fillNotes(tx, companyId, label, id);
     await fillCoaching(tx, companyId, label, id);
     await fillAdditions(tx, companyId, label, id, massKg);
+    await fillDigest(tx, companyId, id);
   });
   const { personId } = await newPerson(companyId, 'owner');
   const expiresAt = '2099-01-01T00:00:00Z';

@@ -6,5 +6,5 @@ import { scopeOf } from '@/lib/auth/viewer';
 
 /** What each technician recovered, and how that compares. */
 export const GET = getKeptRoute(technicianRecoveries, (scope, viewer) =>
-  readCompany(scopeOf(viewer), (tx) => getTechnicianRecoveries(tx, scope, viewer.timeZone)),
+  readCompany(scopeOf(viewer), (tx) => getTechnicianRecoveries(tx, scope, viewer)),
 );

@@ -1,5 +1,6 @@
 import { beforeAll, expect, test } from 'vitest';
 import { applianceRecoveries } from '@/analytics/appliances/contract';
+import { digestRecords } from '@/analytics/record-digest/digest';
 import { siteRecoveries } from '@/analytics/sites/contract';
 import { GET as getAppliances } from '@/app/api/appliances/route';
 import { GET as getSites } from '@/app/api/sites/route';
@@ -26,7 +27,20 @@ beforeAll(async () => {
   );
 });
 
+test('before the first digest nothing is said of any unit or site', async () => {
+  const units = await (await getAppliances(apiRequest('/api/appliances', token), undefined)).json();
+  const sites = await (await getSites(apiRequest('/api/sites', token), undefined)).json();
+  for (const { suspectedAt, items } of [
+    applianceRecoveries.response.parse(units),
+    siteRecoveries.response.parse(sites),
+  ]) {
+    expect(suspectedAt).toBeNull();
+    for (const item of items) expect(item).toMatchObject({ leakSuspicion: null, lowAgain: null });
+  }
+});
+
 test('a unit that came short again and again is suspected, and no other is', async () => {
+  await digestRecords({ companyId: company.companyId });
   const response = await getAppliances(apiRequest('/api/appliances', token), undefined);
   const { items } = applianceRecoveries.response.parse(await response.json());
   const suspected = items.filter(({ leakSuspicion }) => (leakSuspicion ?? 0) >= 0.8);
@@ -39,5 +53,5 @@ test('its site says so whatever the scope', async () => {
   const site = items.find((one) => one.site === 'Site 0');
   expect(site).toMatchObject({ lowAgain: 1, suspected: 1 });
   expect(site?.leakSuspicion).toBeGreaterThan(0.8);
-  expect(items.filter(({ suspected }) => suspected > 0)).toHaveLength(1);
+  expect(items.filter(({ suspected }) => suspected !== 0)).toHaveLength(1);
 });

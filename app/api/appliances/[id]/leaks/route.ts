@@ -1,6 +1,5 @@
 import { applianceLeaksSchema } from '@/analytics/leak-rate/contract';
 import { getApplianceLeaks } from '@/analytics/leak-rate/places-query';
-import { keptSuspicion } from '@/analytics/leak-suspicion/kept';
 import { readCompany } from '@/db/client';
 import { idOf } from '@/lib/api/id-of';
 import { json, withViewer } from '@/lib/api/route';
@@ -11,8 +10,5 @@ type Context = RouteContext<'/api/appliances/[id]/leaks'>;
 /** What one appliance took in, lost and is suspected of. */
 export const GET = withViewer('leaks:read', async (_request, viewer, context: Context) => {
   const id = await idOf(context, 'This appliance');
-  const suspicion = await keptSuspicion(viewer);
-  return json(
-    applianceLeaksSchema.parse(await readCompany(scopeOf(viewer), (tx) => getApplianceLeaks(tx, id, suspicion))),
-  );
+  return json(applianceLeaksSchema.parse(await readCompany(scopeOf(viewer), (tx) => getApplianceLeaks(tx, id))));
 });
