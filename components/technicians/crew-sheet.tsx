@@ -15,10 +15,12 @@ type CrewSheetProps = {
   normalSpread: number;
   /** Under five technicians nobody knows how sound people differ. */
   spreadKnown: boolean;
+  /** Records or decisions have changed since the comparison was made. */
+  outdated: boolean;
 };
 
 /** The crew against like jobs: who lies outside of what luck and the usual differences explain. */
-export const CrewSheet = ({ rows, normalSpread, spreadKnown }: CrewSheetProps) => {
+export const CrewSheet = ({ rows, normalSpread, spreadKnown, outdated }: CrewSheetProps) => {
   const router = useRouter();
   const points = useMemo(() => crewPoints(rows), [rows]);
   const limits = useMemo(() => crewLimits(rows, normalSpread), [rows, normalSpread]);
@@ -52,6 +54,11 @@ export const CrewSheet = ({ rows, normalSpread, spreadKnown }: CrewSheetProps) =
         <p className="mt-2 max-w-prose text-sm text-ink-2">
           With fewer than five technicians it is not known how much sound people differ, so nobody is called below or
           above.
+        </p>
+      ) : null}
+      {outdated ? (
+        <p className="mt-2 max-w-prose text-sm text-ink-2" role="status">
+          Something was changed a moment ago. Masses and yields have it already; the comparison is being made anew.
         </p>
       ) : null}
     </Sheet>

@@ -52,6 +52,7 @@ export const TechniciansScreen = () => {
             rows={data.items}
             normalSpread={data.judgedOn.normalSpread}
             spreadKnown={data.judgedOn.spreadKnown}
+            outdated={!data.judgedOn.current}
           />
         ) : null
       }
