@@ -4,10 +4,13 @@ import { machine } from '../machine';
 
 const FILE = 'tests/bench/detection.json';
 
-/** The commit that was measured; null outside of a checkout. */
+const git = (...args: string[]): string => execFileSync('git', args, { encoding: 'utf8' }).trim();
+
+/** The commit that was measured, with `-dirty` where files differ from it; null outside of a checkout. */
 const commit = (): string | null => {
   try {
-    return execFileSync('git', ['describe', '--always', '--dirty'], { encoding: 'utf8' }).trim();
+    const differs = git('status', '--porcelain', '--untracked-files=no', '--', '.', `:!${FILE}`) !== '';
+    return `${git('rev-parse', '--short', 'HEAD')}${differs ? '-dirty' : ''}`;
   } catch {
     return null;
   }
