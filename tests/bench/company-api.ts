@@ -60,7 +60,11 @@ export const companyApi = (address: string, token: string) => {
       return flags;
     },
 
-    /** Everybody with a record, and how he compares. */
-    technicians: async (): Promise<TechnicianRow[]> => (await read<TechnicianRecoveries>('/api/technicians')).items,
+    /** Everybody with a record, and how he compares; throws while the comparison lacks a change. */
+    async technicians(): Promise<TechnicianRow[]> {
+      const { items, judgedOn } = await read<TechnicianRecoveries>('/api/technicians');
+      if (!judgedOn.current) throw new Error('Nothing is pending, but the comparison is an old one');
+      return items;
+    },
   };
 };
