@@ -93,6 +93,8 @@ export const flagsList = defineContract({
   response: z.object({
     items: z.array(flagSchema),
     nextCursor: z.string().nullable(),
+    /** Whether flags of the company are being renewed: what is listed may change in a moment. */
+    renewing: z.boolean(),
     /** Open flags in scope, whatever page, state and rule are asked for. */
     open: z.object({
       flags: count,

@@ -4,6 +4,7 @@ import type { Scope } from '@/analytics/scope';
 import { inScope } from '@/analytics/scope-query';
 import { wilson } from '@/analytics/statistics/intervals/proportion';
 import type { Tx } from '@/db/client';
+import { flagsDue } from '@/db/schema/flag-renewal';
 import { flagDecisions, flags } from '@/db/schema/flags';
 import { flaggedRecoveries } from '@/db/views/flagged-recoveries';
 import { recoveryFacts as f } from '@/db/views/recovery-facts';
@@ -37,6 +38,12 @@ export const countOpen = async (tx: Tx, scope: Scope): Promise<FlagsList['open']
     .groupBy(flags.rule)
     .orderBy(desc(count()), flags.rule);
   return { ...(all ?? { flags: 0, records: 0, flagged: 0 }), byRule };
+};
+
+/** Whether flags of the company wait to be renewed. */
+export const isRenewing = async (tx: Tx): Promise<boolean> => {
+  const { rows } = await tx.execute<{ due: boolean }>(sql`select exists (select from ${flagsDue}) as due`);
+  return rows[0]?.due ?? false;
 };
 
 /** How many records in scope count as flagged. */

@@ -17,6 +17,7 @@ import type { FlagState } from './states';
 const PATH = '/api/flags';
 const PAGE = 50;
 const MOST_A_PAGE = 500;
+const LOOK_AGAIN_MS = 3000;
 
 /** Which flags are asked for. */
 export type FlagsAsked = { scope: ScopeQuery; state: FlagState; rules: readonly FlagRule[]; unit: DisplayUnit };
@@ -33,6 +34,7 @@ export const useFlags = (asked: FlagsAsked) =>
       initialPageParam: '',
       getNextPageParam: (page) => page.nextCursor,
       placeholderData: keepPreviousData,
+      refetchInterval: ({ state: { data } }) => (data?.pages[0]?.renewing ? LOOK_AGAIN_MS : false),
     }),
   );
 

@@ -4,7 +4,7 @@ import type { Tx } from '@/db/client';
 import { flags } from '@/db/schema/flags';
 import type { DisplayUnit } from '@/lib/vocabulary';
 import type { Flag, FlagsList, FlagsQuery } from './contract';
-import { countBorneOut, countOpen } from './counts';
+import { countBorneOut, countOpen, isRenewing } from './counts';
 import { writeCursor } from './cursor';
 import { flagsInList } from './filters';
 import { toFlags } from './items';
@@ -31,6 +31,7 @@ export const getFlags = async (tx: Tx, query: FlagsQuery, unit: DisplayUnit): Pr
   return {
     items: await toFlags(tx, page, unit),
     nextCursor: rows.length > query.limit && last ? writeCursor({ certainty: last.place, id: last.id }) : null,
+    renewing: await isRenewing(tx),
     open: await countOpen(tx, scope),
     borneOut: await countBorneOut(tx),
   };

@@ -75,6 +75,11 @@ export const FlagsScreen = () => {
               aside={<StateChoice state={state} onChange={setState} />}
               tools={<FileButtons makeTable={async () => flagsFile(await fetchAllFlags(asked), scope)} />}
             >
+              {first.renewing ? (
+                <p role="status" className="mb-3 text-sm text-ink-2">
+                  Records are being judged; the list follows by itself.
+                </p>
+              ) : null}
               <RuleChoice byRule={first.open.byRule} rules={rules} onChange={setRules} />
               {records.length ? (
                 <FlagsList records={records} unit={scope.unit} onDecided={setDecided} />

@@ -10,6 +10,7 @@ export type Bench = { database: OpenDatabase; served: Served; args: string[] };
 const BENCHES: Record<string, () => Promise<{ run: (bench: Bench) => Promise<void> }>> = {
   import: () => import('@/tests/bench/import'),
   analytics: () => import('@/tests/bench/analytics'),
+  flags: () => import('@/tests/bench/flags'),
   pages: () => import('@/tests/bench/pages'),
   detection: () => import('@/tests/bench/detection/through-import'),
 };
