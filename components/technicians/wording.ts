@@ -11,8 +11,9 @@ export const effectOf = ({ effect, low, high }: Pick<TechnicianRow, 'effect' | '
 
 /** `4.2 points below like jobs, likely range −6.0 to −2.1`. */
 export const effectWords = ({ value, low, high }: Ranged): string => {
-  const side = value < 0 ? 'below' : 'above';
-  return `${formatNumber(Math.abs(value), 1)} points ${side} like jobs, likely range ${formatPoints(low)} to ${formatPoints(high)}`;
+  const size = formatNumber(Math.abs(value), 1);
+  const where = size === '0.0' ? 'as much as like jobs' : `${size} points ${value < 0 ? 'below' : 'above'} like jobs`;
+  return `${where}, likely range ${formatPoints(low)} to ${formatPoints(high)}`;
 };
 
 /** The habits as a reader knows them. */

@@ -10,7 +10,7 @@ const share = (value: number | null): string => (value === null ? '—' : format
 /** How often each habit is kept, beside colleagues, and what the difference makes of the yield where that is clear. */
 export const HabitsTable = ({ habits, habitBehind }: HabitsTableProps) => (
   <div className="overflow-x-auto">
-    <table className="w-full min-w-[30rem] tabular-nums">
+    <table className="w-full min-w-[26rem] tabular-nums">
       <thead>
         <tr className="border-b-2 border-ink text-left text-sm">
           <th scope="col" className="py-1.5 pr-4 font-semibold">
@@ -23,7 +23,7 @@ export const HabitsTable = ({ habits, habitBehind }: HabitsTableProps) => (
             Colleagues
           </th>
           <th scope="col" className="py-1.5 text-right font-semibold">
-            Makes of the yield, points
+            Points it makes
           </th>
         </tr>
       </thead>
@@ -38,9 +38,7 @@ export const HabitsTable = ({ habits, habitBehind }: HabitsTableProps) => (
               </th>
               <td className="py-2 pr-4 text-right">
                 {share(own)}
-                <span className="block text-sm text-ink-2">
-                  {known ? `of ${formatCount(known)} that say` : 'not recorded'}
-                </span>
+                <span className="block text-sm text-ink-2">{known ? `of ${formatCount(known)}` : 'not recorded'}</span>
               </td>
               <td className="py-2 pr-4 text-right align-top">{share(others)}</td>
               <td className="py-2 text-right align-top">{costs === null ? 'not clear' : formatPoints(costs)}</td>
