@@ -1,6 +1,7 @@
 import { requireWhole } from '@/analytics/statistics/checked';
 import { type Estimate, enough, tooFew } from '@/analytics/statistics/estimate';
 import { RANGE_LEVELS, type RangeLevel, refrigerantMassOf, totalMassOf } from './calibration';
+import { type Caution, cautionsOf } from './cautions';
 import { type Expected, expectedMass, meansOf } from './expected';
 import { type MassHistory, requireHistory, routineTotals } from './history';
 import type { ChosenMethod } from './level-methods';
@@ -10,9 +11,8 @@ import { type MassRange, rangeOf } from './ranges';
 import { completeRunningMonth, type RunningMonth } from './running-month';
 import type { TrackRecord } from './track-record';
 
-/** Whole months before which nothing is forecast, and after which a season is known. */
+/** Whole months before which nothing is forecast. */
 export const FORECAST_NEEDS = 12;
-const SEASON_NEEDS = 24;
 /** A year ahead is never more than this many times the best year so far. */
 const MOST_GROWTH = 3;
 const GRAMS = 1000;
@@ -24,13 +24,6 @@ export type SeriesForecast = {
   ranges: { level: RangeLevel; lowerGrams: number; upperGrams: number }[];
 };
 export type MonthForecast = { total: SeriesForecast; byRefrigerant: Map<string, SeriesForecast> };
-
-/** What a reader must know beside the figures. */
-export type Caution =
-  | { kind: 'no season yet'; months: number; needs: number }
-  | { kind: 'lost months'; months: number }
-  | { kind: 'range not known yet' }
-  | { kind: 'held at three times the best year' };
 
 export type MassForecast = {
   method: ChosenMethod;
@@ -81,16 +74,6 @@ const sumOfPaths = ({ kg, count }: Paths): Float64Array => {
   return sums.sort();
 };
 
-const cautionsOf = (history: MassHistory, record: TrackRecord, held: number): Caution[] => {
-  const cautions: Caution[] = [];
-  if (history.months < SEASON_NEEDS)
-    cautions.push({ kind: 'no season yet', months: history.months, needs: SEASON_NEEDS });
-  if (history.lost.size > 0) cautions.push({ kind: 'lost months', months: history.lost.size });
-  if (totalMassOf(record, 0, 0.8) === null) cautions.push({ kind: 'range not known yet' });
-  if (held < 1) cautions.push({ kind: 'held at three times the best year' });
-  return cautions;
-};
-
 /**
  * The mass of the coming months by refrigerant: means in whole grams, of which a month's total is the exact sum, and
  * ranges from drawn paths, as wide as past forecasts say they must be. `record` is the track record of the same history.
@@ -137,7 +120,7 @@ export const forecastMass = (
     method,
     months,
     sum: seriesOf(allGrams, sumOfPaths(paths), (level) => totalMassOf(record, last, level)),
-    cautions: cautionsOf(history, record, held),
+    cautions: cautionsOf(history, record, held < 1),
     paths,
   });
 };

@@ -88,6 +88,16 @@ describe('short and broken histories', () => {
     expect(told.sum.meanGrams / forecast(whole).sum.meanGrams).toBeCloseTo(1, 1);
   });
 
+  test('refrigerants hardly seen, and those long gone, are named', () => {
+    const history = madeUpCompany('rare', { months: 60, routineKg: 100, noise: 0.1, refrigerants: 1 });
+    const at = (...places: number[]) => Array.from({ length: 60 }, (_, month) => (places.includes(month) ? 2 : 0));
+    const masses = new Map([...history.routineKg, ['R-12', at(3, 9, 20, 35)], ['R-32', at(57, 59)]]);
+    expect(forecast({ ...history, routineKg: masses }).cautions).toEqual([
+      { kind: 'hardly seen', refrigerants: ['R-32'] },
+      { kind: 'not seen for two years', refrigerants: ['R-12'] },
+    ]);
+  });
+
   test('nothing recovered for years is forecast as nothing', () => {
     const history: MassHistory = {
       firstMonthOfYear: 0,

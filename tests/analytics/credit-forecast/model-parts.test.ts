@@ -159,7 +159,7 @@ describe('a refrigerant that is gone', () => {
     const history: MassHistory = {
       firstMonthOfYear: 0,
       months,
-      routineKg: new Map([
+      routineKg: new Map<string, number[]>([
         ['R-22', Array.from({ length: months }, (_, at) => (at < 66 ? 20 : 0))],
         ['R-410A', Array.from({ length: months }, (_, at) => (at < 66 ? 80 : 100))],
       ]),
