@@ -14,7 +14,11 @@ export const UndoNotice = ({ decided, onGone }: { decided: JustDecided; onGone: 
   const { mutate, isPending, error } = useReopen();
   const { name, follows } = DECISION_WORDS[decided.decision];
   return (
-    <Notice tone="good" announce className="sticky bottom-3 z-20 max-w-xl self-start shadow-md print:hidden">
+    <Notice
+      tone="good"
+      announce
+      className="sticky bottom-20 z-20 lg:bottom-3 max-w-xl self-start shadow-md print:hidden"
+    >
       <span className="font-semibold text-ink">
         {decided.recordRef}: {name.toLowerCase()}.
       </span>{' '}

@@ -168,3 +168,14 @@ test('an undone import takes its flags with it', async () => {
   const withoutId = (found: typeof before) => found.map(({ id: _id, ...flag }) => flag);
   expect(withoutId(await flagsOf(company.companyId))).toEqual(withoutId(before));
 });
+
+test('a long renewal is done by a process of its own', async () => {
+  const large = await newCompany();
+  const owner = await large.token('owner');
+  expect((await takeIn(owner, [...recoveryFile(2_100, 3, 'P')].join(''))).added).toBe(2_100);
+  await settled(owner);
+  const apart = await flagsOf(large.companyId);
+  expect(apart.length).toBeGreaterThan(0);
+  await renewEverything(large.companyId);
+  expect(await flagsOf(large.companyId)).toEqual(apart);
+});
