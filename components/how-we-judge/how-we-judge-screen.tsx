@@ -1,10 +1,13 @@
 import { PageHead } from '@/components/ui/page-head';
 import { CertaintySection } from './certainty-section';
 import { DecisionsSection } from './decisions-section';
+import { LEAK_TOPICS } from './leak-topics';
 import { LowSection } from './low-section';
 import { PRACTICE_RULES } from './practice-rules';
 import { RulesSection } from './rules-section';
 import { SLIP_RULES } from './slip-rules';
+import { TECHNICIAN_TOPICS } from './technician-topics';
+import { TopicsSection } from './topics-section';
 
 /** How records are judged, in plain words: each rule, what it looks at, what it does not mean, and its source. */
 export const HowWeJudgeScreen = () => (
@@ -18,5 +21,7 @@ export const HowWeJudgeScreen = () => (
     <RulesSection id="slips" title="Slips of the pen and of the scale" rules={SLIP_RULES} />
     <RulesSection id="practice" title="How the pull was done" rules={PRACTICE_RULES} />
     <DecisionsSection />
+    <TopicsSection id="technicians" title="How technicians are compared" topics={TECHNICIAN_TOPICS} />
+    <TopicsSection id="leaks" title="Systems that leak" topics={LEAK_TOPICS} />
   </div>
 );

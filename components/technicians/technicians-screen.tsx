@@ -27,7 +27,7 @@ const TECHNICIANS: GroupedKind<TechnicianRow> = {
       Each is compared with what the same jobs would have given an average colleague; units that came short are excused,
       and chance is allowed for. It is for training: a reason to look, not a finding. Trainees and fewer than 20 jobs
       are not judged.{' '}
-      <Link href="/how-we-judge" className="link">
+      <Link href="/how-we-judge#technicians" className="link">
         How we judge
       </Link>
     </>

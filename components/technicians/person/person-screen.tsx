@@ -42,7 +42,7 @@ const PersonReport = ({ person, scope, today }: PersonReportProps) => {
         sub={
           <>
             {judgement?.why} It is for training: a reason to look, not a finding.{' '}
-            <Link href="/how-we-judge" className="link">
+            <Link href="/how-we-judge#technicians" className="link">
               How we judge
             </Link>
           </>
