@@ -18,6 +18,7 @@ import { knownNamesContract } from './records/known-names-contract';
 import { scopeOptions } from './scope-options/contract';
 import { siteRecoveries } from './sites/contract';
 import { start } from './start/contract';
+import { technicianPersonSchema } from './technician-person/contract';
 import { technicianRecoveries } from './technicians/contract';
 import { trendsComparison } from './trends-comparison/contract';
 import { applianceHistorySchema, siteHistorySchema } from './visits/contract';
@@ -84,6 +85,12 @@ export const PUBLISHED_ROUTES: readonly PublishedRoute[] = [
     summary: 'One appliance and its recoveries of all time',
     action: 'appliances:read',
     answer: applianceHistorySchema,
+  },
+  {
+    path: '/api/technicians/{id}',
+    summary: 'One technician against like jobs of colleagues, month by month and since each coaching',
+    action: 'technician:read',
+    answer: technicianPersonSchema,
   },
   {
     path: '/api/recoveries/{id}',

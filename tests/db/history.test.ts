@@ -7,6 +7,7 @@ import { entriesOf } from '../support/history';
 const TRACKED: Record<string, [column: string, value: string]> = {
   appliances: ['name', 'New name'],
   branches: ['name', 'New name'],
+  charge_additions: ['notes', 'New note'],
   coaching: ['plan', 'New plan'],
   cylinders: ['name', 'New name'],
   flag_decisions: ['note', 'New note'],
@@ -15,6 +16,7 @@ const TRACKED: Record<string, [column: string, value: string]> = {
   memberships: ['role', 'auditor'],
   notes: ['text', 'New note'],
   recoveries: ['notes', 'New note'],
+  site_leak_methods: ['method', 'rolling_average'],
   sites: ['name', 'New name'],
   technicians: ['name', 'New name'],
 };
@@ -25,7 +27,9 @@ const DELETE_ORDER = [
   'flags',
   'flag_renewals',
   'recoveries',
+  'charge_additions',
   'appliances',
+  'site_leak_methods',
   'sites',
   'memberships',
   'coaching',
