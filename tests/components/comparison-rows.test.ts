@@ -52,7 +52,7 @@ test('figures are in the viewer’s unit, shares change by points, and what cann
     ['Median yield', '90.0%', '90.0%', '0.0 points'],
     ['Held', '80%', '75%', '+5.0 points'],
     ['Down to level', '—', '—', '—'],
-    ['Far below like jobs', '3', '3', '0.0 points'],
+    ['Flagged', '3', '3', '0.0 points'],
     ['CO2e', '90.0', '0.0', '—'],
   ]);
 });
