@@ -49,8 +49,8 @@ type SortableTableProps<Row extends RowData> = {
   rowId: (row: Row) => string;
 };
 
-/** More rows than this at once make a browser slow; who wants all of them asks. */
-const MOST_ROWS = 200;
+/** More rows than this, the first in the chosen order, make a page endless; who wants all of them asks. */
+const FIRST_ROWS = 50;
 
 /** A table that its reader puts in order by any column; the order it comes in is the first. */
 export const SortableTable = <Row extends RowData>({ label, columns, data, rowId }: SortableTableProps<Row>) => {
@@ -93,7 +93,7 @@ export const SortableTable = <Row extends RowData>({ label, columns, data, rowId
           ))}
         </thead>
         <tbody>
-          {(all ? rows : rows.slice(0, MOST_ROWS)).map((row) => (
+          {(all ? rows : rows.slice(0, FIRST_ROWS)).map((row) => (
             <tr key={row.id}>
               {row.getAllCells().map((cell) => {
                 const { numeric = false, rowHeader = false } = cell.column.columnDef.meta ?? {};
@@ -111,11 +111,11 @@ export const SortableTable = <Row extends RowData>({ label, columns, data, rowId
           ))}
         </tbody>
       </Table>
-      {rows.length > MOST_ROWS && !all ? (
+      {rows.length > FIRST_ROWS && !all ? (
         <p className="mt-3 flex flex-wrap items-baseline gap-x-4 text-sm text-ink-2">
-          The first {formatCount(MOST_ROWS)} of {formatCount(rows.length)}; the files have them all.
+          The first {formatCount(FIRST_ROWS)} of {formatCount(rows.length)}; the files have them all.
           <TextButton className="print:hidden" onClick={() => setAll(true)}>
-            Show all
+            Show all {formatCount(rows.length)}
           </TextButton>
         </p>
       ) : null}
