@@ -87,7 +87,11 @@ export const FlagsScreen = () => {
                 <Empty title="Nothing here.">Choose another period, another reason, or look at what was decided.</Empty>
               )}
               {flags.hasNextPage ? (
-                <Button className="mt-4 mb-2" disabled={flags.isFetchingNextPage} onClick={() => flags.fetchNextPage()}>
+                <Button
+                  className="mt-4 mb-2 print:hidden"
+                  disabled={flags.isFetchingNextPage}
+                  onClick={() => flags.fetchNextPage()}
+                >
                   {flags.isFetchingNextPage ? 'Reading more' : 'Show more'}
                 </Button>
               ) : null}

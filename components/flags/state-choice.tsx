@@ -12,7 +12,7 @@ export const StateChoice = ({ state, onChange }: { state: FlagState; onChange: (
           {NAMES[one]}
         </span>
       ) : (
-        <TextButton key={one} onClick={() => onChange(one)}>
+        <TextButton key={one} className="print:hidden" onClick={() => onChange(one)}>
           {NAMES[one]}
         </TextButton>
       ),

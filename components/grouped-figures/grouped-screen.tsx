@@ -67,7 +67,14 @@ export const GroupedScreen = <Row extends GroupFigures>({ kind, scope, answer, p
         {picture}
         <Sheet
           title={kind.title}
-          aside={`${kind.order}; a heading puts them in another order, every figure opens its records`}
+          aside={
+            <>
+              {kind.order}
+              <span className="print:hidden">
+                ; a heading puts them in another order, every figure opens its records
+              </span>
+            </>
+          }
           tools={<FileButtons makeTable={() => groupedFile(kind.label, kind.columns, items, scope)} />}
         >
           <GroupedTable {...kind} items={items} scope={scope} />

@@ -41,7 +41,7 @@ export const AdditionsSheet = ({ leaks, unit }: { leaks: ApplianceLeaks; unit: D
         </p>
       )}
       {additions.length > SHOWN && !all ? (
-        <TextButton className="mt-2" onClick={() => setAll(true)}>
+        <TextButton className="mt-2 print:hidden" onClick={() => setAll(true)}>
           Show all {formatCount(additions.length)}
         </TextButton>
       ) : null}

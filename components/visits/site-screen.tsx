@@ -47,7 +47,11 @@ export const SiteScreen = ({ history: { siteId, site, address, visits } }: { his
           <>
             <Sheet
               title="Its appliances"
-              aside="by name; choose a heading to put them in another order"
+              aside={
+                <>
+                  by name<span className="print:hidden">; a heading puts them in another order</span>
+                </>
+              }
               tools={
                 data ? <FileButtons makeTable={() => groupedFile(label, APPLIANCE_COLUMNS, data.items, own)} /> : null
               }
