@@ -60,7 +60,7 @@ export const RecordsScreen = () => {
       ) : error ? (
         <Failed error={error} onRetry={() => refetch()} />
       ) : (
-        <div className="bg-sheet">
+        <div className="min-h-dvh bg-sheet">
           <Loading minHeight={480} />
         </div>
       )}

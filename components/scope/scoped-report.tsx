@@ -33,13 +33,18 @@ export const ScopedReport = <Answer,>({
     <ScopeSentence />
     {data ? null : <h1 className="sr-only">{screen}</h1>}
     {data ? (
-      <div aria-busy={stale} className={clsx('flex flex-col gap-6 transition-opacity', stale && 'opacity-50')}>
+      <div
+        key="answer"
+        aria-busy={stale}
+        className={clsx('flex flex-col gap-6 transition-opacity', stale && 'opacity-50')}
+      >
         {isEmpty(data) ? <NothingInScope /> : children(data)}
       </div>
     ) : error ? (
       <Failed error={error} onRetry={retry} />
     ) : (
-      <div className="mt-20 bg-sheet px-6 py-5">
+      // Another element than the answer, and as tall as the window: neither the sheet nor the foot of the page moves.
+      <div key="reading" className="mt-20 min-h-dvh bg-sheet px-6 py-5">
         <Loading minHeight={480} />
       </div>
     )}
