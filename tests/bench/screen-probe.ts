@@ -35,15 +35,21 @@ const install = () => {
 };
 
 /** Nothing is asked for, nothing shown is of the scope before, and what came has been painted. */
-const painted = (askedBefore: number) =>
-  new Promise<number>((resolve) => {
-    const look = () => {
-      const { asked, pending } = window.probe;
-      const settled = asked > askedBefore && pending === 0 && !document.querySelector('main [aria-busy="true"]');
-      requestAnimationFrame(settled ? () => setTimeout(() => resolve(performance.now())) : look);
-    };
-    requestAnimationFrame(look);
-  });
+const painted = async (askedBefore: number): Promise<number> => {
+  // No function with a name of its own in here: the loader would wrap it in a helper that the browser has not.
+  const began = performance.now();
+  for (;;) {
+    await new Promise(requestAnimationFrame);
+    const { asked, pending } = window.probe;
+    const busy = document.querySelectorAll('main [aria-busy="true"]').length;
+    if (asked > askedBefore && pending === 0 && busy === 0) break;
+    if (performance.now() - began > 30_000)
+      throw new Error(`The screen did not settle: ${asked - askedBefore} asked, ${pending} pending, ${busy} busy`);
+  }
+  await new Promise(requestAnimationFrame);
+  await new Promise((resolve) => setTimeout(resolve));
+  return performance.now();
+};
 
 /** Loads a screen as somebody who comes for the first time: nothing is kept by the browser. */
 export const loadScreen = async (page: Page, address: string): Promise<ScreenLoad> => {
