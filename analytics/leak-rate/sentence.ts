@@ -45,6 +45,8 @@ const SUBJECT: Record<ShownRule['rule'], string> = {
   hfc: 'an HFC or a substitute with a GWP above 53',
 };
 
+const PREDICATE: Record<ShownRule['rule'], string> = { ...SUBJECT, ozone: 'ozone-depleting' };
+
 /** Whether a rule holds for the unit and why. */
 export const ruleSentence = (
   { rule, paragraph, since, leastCharge, holds, why }: ShownRule,
@@ -53,7 +55,7 @@ export const ruleSentence = (
   const scope = `${formatMassWithUnit(leastCharge, unit, 0)} of ${SUBJECT[rule]}`;
   const from = formatDay(since);
   if (holds === 'yes') return `${paragraph} holds from ${from} on: the unit has at least ${scope}.`;
-  if (why === 'refrigerant') return `${paragraph} does not hold: the refrigerant is not ${SUBJECT[rule]}.`;
+  if (why === 'refrigerant') return `${paragraph} does not hold: the refrigerant is not ${PREDICATE[rule]}.`;
   if (why === 'charge') return `${paragraph} does not hold: it begins at ${scope}.`;
   if (why === 'light_commercial')
     return `${paragraph} does not hold: it leaves out residential and light commercial air conditioning and heat pumps, and the unit is said to be one.`;

@@ -59,6 +59,9 @@ test('each reason about a rule is told with its paragraph', () => {
   );
   expect(ruleSentence(rule({ holds: 'no', why: 'charge' }), 'lb')).toContain('begins at 15');
   expect(ruleSentence(rule({ holds: 'no', why: 'refrigerant' }), 'lb')).toContain('does not hold');
+  expect(ruleSentence(rule({ rule: 'ozone', holds: 'no', why: 'refrigerant' }), 'lb')).toMatch(
+    /the refrigerant is not ozone-depleting\.$/,
+  );
   expect(ruleSentence(rule({ holds: 'no', why: 'light_commercial' }), 'lb')).toContain('leaves out residential');
   expect(ruleSentence(rule({ holds: 'ask', why: 'light_commercial_unstated' }), 'lb')).toContain('must say');
 });
