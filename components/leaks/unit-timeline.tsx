@@ -44,7 +44,8 @@ export const UnitTimeline = ({ leaks: { events, additions, suspicion }, visits: 
   );
   const grid = [
     ...[0, 0.5, 1].map((share) => ({ key: `found ${share}`, at: found(share), text: formatPercent(share) })),
-    ...added.ticks(3).map((value) => ({
+    // An axis without anything on it would be noughts one over the other.
+    ...(events.length ? added.ticks(3) : []).map((value) => ({
       key: `added ${value}`,
       at: added(value),
       text: formatNumber(value, highest < 5 ? 1 : 0),
@@ -63,7 +64,7 @@ export const UnitTimeline = ({ leaks: { events, additions, suspicion }, visits: 
           Recovered, share of the full charge
         </text>
         <text x={0} y={ADDED.top - 18} fill="var(--ink)">
-          Refrigerant added, {unit}
+          Refrigerant added{events.length ? `, ${unit}` : ': none is written down'}
         </text>
         {grid.map(({ key, at, text }) => (
           <g key={key}>
