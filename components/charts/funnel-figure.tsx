@@ -77,7 +77,7 @@ export const FunnelFigure = ({ points, wordsOf, verbsOf, onOpen, label, hint, ..
           ) : null}
         </div>
       </div>
-      <figcaption className="mt-2 flex min-h-[6rem] flex-wrap content-start gap-x-4 text-sm text-ink-2 sm:min-h-12">
+      <figcaption className="mt-2 flex min-h-[6rem] flex-wrap content-start gap-x-4 text-sm text-ink-2 sm:min-h-12 print:min-h-0">
         {active ? (
           <>
             <span className="tabular-nums">{wordsOf(active)}</span>

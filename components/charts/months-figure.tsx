@@ -88,7 +88,7 @@ export const MonthsFigure = (props: MonthsFigureProps) => {
         </div>
       </div>
       {narrow ? legend : null}
-      <figcaption className="mt-2 flex min-h-[7.75rem] flex-wrap content-start gap-x-4 text-sm text-ink-2 sm:min-h-16">
+      <figcaption className="mt-2 flex min-h-[7.75rem] flex-wrap content-start gap-x-4 text-sm text-ink-2 sm:min-h-16 print:min-h-0">
         {active ? (
           <>
             <span className="tabular-nums">{wordsOf(active)}</span>
