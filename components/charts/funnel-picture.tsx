@@ -22,7 +22,7 @@ const RADIUS = 5.5;
 // A dot is small; what catches a finger is not.
 const CATCH = 16;
 const LINE = 17;
-// A name stands to the left of its dot where it would leave the picture on the right.
+// A name stands to the left of its dot where it would leave the picture on the right, or cover another named dot.
 const ROOM_FOR_NAME = 130;
 const DASHES = ['', '5 4'];
 
@@ -40,6 +40,11 @@ export const FunnelPicture = (props: FunnelPictureProps) => {
     margin.top,
     height - margin.bottom,
   );
+  const covers = (point: FunnelPoint, side: 1 | -1): boolean =>
+    named.some(({ key, amount, value }) => {
+      const away = side * (x(amount) - x(point.amount));
+      return key !== point.key && away >= 0 && away < ROOM_FOR_NAME && Math.abs(y(value) - y(point.value)) < LINE;
+    });
   const read = points.find(({ key }) => key === active);
   return (
     <svg width={width} height={height} aria-hidden="true">
@@ -119,7 +124,7 @@ export const FunnelPicture = (props: FunnelPictureProps) => {
           {labels.map(({ id, y: at }) => {
             const point = points.find(({ key }) => key === id);
             if (!point) return null;
-            const isLeft = x(point.amount) > right - ROOM_FOR_NAME;
+            const isLeft = x(point.amount) > right - ROOM_FOR_NAME || (covers(point, 1) && !covers(point, -1));
             const beside = CATCH * (isLeft ? -1 : 1);
             return (
               <text key={id} x={x(point.amount) + beside} y={at} dy="0.34em" textAnchor={isLeft ? 'end' : 'start'}>
