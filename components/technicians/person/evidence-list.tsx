@@ -5,7 +5,7 @@ import type { DisplayUnit } from '@/lib/vocabulary';
 import { effectWords, type Ranged } from '../wording';
 
 type Judgement = NonNullable<TechnicianPerson['judgement']>;
-type Line = { term: string; words: ReactNode };
+type Line = { name: string; words: ReactNode };
 
 const ranged = ({ value, low, high }: Ranged): string =>
   `${formatPoints(value)} points, likely range ${formatPoints(low)} to ${formatPoints(high)}`;
@@ -22,26 +22,26 @@ const leftOutWords = ({ firstJobs, scaleInDoubt, shortOnArrival, beforeChange }:
 
 const linesOf = (own: Judgement, unit: DisplayUnit): Line[] => {
   const lines: (Line | null)[] = [
-    own.plainEffect ? { term: 'All jobs as they are', words: effectWords(own.plainEffect) } : null,
-    own.shrunkEffect ? { term: 'Luck allowed for', words: ranged(own.shrunkEffect) } : null,
+    own.plainEffect ? { name: 'All jobs as they are', words: effectWords(own.plainEffect) } : null,
+    own.shrunkEffect ? { name: 'Luck allowed for', words: ranged(own.shrunkEffect) } : null,
     {
-      term: 'Mass',
+      name: 'Mass',
       words: `${formatMassWithUnit(own.observedMass, unit)} came, ${formatMassWithUnit(own.expectedMass, unit)} would have been expected; a few large systems decide these, so they judge nobody`,
     },
     own.earlyStops
       ? {
-          term: 'Look stopped early',
+          name: 'Look stopped early',
           words: `about ${formatCount(Math.round(own.earlyStops.found))} of ${formatCount(Math.round(own.earlyStops.of))} pulls (${formatPercent(own.earlyStops.share)}); usual is ${formatPercent(own.earlyStops.usualShare)}`,
         }
       : null,
-    own.trend ? { term: 'A year brings', words: ranged(own.trend) } : null,
+    own.trend ? { name: 'A year brings', words: ranged(own.trend) } : null,
     own.learning
-      ? { term: 'Since the first 40 jobs', words: ranged({ ...own.learning, value: own.learning.gain }) }
+      ? { name: 'Since the first 40 jobs', words: ranged({ ...own.learning, value: own.learning.gain }) }
       : null,
     own.run
-      ? { term: 'A run', words: `jobs lie ${own.run.side} what is expected since ${formatDay(own.run.from)}` }
+      ? { name: 'A run', words: `jobs lie ${own.run.side} what is expected since ${formatDay(own.run.from)}` }
       : null,
-    leftOutWords(own.leftOut) ? { term: 'Left out', words: leftOutWords(own.leftOut) } : null,
+    leftOutWords(own.leftOut) ? { name: 'Left out', words: leftOutWords(own.leftOut) } : null,
   ];
   return lines.filter((line) => line !== null);
 };
@@ -49,9 +49,9 @@ const linesOf = (own: Judgement, unit: DisplayUnit): Line[] => {
 /** What the verdict stands on, line by line. */
 export const EvidenceList = ({ judgement, unit }: { judgement: Judgement; unit: DisplayUnit }) => (
   <dl className="grid gap-x-6 gap-y-2 tabular-nums sm:grid-cols-[13rem_minmax(0,1fr)]">
-    {linesOf(judgement, unit).map(({ term, words }) => (
-      <div key={term} className="contents">
-        <dt className="font-medium">{term}</dt>
+    {linesOf(judgement, unit).map(({ name, words }) => (
+      <div key={name} className="contents">
+        <dt className="font-medium">{name}</dt>
         <dd className="max-w-prose text-ink-2 max-sm:mb-1.5">{words}</dd>
       </div>
     ))}
