@@ -22,7 +22,7 @@ const ofVisits = ({ visits, shortVisits }: ToldSuspicion): string =>
 export const suspicionSentence = (told: ToldSuspicion): string => {
   const { visits, shortVisits, expectedShort, leakSuspicion } = told;
   if (visits < LEAST_VISITS)
-    return `Nothing can be said of a leak: ${visits === 0 ? 'no visit' : plural(visits, 'visit', 'visits')} of the last ${VISIT_MONTHS} months ${visits > 1 ? 'tell' : 'tells'} what charge was there, and it takes ${LEAST_VISITS}.`;
+    return `Nothing can be said of a leak: ${visits === 0 ? 'no visit' : plural(visits, 'visit', 'visits')} of the last ${VISIT_MONTHS} months ${visits > 1 ? 'tell' : 'tells'} what charge was there, and it takes ${plural(LEAST_VISITS, 'visit', 'visits')}.`;
   if (leakSuspicion === null)
     return 'Nothing can be said of a leak: the company has too few appliances to compare with.';
   if (shortVisits === 0) return `No leak is suspected: it came with its charge at all ${visits} visits.`;

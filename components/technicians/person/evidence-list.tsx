@@ -23,7 +23,7 @@ const leftOutWords = ({ firstJobs, scaleInDoubt, shortOnArrival, beforeChange }:
 const linesOf = (own: Judgement, unit: DisplayUnit): Line[] => {
   const lines: (Line | null)[] = [
     own.plainEffect ? { name: 'All jobs as they are', words: effectWords(own.plainEffect) } : null,
-    own.shrunkEffect ? { name: 'Luck allowed for', words: ranged(own.shrunkEffect) } : null,
+    own.shrunkEffect ? { name: 'Drawn towards the crew', words: ranged(own.shrunkEffect) } : null,
     {
       name: 'Mass',
       words: `${formatMassWithUnit(own.observedMass, unit)} came, ${formatMassWithUnit(own.expectedMass, unit)} would have been expected; a few large systems decide these, so they judge nobody`,
