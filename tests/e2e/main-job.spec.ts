@@ -12,7 +12,8 @@ const rowOf = (page: Page, table: RegExp, head: string | RegExp): Locator =>
 /** The number in a row under the column of this name, thousands separated by commas; NaN while there is none. */
 const numberIn = async (page: Page, table: RegExp, head: string | RegExp, column: RegExp): Promise<number> => {
   const heads = await tableOf(page, table).getByRole('columnheader').allTextContents();
-  const at = heads.findIndex((text) => column.test(text.replace(/\s+/g, ' ').trim()));
+  // A heading may begin with the mark that opens its meaning.
+  const at = heads.findIndex((text) => column.test(text.replace(/\s+/g, ' ').replace(/^[?\s]+/, '')));
   const cells = await rowOf(page, table, head).locator('th, td').allTextContents();
   return Number(cells[at]?.replaceAll(',', ''));
 };
