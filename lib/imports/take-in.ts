@@ -12,7 +12,7 @@ import { RECORD_NAMES, type Stated, statedBy } from './record-columns';
 import { planFile, rememberMapping } from './remembered-mapping';
 import type { FilePlan } from './rows';
 import { ANALYZE_DECIDED_ROWS, COUNT_OUTCOMES, createDecidedRows, INSERT_IMPORT_ROWS } from './sql/decide';
-import { FINISH_IMPORT, LOCK_IMPORT } from './sql/finish';
+import { FINISH_IMPORT, IMPORT_STATUS, LOCK_IMPORT } from './sql/finish';
 import { ANALYZE_MATCHED_ROWS, CREATE_MATCHED_ROWS, LOCK_KNOWN_RECORDS } from './sql/match';
 import { ANALYZE_STAGED_NAMES, CREATE_STAGED_APPLIANCES, createStagedNames } from './sql/names';
 import { FOR_MANY_ROWS, REFRESH_FROM_ROWS, REFRESH_STATISTICS } from './sql/settings';
@@ -74,7 +74,8 @@ const takeRows = (work: ImportWork, plan: FilePlan): Promise<void> =>
     const { scope, importId, context } = work;
     const owner = [scope.companyId, importId];
     // Should a worker be thought dead that is not, the second one waits here and then finds the work done.
-    const { rows } = await client.query<{ status: string }>(LOCK_IMPORT, owner);
+    await client.query(LOCK_IMPORT, [importId]);
+    const { rows } = await client.query<{ status: string }>(IMPORT_STATUS, owner);
     if (rows[0]?.status !== 'running') return;
     await client.query(FOR_MANY_ROWS);
     const stated = statedBy(plan.fields);

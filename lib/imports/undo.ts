@@ -8,7 +8,7 @@ import { scopeOf, type Viewer } from '@/lib/auth/viewer';
 import { AppError, conflict } from '@/lib/errors';
 import { REQUEST_ALL_FLAGS } from '@/lib/flags/request';
 import type { ImportPayload } from '@/lib/jobs/task';
-import { LOCK_IMPORT } from './sql/finish';
+import { IMPORT_STATUS, LOCK_IMPORT } from './sql/finish';
 import { FOR_MANY_ROWS, REFRESH_FROM_ROWS, REFRESH_STATISTICS } from './sql/settings';
 import {
   CREATE_TAKEN_ROWS,
@@ -33,7 +33,8 @@ const LOOK_EVERY_MS = 150;
 export const undoImport = ({ companyId, importId, actor }: ImportPayload): Promise<void> =>
   withCompanyConnection({ companyId, actor, reason: `undo of import ${importId}` }, async (client) => {
     const owner = [companyId, importId];
-    const { rows } = await client.query<{ status: string }>(LOCK_IMPORT, owner);
+    await client.query(LOCK_IMPORT, [importId]);
+    const { rows } = await client.query<{ status: string }>(IMPORT_STATUS, owner);
     if (rows[0]?.status !== 'done') return;
     await client.query(FOR_MANY_ROWS);
     await client.query(CREATE_TAKEN_ROWS, owner);

@@ -1,8 +1,8 @@
-/** One worker at a time works on an import. $1 company, $2 import. */
-export const LOCK_IMPORT = `
-  select status from imports,
-    (select pg_advisory_xact_lock(hashtextextended('import ' || $2::uuid, 0))) locked
-  where company_id = $1 and id = $2::uuid`;
+/** One worker at a time works on an import. $1 import. */
+export const LOCK_IMPORT = `select pg_advisory_xact_lock(hashtextextended('import ' || $1::uuid, 0))`;
+
+/** $1 company, $2 import. A statement of its own: one that waits for the lock sees the import as it was before. */
+export const IMPORT_STATUS = 'select status from imports where company_id = $1 and id = $2::uuid';
 
 /** $1 company, $2 import, $3 counts, $4 summary. */
 export const FINISH_IMPORT = `
